@@ -1,0 +1,106 @@
+using HeadToWatts.FlowRecords;
+
+namespace HeadToWatts.EnergyYield;
+
+/// <summary>Energy of one month of the year, from the days of a record.</summary>
+/// <param name="Month">1 to 12.</param>
+/// <param name="MeanEnergyKwh">Mean power of the month's days times the hours of the month, kWh.</param>
+/// <param name="MeanFlowM3PerS">Mean flow of the month's days, m3/s.</param>
+/// <param name="Days">Days of the record that fall in the month and have a flow.</param>
+public sealed record MonthEnergy(int Month, double MeanEnergyKwh, double MeanFlowM3PerS, int Days);
+
+/// <summary>Energy of one calendar year of a record.</summary>
+/// <param name="Year">Calendar year.</param>
+/// <param name="EnergyKwh">Energy of the days that have a flow, kWh.</param>
+/// <param name="Days">Days of the year that have a flow.</param>
+/// <param name="IsWhole">True when at least 95 percent of the year's days have a flow.</param>
+public sealed record YearEnergy(int Year, double EnergyKwh, int Days, bool IsWhole);
+
+/// <summary>The plant run on every day of a record: months and years. Days without a flow are left out, not read as zero.</summary>
+/// <param name="Months">Twelve months.</param>
+/// <param name="Years">The record's calendar years in order.</param>
+public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<YearEnergy> Years)
+{
+    private static readonly int[] DaysOfMonth = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
+
+    /// <summary>Sum of the twelve months, kWh a year.</summary>
+    public double SumOfMonthsKwh => Months.Sum(m => m.MeanEnergyKwh);
+
+    /// <summary>The whole years' energies, lowest first, kWh.</summary>
+    public IReadOnlyList<double> WholeYearsKwh => [.. Years.Where(y => y.IsWhole).Select(y => y.EnergyKwh).Order()];
+
+    /// <summary>
+    /// Energy reached or exceeded in nine years out of ten, kWh, by the Weibull position among the whole years; null with fewer than ten of them.
+    /// </summary>
+    public double? DryYearKwh
+    {
+        get
+        {
+            var years = WholeYearsKwh;
+            if (years.Count < 10)
+                return null;
+            var rank = (0.1 * (years.Count + 1)) - 1;
+            var low = (int)Math.Floor(rank);
+            return years[low] + ((rank - low) * (years[Math.Min(low + 1, years.Count - 1)] - years[low]));
+        }
+    }
+
+    /// <summary>Runs the plant over a record.</summary>
+    /// <param name="plant">The plant.</param>
+    /// <param name="record">Daily flows arriving.</param>
+    /// <param name="season">Days on which the plant may run; on others the flow counts as zero, as in the curve.</param>
+    /// <param name="allocation">Prior deliveries and reserved flow.</param>
+    public static DailyRun Over(PlantCurve plant, DailyRecord record, OperatingSeason season, WaterAllocation allocation)
+    {
+        ArgumentNullException.ThrowIfNull(plant);
+        ArgumentNullException.ThrowIfNull(record);
+        ArgumentNullException.ThrowIfNull(season);
+        ArgumentNullException.ThrowIfNull(allocation);
+        var availability = plant.Design.Train.Availability;
+        var powerSum = new double[12];
+        var flowSum = new double[12];
+        var days = new int[12];
+        var years = new List<YearEnergy>();
+        var known = new Dictionary<double, double>();
+        var flows = record.Flows;
+        var day = record.FirstDay;
+        var (year, yearKwh, yearDays) = (day.Year, 0.0, 0);
+        for (var i = 0; i < flows.Length; i++, day = day.AddDays(1))
+        {
+            if (day.Year != year)
+            {
+                CloseYear();
+                (year, yearKwh, yearDays) = (day.Year, 0, 0);
+            }
+
+            if (double.IsNaN(flows[i]))
+                continue;
+            var arriving = season.Runs(day) ? flows[i] : 0;
+            if (!known.TryGetValue(arriving, out var powerKw))
+            {
+                powerKw = plant.At(allocation.Split(arriving).UsableM3PerS).MeterPowerKw * availability;
+                known.Add(arriving, powerKw);
+            }
+
+            var month = day.Month - 1;
+            powerSum[month] += powerKw;
+            flowSum[month] += arriving;
+            days[month]++;
+            yearKwh += powerKw * 24;
+            yearDays++;
+        }
+
+        CloseYear();
+        var months = new MonthEnergy[12];
+        for (var m = 0; m < 12; m++)
+        {
+            var n = days[m];
+            months[m] = new MonthEnergy(m + 1, n == 0 ? 0 : powerSum[m] / n * 24 * DaysOfMonth[m], n == 0 ? 0 : flowSum[m] / n, n);
+        }
+
+        return new DailyRun(months, years);
+
+        void CloseYear() =>
+            years.Add(new YearEnergy(year, yearKwh, yearDays, yearDays >= 0.95 * (DateTime.IsLeapYear(year) ? 366 : 365)));
+    }
+}

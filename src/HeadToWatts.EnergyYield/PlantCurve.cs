@@ -1,0 +1,204 @@
+using HeadToWatts.Turbines.Units;
+
+namespace HeadToWatts.EnergyYield;
+
+/// <summary>
+/// Power at the meter as a function of the usable flow. Units come in one after another as the flow rises; where one more unit,
+/// or more flow through the pipe, would give less power than before, the flow taken stays where the power was highest and the
+/// rest passes by (decision 0007). Power therefore never falls as the usable flow rises.
+/// </summary>
+public sealed class PlantCurve
+{
+    private readonly double[] _from;
+    private readonly double[] _heldFlow;
+    private readonly double _gammaKnPerM3;
+
+    /// <summary>Works out where the plant follows the flow and where it holds.</summary>
+    /// <param name="design">The plant.</param>
+    public PlantCurve(PlantDesign design)
+    {
+        ArgumentNullException.ThrowIfNull(design);
+        Design = design;
+        _gammaKnPerM3 = design.Site.SpecificWeightNPerM3 / 1000;
+
+        var from = new List<double>();
+        var held = new List<double>();
+        var best = new Best(0, 0);
+        var edges = Edges(design.Units);
+        Add(0, 0);
+        for (var i = 0; i + 1 < edges.Count; i++)
+            best = Piece(edges[i], edges[i + 1], best, Add);
+
+        // Beyond the design flow nothing more is taken.
+        Add(edges[^1], best.FlowM3PerS);
+        BestFlowM3PerS = best.FlowM3PerS;
+        BestPowerKw = best.PowerKw;
+        _from = [.. from];
+        _heldFlow = [.. held];
+
+        void Add(double fromFlow, double heldFlow)
+        {
+            if (from.Count > 0 && fromFlow <= from[^1])
+            {
+                held[^1] = heldFlow;
+                return;
+            }
+
+            if (held.Count > 0 && (held[^1].Equals(heldFlow) || (double.IsNaN(held[^1]) && double.IsNaN(heldFlow))))
+                return;
+            from.Add(fromFlow);
+            held.Add(heldFlow);
+        }
+    }
+
+    /// <summary>The plant.</summary>
+    public PlantDesign Design { get; }
+
+    /// <summary>The turbine flow of highest power, m3/s: the design flow, or less when the pipe loses more than the flow brings.</summary>
+    public double BestFlowM3PerS { get; }
+
+    /// <summary>The highest power at the meter, kW.</summary>
+    public double BestPowerKw { get; }
+
+    /// <summary>Usable flows at which the behaviour changes, ascending, m3/s.</summary>
+    public IReadOnlyList<double> BreakpointsM3PerS
+    {
+        get
+        {
+            var all = new SortedSet<double>(Edges(Design.Units));
+            foreach (var flow in _from)
+                all.Add(flow);
+            return [.. all];
+        }
+    }
+
+    /// <summary>How the plant runs on a usable flow.</summary>
+    /// <param name="usableFlowM3PerS">Usable flow, m3/s.</param>
+    public PlantPoint At(double usableFlowM3PerS)
+    {
+        var taken = FlowTakenM3PerS(usableFlowM3PerS);
+        return taken > 0 ? Follow(taken) with { UsableFlowM3PerS = usableFlowM3PerS } : new PlantPoint(usableFlowM3PerS, 0, 0, Design.GrossHead.Metres, 0, 0, 0);
+    }
+
+    /// <summary>Of a usable flow, what the plant would take, m3/s.</summary>
+    /// <param name="usableFlowM3PerS">Usable flow, m3/s.</param>
+    public double FlowTakenM3PerS(double usableFlowM3PerS)
+    {
+        var lo = 0;
+        var hi = _from.Length - 1;
+        while (lo < hi)
+        {
+            var mid = (lo + hi + 1) / 2;
+            if (_from[mid] <= usableFlowM3PerS)
+                lo = mid;
+            else
+                hi = mid - 1;
+        }
+
+        var held = _heldFlow[lo];
+        return double.IsNaN(held) ? usableFlowM3PerS : held;
+    }
+
+    private static List<double> Edges(UnitSet units)
+    {
+        var edges = new List<double> { 0 };
+        foreach (var flow in units.FlowBreakpointsM3PerS)
+        {
+            if (flow > edges[^1] && flow < units.DesignFlowM3PerS * (1 - 1e-12))
+                edges.Add(flow);
+        }
+
+        edges.Add(units.DesignFlowM3PerS);
+        return edges;
+    }
+
+    // Inside a piece the units running do not change and efficiency is linear, so power rises to one top at most.
+    private Best Piece(double a, double b, Best best, Action<double, double> add)
+    {
+        var start = a + (1e-10 * (b - a));
+        if (PowerKw(start) >= best.PowerKw && PowerKw(b) > PowerKw(b - (1e-6 * (b - a))) && PowerKw(b) > best.PowerKw)
+        {
+            add(a, double.NaN);
+            return new Best(b, PowerKw(b));
+        }
+
+        var top = Top(start, b);
+        if (PowerKw(top) <= best.PowerKw)
+        {
+            add(a, best.FlowM3PerS);
+            return best;
+        }
+
+        if (PowerKw(start) < best.PowerKw)
+        {
+            add(a, best.FlowM3PerS);
+            add(Crossing(start, top, best.PowerKw), double.NaN);
+        }
+        else
+        {
+            add(a, double.NaN);
+        }
+
+        if (top < b)
+            add(top, top);
+        return new Best(top, PowerKw(top));
+    }
+
+    private double Top(double a, double b)
+    {
+        if (PowerKw(b) > PowerKw(b - (1e-6 * (b - a))))
+            return b;
+        const double golden = 0.6180339887498949;
+        var x1 = b - (golden * (b - a));
+        var x2 = a + (golden * (b - a));
+        var f1 = PowerKw(x1);
+        var f2 = PowerKw(x2);
+        while (b - a > 1e-9 * b)
+        {
+            if (f1 < f2)
+            {
+                a = x1;
+                (x1, f1) = (x2, f2);
+                x2 = a + (golden * (b - a));
+                f2 = PowerKw(x2);
+            }
+            else
+            {
+                b = x2;
+                (x2, f2) = (x1, f1);
+                x1 = b - (golden * (b - a));
+                f1 = PowerKw(x1);
+            }
+        }
+
+        return (a + b) / 2;
+    }
+
+    private double Crossing(double a, double b, double powerKw)
+    {
+        for (var i = 0; i < 60 && b - a > 1e-15 * b; i++)
+        {
+            var mid = (a + b) / 2;
+            if (PowerKw(mid) < powerKw)
+                a = mid;
+            else
+                b = mid;
+        }
+
+        return b;
+    }
+
+    private double PowerKw(double flowM3PerS) => Follow(flowM3PerS).MeterPowerKw;
+
+    private PlantPoint Follow(double flowM3PerS)
+    {
+        var load = Design.Units.LoadAt(flowM3PerS);
+        if (load.Running == 0)
+            return new PlantPoint(flowM3PerS, 0, 0, Design.GrossHead.Metres, 0, 0, 0);
+        var netHeadM = Design.NetHeadM(load.TurbineFlowM3PerS);
+        var shaftKw = _gammaKnPerM3 * load.TurbineFlowM3PerS * netHeadM * load.Efficiency;
+        return new PlantPoint(flowM3PerS, load.TurbineFlowM3PerS, load.Running, netHeadM, load.Efficiency, shaftKw, Design.Train.MeterPowerKw(shaftKw));
+    }
+
+    private readonly record struct Best(double FlowM3PerS, double PowerKw);
+}

@@ -1,0 +1,22 @@
+namespace HeadToWatts.EnergyYield;
+
+/// <summary>How the plant runs on one flow.</summary>
+/// <param name="UsableFlowM3PerS">Flow that it may use, m3/s.</param>
+/// <param name="TurbineFlowM3PerS">Flow through the turbines, m3/s; zero when it stands.</param>
+/// <param name="UnitsRunning">Units running.</param>
+/// <param name="NetHeadM">Net head, m; the gross head when it stands.</param>
+/// <param name="TurbineEfficiency">Turbine efficiency, 0 to 1.</param>
+/// <param name="ShaftPowerKw">Power at the shaft, kW.</param>
+/// <param name="MeterPowerKw">Power at the meter while it is fit to run, kW.</param>
+public readonly record struct PlantPoint(
+    double UsableFlowM3PerS,
+    double TurbineFlowM3PerS,
+    int UnitsRunning,
+    double NetHeadM,
+    double TurbineEfficiency,
+    double ShaftPowerKw,
+    double MeterPowerKw)
+{
+    /// <summary>True when water goes through a turbine.</summary>
+    public bool IsRunning => TurbineFlowM3PerS > 0;
+}

@@ -1,0 +1,54 @@
+using HeadToWatts.Basis.Units;
+
+namespace HeadToWatts.Studies.Cautions;
+
+/// <summary>Every caution rule, in the order in which a reader meets the stages.</summary>
+public static class CautionRules
+{
+    /// <summary>The rules.</summary>
+    public static IReadOnlyList<CautionRule> All { get; } =
+    [
+        new NoReservedFlow(),
+        new RecordUnderTenYears(),
+        new MissingDays(),
+        new NoRecord(),
+        new CurveEndsEarly(),
+        new DryMonths(),
+        new DesignFlowSeldom(),
+        new NetHeadGone(),
+        new LowHead(),
+        new TailwaterConstant(),
+        new PressureBelowAir(),
+        new PressureNearRating(),
+        new VelocityHigh(),
+        new VelocityOverLimit(),
+        new VelocityLow(),
+        new LossOverTenPercent(),
+        new PipeLimitsFlow(),
+        new TransitionFlowRule(),
+        new NoPressureRating(),
+        new MethodOutOfRange(),
+        new OutsideEnvelope(),
+        new MuchBelowLeast(),
+        new BetterType(),
+        new TypicalEfficiency(),
+        new MakersEfficiency(),
+        new NoEnergy(),
+        new LowPlantFactor(),
+        new SmallPlant(),
+        new HighEfficiency(),
+        new AlwaysAvailable(),
+        new MeanFlowTrap(),
+    ];
+
+    /// <summary>The cautions that bite, those to settle first before the others.</summary>
+    /// <param name="result">The study.</param>
+    /// <param name="show">Units in which numbers are shown.</param>
+    public static IReadOnlyList<Caution> For(StudyResult result, UnitDisplay show) =>
+    [
+        .. All.Select(rule => (rule, text: rule.Say(result, show)))
+            .Where(x => x.text is not null)
+            .Select(x => new Caution(x.rule.Id, x.rule.Stage, x.rule.Severity, x.rule.Title, x.text!, x.rule.Authority))
+            .OrderBy(c => c.Severity),
+    ];
+}

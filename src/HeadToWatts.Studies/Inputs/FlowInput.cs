@@ -1,0 +1,36 @@
+using HeadToWatts.FlowRecords;
+
+namespace HeadToWatts.Studies.Inputs;
+
+/// <summary>The flow and what may be used of it: either a typed curve or a daily record.</summary>
+/// <param name="TypedCurve">Rows of percent exceeded and flow; null when there is a record.</param>
+/// <param name="RowsAreForSeason">True when the typed rows count only the days of the season.</param>
+/// <param name="Record">Daily record; null when rows were typed.</param>
+/// <param name="PlottingPosition">How exceedance is reckoned from a record.</param>
+/// <param name="Season">Days on which the plant may run.</param>
+/// <param name="Allocation">Prior deliveries and reserved flow.</param>
+/// <param name="ReservedFlowIsStated">True when the author stated a reserved flow, even zero.</param>
+/// <param name="DesignFlowM3PerS">Design flow of all units together, m3/s; null to have one suggested.</param>
+/// <param name="SourceDescription">Where the figures come from, in the author's words.</param>
+public sealed record FlowInput(
+    FlowDurationCurve? TypedCurve,
+    bool RowsAreForSeason,
+    DailyRecord? Record,
+    PlottingPosition PlottingPosition,
+    OperatingSeason Season,
+    WaterAllocation Allocation,
+    bool ReservedFlowIsStated,
+    double? DesignFlowM3PerS,
+    string SourceDescription)
+{
+    /// <summary>The curve of the year on which the plant is run: dry outside the season.</summary>
+    /// <exception cref="InvalidOperationException">There is neither a curve nor a record.</exception>
+    public FlowDurationCurve CurveOfYear()
+    {
+        if (Record is not null)
+            return FlowDurationCurve.FromRecord(Record, PlottingPosition, Season);
+        if (TypedCurve is null)
+            throw new InvalidOperationException("A study needs a typed curve or a daily record.");
+        return RowsAreForSeason && Season.ShareOfYear < 1 ? TypedCurve.ForSeasonShare(Season.ShareOfYear) : TypedCurve;
+    }
+}

@@ -1,0 +1,16 @@
+namespace HeadToWatts.Studies.Results;
+
+/// <summary>Net head at a share of the design flow.</summary>
+/// <param name="ShareOfDesignFlow">Share of the design flow, 0 to 1.</param>
+/// <param name="FlowM3PerS">Flow, m3/s.</param>
+/// <param name="LossM">Head lost, m.</param>
+/// <param name="NetHeadM">Net head, m.</param>
+public sealed record NetHeadPoint(double ShareOfDesignFlow, double FlowM3PerS, double LossM, double NetHeadM);
+
+/// <summary>What the study found of the head.</summary>
+/// <param name="GrossHeadM">Gross head, m.</param>
+/// <param name="HeadwaterM">Headwater level, m.</param>
+/// <param name="TailwaterM">Tailwater level, m.</param>
+/// <param name="NetHeadAtDesignM">Net head at the design flow, m.</param>
+/// <param name="AtShares">Net head at 25, 50, 75 and 100 percent of the design flow.</param>
+public sealed record HeadResult(double GrossHeadM, double HeadwaterM, double TailwaterM, double NetHeadAtDesignM, IReadOnlyList<NetHeadPoint> AtShares);

@@ -1,0 +1,22 @@
+using HeadToWatts.EnergyYield;
+using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Units;
+
+namespace HeadToWatts.Studies.Results;
+
+/// <summary>What the study found of the turbine.</summary>
+/// <param name="Ranking">Every type, best first.</param>
+/// <param name="Chosen">The one the study runs on.</param>
+/// <param name="TypeIsSuggested">True when this project suggested the type.</param>
+/// <param name="UnitCountIsSuggested">True when this project suggested the number of units.</param>
+/// <param name="Efficiency">Efficiency over load used.</param>
+/// <param name="EfficiencyIsMakers">True when a manufacturer's table is used.</param>
+/// <param name="Units">The units.</param>
+public sealed record TurbineResult(
+    IReadOnlyList<TurbineCandidate> Ranking,
+    TurbineCandidate Chosen,
+    bool TypeIsSuggested,
+    bool UnitCountIsSuggested,
+    EfficiencyCurve Efficiency,
+    bool EfficiencyIsMakers,
+    UnitSet Units);

@@ -1,0 +1,114 @@
+using HeadToWatts.Basis.Sources;
+using HeadToWatts.EnergyYield;
+using HeadToWatts.Hydraulics.Surge;
+using HeadToWatts.Hydraulics.Water;
+using HeadToWatts.Hydraulics.Waterways;
+using HeadToWatts.Studies.Inputs;
+using HeadToWatts.Studies.Results;
+using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Units;
+
+namespace HeadToWatts.Studies;
+
+/// <summary>Runs a study: from the flow to the energy, one stage after another.</summary>
+public static class Study
+{
+    private static readonly double[] Shares = [0.25, 0.5, 0.75, 1.0];
+
+    /// <summary>Runs every alternative.</summary>
+    /// <param name="input">The study.</param>
+    public static IReadOnlyList<StudyResult> RunAll(StudyInput input)
+    {
+        ArgumentNullException.ThrowIfNull(input);
+        return [.. input.Alternatives.Select(a => Run(input.Header, a))];
+    }
+
+    /// <summary>Runs one alternative.</summary>
+    /// <param name="header">Heading of the study.</param>
+    /// <param name="input">The alternative.</param>
+    public static StudyResult Run(StudyHeader header, AlternativeInput input)
+    {
+        ArgumentNullException.ThrowIfNull(header);
+        ArgumentNullException.ThrowIfNull(input);
+        var site = SiteConditions.At(input.Site.LatitudeRad, input.Site.ElevationM, input.Site.WaterTemperatureDegC);
+        var curve = input.Flow.CurveOfYear();
+        var supply = new FlowSupply(curve, input.Flow.Allocation);
+        var waterway = input.Waterway.Build();
+        var choice = PlantChoice.Make(input, site, waterway, supply);
+        var designFlow = choice.DesignFlowM3PerS;
+
+        var plant = new PlantCurve(new PlantDesign(site, input.Head.Gross, waterway, choice.Units, input.Train));
+        var annual = AnnualEnergy.Of(plant, supply);
+        var days = input.Flow.Record is { } record ? DailyRun.Over(plant, record, input.Flow.Season, input.Flow.Allocation) : null;
+        var losses = waterway.At(designFlow, site);
+        var highest = losses.Elements.Count == 0 ? 0 : losses.Elements.Max(e => e.VelocityMPerS);
+        var surge = losses.Elements.Count == 0 ? null : SurgeScreening.Of(waterway, designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site);
+        var middleFlow = curve.MeanFlowM3PerS;
+        var atMean = plant.At(input.Flow.Allocation.Split(middleFlow).UsableM3PerS).MeterPowerKw * Basis.PhysicalConstants.HoursPerYear * input.Train.Availability;
+
+        return new StudyResult(
+            header,
+            input,
+            site,
+            new FlowResult(
+                curve,
+                supply,
+                middleFlow,
+                annual.Integral.UsableM3PerS,
+                supply.ShareAtLeast(1e-9),
+                designFlow,
+                input.Flow.DesignFlowM3PerS is null,
+                supply.ShareAtLeast(designFlow),
+                choice.Scan),
+            new HeadResult(
+                input.Head.Gross.Metres,
+                input.Head.HeadwaterM,
+                input.Head.TailwaterM,
+                plant.Design.NetHeadM(designFlow),
+                [.. Shares.Select(s => NetHead(plant, s * designFlow, s))]),
+            new WaterwayResult(
+                waterway,
+                losses,
+                losses.TotalLossM / input.Head.Gross.Metres,
+                highest,
+                VelocityLimits.UsbrLimitMPerS(input.Head.Gross.Metres, site.GravityMPerS2),
+                waterway.GradeLines(designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site),
+                surge),
+            new TurbineResult(
+                choice.Ranking,
+                choice.Chosen,
+                input.Turbine.Type is null,
+                input.Turbine.UnitCount is null,
+                choice.Units.Efficiency,
+                input.Turbine.MakersCurve is not null,
+                choice.Units),
+            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean),
+            StudyMethods.Uses(input, site, losses, surge, choice));
+    }
+
+    private static NetHeadPoint NetHead(PlantCurve plant, double flowM3PerS, double share)
+    {
+        var net = plant.Design.NetHeadM(flowM3PerS);
+        return new NetHeadPoint(share, flowM3PerS, plant.Design.GrossHead.Metres - net, net);
+    }
+
+    // Evenly spaced, with both sides of every breakpoint so that steps are drawn as steps.
+    private static IReadOnlyList<PlantPoint> DrawingPoints(PlantCurve plant, FlowSupply supply)
+    {
+        var largest = Math.Max(plant.Design.Units.DesignFlowM3PerS * 1.15, 1e-9);
+        var top = Math.Min(Math.Max(largest, supply.UsableM3PerS[0]), largest * 1.5);
+        var flows = new SortedSet<double>();
+        for (var i = 0; i <= 80; i++)
+            flows.Add(top * i / 80);
+        foreach (var edge in plant.BreakpointsM3PerS)
+        {
+            if (edge <= 0 || edge > top)
+                continue;
+            flows.Add(edge * (1 - 1e-9));
+            flows.Add(edge);
+            flows.Add(edge * (1 + 1e-9));
+        }
+
+        return [.. flows.Select(plant.At)];
+    }
+}
