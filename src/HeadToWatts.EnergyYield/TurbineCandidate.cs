@@ -5,6 +5,8 @@ namespace HeadToWatts.EnergyYield;
 /// <summary>A turbine type weighed on this site's flows and head.</summary>
 /// <param name="Type">The type.</param>
 /// <param name="UnitCount">Number of equal units that suits it best here.</param>
+/// <param name="UnitFlowM3PerS">Design flow of one unit, m3/s.</param>
+/// <param name="NetHeadM">Net head at the design flow, m.</param>
 /// <param name="Fit">How one unit lies in the head-flow envelope at its design flow.</param>
 /// <param name="EnergyKwhByUnits">Annual energy with 1, 2, 3 and 4 units, kWh.</param>
 /// <param name="AnnualEnergyKwh">Annual energy with the chosen number, kWh.</param>
@@ -17,6 +19,8 @@ namespace HeadToWatts.EnergyYield;
 public sealed record TurbineCandidate(
     TurbineType Type,
     int UnitCount,
+    double UnitFlowM3PerS,
+    double NetHeadM,
     EnvelopeFit Fit,
     IReadOnlyList<double> EnergyKwhByUnits,
     double AnnualEnergyKwh,

@@ -123,11 +123,13 @@ public static class TurbineRanking
         var least = LeastFlow(plant);
         var wet = supply.ShareAtLeast(1e-9);
         var speed = netHeadM > 0 && top.ShaftPowerKw > 0
-            ? SynchronousSpeed.Choose(type, unitFlow, netHeadM, top.ShaftPowerKw / Math.Max(top.UnitsRunning, 1), frequencyHz)
+            ? SpeedChoice.Choose(type, unitFlow, netHeadM, top.ShaftPowerKw / Math.Max(top.UnitsRunning, 1), frequencyHz)
             : null;
         return new TurbineCandidate(
             type,
             count,
+            unitFlow,
+            netHeadM,
             type.Envelope.Fit(unitFlow, Math.Max(netHeadM, 1e-3)),
             byUnits,
             count <= 4 ? byUnits[count - 1] : QuickEnergyKwh(plant, middles),

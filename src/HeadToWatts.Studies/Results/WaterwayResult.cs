@@ -18,4 +18,4 @@ public sealed record WaterwayResult(
     double HighestVelocityMPerS,
     double VelocityLimitMPerS,
     IReadOnlyList<EnergySection> GradeLines,
-    SurgeScreening? Surge);
+    SurgeResult? Surge);

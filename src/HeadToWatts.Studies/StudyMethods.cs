@@ -1,0 +1,45 @@
+using HeadToWatts.Basis.Sources;
+using HeadToWatts.EnergyYield;
+using HeadToWatts.FlowRecords;
+using HeadToWatts.Hydraulics;
+using HeadToWatts.Hydraulics.Surge;
+using HeadToWatts.Hydraulics.Water;
+using HeadToWatts.Hydraulics.Waterways;
+using HeadToWatts.Studies.Inputs;
+using HeadToWatts.Turbines;
+
+namespace HeadToWatts.Studies;
+
+/// <summary>The methods of a study in order of first use, and the catalogue of all methods of the project.</summary>
+public static class StudyMethods
+{
+    /// <summary>Every method of every stage, for the methods page and the house rules.</summary>
+    public static IReadOnlyList<Method> Catalogue { get; } =
+    [
+        .. FlowRecordMethods.All,
+        .. HydraulicsMethods.All,
+        .. TurbineMethods.All,
+        .. EnergyMethods.All,
+    ];
+
+    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, WaterwayLosses losses, SurgeResult? surge, PlantChoice choice)
+    {
+        var uses = new List<MethodUse>(site.Uses);
+        if (input.Flow.Record is { } record)
+        {
+            uses.Add(input.Flow.PlottingPosition.Method.Used(new InputSpan("n", record.ValidCount, record.ValidCount)));
+            uses.Add(FlowRecordMethods.DurationCurve.Used());
+        }
+
+        uses.AddRange(losses.Uses);
+        if (losses.Elements.Count > 0)
+            uses.Add(VelocityLimits.Method.Used(new InputSpan("H", input.Head.Gross.Metres, input.Head.Gross.Metres)));
+        uses.Add(EnergyMethods.WaterPower.Used());
+        uses.Add(EnergyMethods.AnnualEnergy.Used());
+        if (choice.Chosen.Speed is { } speed)
+            uses.AddRange(speed.Uses);
+        if (surge is not null)
+            uses.AddRange(surge.Uses);
+        return MethodUse.Union(uses);
+    }
+}

@@ -1,0 +1,58 @@
+using System.Globalization;
+using HeadToWatts.Basis.Units;
+using HeadToWatts.EnergyYield;
+using HeadToWatts.FlowRecords;
+
+namespace HeadToWatts.Studies.Workings;
+
+internal static class FlowWorkings
+{
+    internal static IEnumerable<Working> Of(StudyResult result, UnitDisplay show)
+    {
+        var flow = result.Flow;
+        var input = result.Input.Flow;
+        if (input.Record is { } record)
+        {
+            yield return new Working(
+                "duration-curve", StudyStage.Flow, "Flow-duration curve", input.PlottingPosition.Method.Formula,
+                $"n = {record.ValidCount.ToString(CultureInfo.InvariantCulture)} days with a flow, {record.FirstDay:yyyy-MM-dd} to {record.LastDay:yyyy-MM-dd}; {record.MissingCount} days without a flow left out; season {input.Season.Describe()}",
+                $"mean {show.Flow(flow.MeanFlowM3PerS)}",
+                "Days outside the season count as no flow. The largest flow holds up to 0 % and the smallest to 100 % exceeded: nothing is extrapolated.",
+                [input.PlottingPosition.Method, FlowRecordMethods.DurationCurve]);
+        }
+        else if (input.TypedCurve is { } typed)
+        {
+            var end = typed.EndRule == BeyondLastRow.Hold ? "the last flow holds to 100 %" : "beyond the last row it is dry";
+            yield return new Working(
+                "duration-curve", StudyStage.Flow, "Flow-duration curve", "Q_{mean} = ∫ Q(p) dp",
+                $"{typed.Rows.Count} rows, straight between them; above the first row the first flow holds, and {end}"
+                    + (input.RowsAreForSeason && input.Season.ShareOfYear < 1 ? $"; rows count the season ({input.Season.Describe()}, {UnitDisplay.Percent(input.Season.ShareOfYear)} of the year), dry for the rest" : ""),
+                $"mean {show.Flow(flow.MeanFlowM3PerS)}", "", [FlowRecordMethods.DurationCurve]);
+        }
+
+        var split = input.Allocation.Split(flow.MeanFlowM3PerS);
+        var reserved = input.Allocation.Reserved;
+        yield return new Working(
+            "usable-flow", StudyStage.Flow, "Flow the plant may use", "Q_{use} = Q − Q_{prior} − Q_{res}",
+            $"at the mean flow: {show.Flow(flow.MeanFlowM3PerS)} − {show.Flow(split.PriorM3PerS)} − {show.Flow(split.ReservedM3PerS)}",
+            show.Flow(split.UsableM3PerS),
+            reserved.Kind == ReservedFlowKind.PercentOfFlow
+                ? $"Reserved: {UnitDisplay.Percent(reserved.Ratio)} of the flow arriving. Taken off before the turbine's limit."
+                : "Taken off before the turbine's limit, never after.",
+            []);
+
+        if (flow.DesignFlowIsSuggested)
+        {
+            yield return new Working(
+                "design-flow", StudyStage.Flow, "Design flow, suggested", "ΔE/ΔP ≥ 0.30 × 8760 h",
+                DesignFlowWords.Reason(result, show), show.Flow(flow.DesignFlowM3PerS),
+                $"Reached {UnitDisplay.Percent(flow.DesignFlowExceedance)} of the year. Cost is not weighed; decision 0006.", []);
+        }
+        else
+        {
+            yield return new Working(
+                "design-flow", StudyStage.Flow, "Design flow, as given", "Q_d", "given by the author",
+                show.Flow(flow.DesignFlowM3PerS), $"Reached {UnitDisplay.Percent(flow.DesignFlowExceedance)} of the year. This project would suggest {show.Flow(flow.Scan.SuggestedM3PerS)}.", []);
+        }
+    }
+}
