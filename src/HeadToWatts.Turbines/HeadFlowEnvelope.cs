@@ -133,7 +133,7 @@ public sealed class HeadFlowEnvelope
         for (int i = 0, j = abscissas.Length - 1; i < abscissas.Length; j = i++)
         {
             var (a, b) = (abscissas[j], abscissas[i]);
-            if (at < Math.Min(a, b) || at > Math.Max(a, b))
+            if (at < Math.Min(a, b) - OnTheSideDecades || at > Math.Max(a, b) + OnTheSideDecades)
                 continue;
             if (a == b)
             {
@@ -142,7 +142,7 @@ public sealed class HeadFlowEnvelope
             }
             else
             {
-                Take(ordinates[j] + ((at - a) / (b - a) * (ordinates[i] - ordinates[j])));
+                Take(ordinates[j] + (Math.Clamp((at - a) / (b - a), 0, 1) * (ordinates[i] - ordinates[j])));
             }
         }
 

@@ -58,7 +58,7 @@ public sealed record SpeedChoice(
                 return direct;
         }
 
-        // A geared wheel needs no more than one jet on account of its speed; where it is too slow for the generator, more jets only speed it up.
+        // Where even the slowest usual generator is too fast, every jet that can be had brings the wheel nearer to it.
         var wantedJets = Speed(band.HighestKwM, 1) < SynchronousSpeed.Rpm(SynchronousSpeed.MostUsualPoles, frequencyHz) ? band.MostJets : 1;
         return Geared(type, netHeadM, unitPowerKw, wantedJets, Speed(band.MiddleKwM, wantedJets), Speed(band.LowestKwM, wantedJets), Speed(band.HighestKwM, wantedJets), null, null);
 

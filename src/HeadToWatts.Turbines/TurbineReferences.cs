@@ -32,6 +32,15 @@ public static class TurbineReferences
     /// <summary>Britannica's article on turbines: selection on specific speed.</summary>
     public static Source Britannica { get; } = new("britannica-turbine", SourceKind.Published, "Encyclopaedia Britannica", "", "Turbine: selection on the basis of specific speed", "");
 
+    /// <summary>
+    /// A table of metric specific speeds. It prints them as "speed, rpm"; they are specific speeds in metric horsepower and metres, and
+    /// are used here as that.
+    /// </summary>
+    public static Source SpecificSpeedRanges { get; } = new("specific-speed-ranges", SourceKind.Published, "", "", "Turbine table with metric specific speeds", "electricalengineering.xyz; printed as rpm, read as rpm, metric hp, m");
+
+    /// <summary>Hong Kong government, turbine types: heads of Francis and propeller turbines.</summary>
+    public static Source HongKongTurbines { get; } = new("hong-kong-turbine-types", SourceKind.Published, "Electrical and Mechanical Services Department, Hong Kong", "", "Hydroelectric: turbine types", "re.emsd.gov.hk");
+
     /// <summary>Typical envelopes of small turbines.</summary>
     public static Source TypicalEnvelopes { get; } = Source.Memory("typical-envelopes", "Usual heads and flows of small turbines, as drawn on makers' selection charts");
 

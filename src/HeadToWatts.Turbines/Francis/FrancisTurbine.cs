@@ -1,8 +1,12 @@
+using HeadToWatts.Basis.Sources;
+
 namespace HeadToWatts.Turbines.Francis;
 
 /// <summary>Francis: inward flow through guide vanes and a fixed runner under pressure; medium head.</summary>
 public static class FrancisTurbine
 {
+    private static readonly Source RoughZone = new("hydroco-rated-flow", SourceKind.Published, "hydroco.ca", "", "Glossary: rated flow", "hydroco.ca/glossary");
+
     /// <summary>The type.</summary>
     public static TurbineType Type { get; } = new(
         "francis",
@@ -12,7 +16,7 @@ public static class FrancisTurbine
         EfficiencyCurve.FromTable(
             [(0.2, 0.40), (0.3, 0.56), (0.4, 0.69), (0.5, 0.78), (0.6, 0.84), (0.7, 0.88), (0.8, 0.90), (0.9, 0.90), (1.0, 0.88)], "Francis").Value,
         0.40,
-        new SpecificSpeedBand(55, 400),
+        new SpecificSpeedBand(51, 343),
         new RunawayRatio(2.0, 2.2),
         true,
         "Medium head with steady flow: pressure pipelines, dams, falls served by a penstock. Can discharge against pressure.",
@@ -20,11 +24,12 @@ public static class FrancisTurbine
         "Efficiency falls and the draft tube runs roughly below about half of full flow; it is shut down at about 40 percent.",
         [
             new(TurbineFigure.Envelope, TurbineReferences.HeadRanges, "usual head 25 to 350 m"),
+            new(TurbineFigure.Envelope, TurbineReferences.HongKongTurbines, "down to 2 m; the envelope here stops at 13 m, below which small Francis turbines are seldom made any more"),
             new(TurbineFigure.Envelope, TurbineReferences.TypicalEnvelopes, "flows, and heads from 13 m for small units"),
             new(TurbineFigure.Efficiency, TurbineReferences.TypicalEfficiency, ""),
-            new(TurbineFigure.LeastFlow, TurbineReferences.TypicalLeastFlow, ""),
-            new(TurbineFigure.SpecificSpeed, TurbineReferences.Britannica, "10 to 90 in hp and ft, the band here inside it"),
-            new(TurbineFigure.SpecificSpeed, TurbineReferences.TypicalSpecificSpeed, "55 to 400 in kW and m"),
+            new(TurbineFigure.LeastFlow, RoughZone, "rough zone at about 40 percent of rated flow"),
+            new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "60 to 400 in metric hp"),
+            new(TurbineFigure.SpecificSpeed, TurbineReferences.Britannica, "10 to 90 in hp and ft"),
             new(TurbineFigure.Runaway, TurbineReferences.RunawaySpeeds, "2.0 to 2.2"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
         ]);

@@ -12,7 +12,7 @@ public static class KaplanTurbine
         EfficiencyCurve.FromTable(
             [(0.1, 0.52), (0.15, 0.63), (0.2, 0.70), (0.3, 0.80), (0.4, 0.85), (0.5, 0.88), (0.6, 0.89), (0.7, 0.90), (0.8, 0.90), (1.0, 0.88)], "Kaplan").Value,
         0.20,
-        new SpecificSpeedBand(270, 1000),
+        new SpecificSpeedBand(257, 943),
         new RunawayRatio(2.5, 3.0),
         true,
         "Canal drops and river weirs of low head with flow that changes through the season; double regulated.",
@@ -23,7 +23,7 @@ public static class KaplanTurbine
             new(TurbineFigure.Envelope, TurbineReferences.TypicalEnvelopes, "flows, and heads from 1.5 m"),
             new(TurbineFigure.Efficiency, TurbineReferences.TypicalEfficiency, ""),
             new(TurbineFigure.LeastFlow, TurbineReferences.TypicalLeastFlow, "15 to 20 percent; the higher is taken"),
-            new(TurbineFigure.SpecificSpeed, TurbineReferences.TypicalSpecificSpeed, "270 to 1000"),
+            new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "300 to 1100 in metric hp"),
             new(TurbineFigure.Runaway, TurbineReferences.RunawaySpeeds, "2.5 to 3.0"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
         ]);

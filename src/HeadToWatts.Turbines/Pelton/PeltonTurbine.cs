@@ -24,6 +24,7 @@ public static class PeltonTurbine
             new(TurbineFigure.Efficiency, TurbineReferences.TypicalEfficiency, "two jets or more"),
             new(TurbineFigure.LeastFlow, TurbineReferences.TypicalLeastFlow, ""),
             new(TurbineFigure.SpecificSpeed, TurbineReferences.TypicalSpecificSpeed, "4 to 26 per jet, up to six jets"),
+            new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "4 to 70 in metric hp for the wheel, whatever its jets"),
             new(TurbineFigure.Runaway, TurbineReferences.RunawaySpeeds, "1.8 to 1.9"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
         ]);

@@ -12,18 +12,18 @@ public static class PropellerTurbine
         EfficiencyCurve.FromTable(
             [(0.4, 0.35), (0.5, 0.48), (0.6, 0.60), (0.7, 0.71), (0.8, 0.80), (0.9, 0.86), (1.0, 0.88)], "propeller").Value,
         0.75,
-        new SpecificSpeedBand(270, 1000),
+        new SpecificSpeedBand(257, 943),
         new RunawayRatio(1.8, 2.6),
         true,
         "Low head with steady flow, or several units switched in one after another; simpler and cheaper than a Kaplan.",
         "No turndown: blades are fixed. The setting is limited by cavitation, and runaway is high.",
         "Efficiency falls steeply below three quarters of full flow, where it is shut down; more, smaller units help.",
         [
-            new(TurbineFigure.Envelope, TurbineReferences.HeadRanges, "that of the Kaplan, 2 to 40 m, cut at 30 m"),
+            new(TurbineFigure.Envelope, TurbineReferences.HongKongTurbines, "usual head 2 to 30 m"),
             new(TurbineFigure.Envelope, TurbineReferences.TypicalEnvelopes, "flows, and heads from 1.5 m"),
             new(TurbineFigure.Efficiency, TurbineReferences.TypicalEfficiency, "fixed blades and fixed or movable guide vanes"),
             new(TurbineFigure.LeastFlow, TurbineReferences.TypicalLeastFlow, ""),
-            new(TurbineFigure.SpecificSpeed, TurbineReferences.TypicalSpecificSpeed, "270 to 1000"),
+            new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "300 to 1100 in metric hp, that of the Kaplan"),
             new(TurbineFigure.Runaway, TurbineReferences.TypicalRunaway, "1.8 to 2.6"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
         ]);
