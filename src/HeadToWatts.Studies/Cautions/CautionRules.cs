@@ -9,6 +9,7 @@ public static class CautionRules
     public static IReadOnlyList<CautionRule> All { get; } =
     [
         new NoReservedFlow(),
+        new AssumedInputs(),
         new RecordUnderTenYears(),
         new MissingDays(),
         new NoRecord(),

@@ -15,6 +15,7 @@ public sealed record StudyInput(StudyHeader Header, IReadOnlyList<AlternativeInp
 /// <param name="Waterway">Waterway to the machine.</param>
 /// <param name="Turbine">Turbine.</param>
 /// <param name="Train">From the shaft to the meter.</param>
+/// <param name="Assumptions">What the author left out and was assumed, one sentence each.</param>
 public sealed record AlternativeInput(
     string Name,
     SiteInput Site,
@@ -22,4 +23,5 @@ public sealed record AlternativeInput(
     HeadInput Head,
     WaterwayInput Waterway,
     TurbineInput Turbine,
-    PowerTrain Train);
+    PowerTrain Train,
+    IReadOnlyList<string> Assumptions);

@@ -1,0 +1,128 @@
+using HeadToWatts.Basis.Problems;
+using HeadToWatts.Basis.Quantities;
+using HeadToWatts.Basis.Units;
+using HeadToWatts.EnergyYield;
+using HeadToWatts.Studies.Inputs;
+
+namespace HeadToWatts.Files.StudyFiles;
+
+/// <summary>Turns a study document into an input, or lists every problem by field, as in "alternatives[0].head.gross".</summary>
+public static class StudyBuilder
+{
+    /// <summary>Builds the input of every alternative.</summary>
+    /// <param name="document">The document.</param>
+    /// <param name="files">Where named flow files are found.</param>
+    public static Checked<StudyInput> Build(StudyDocument document, IFlowFileSource files)
+    {
+        ArgumentNullException.ThrowIfNull(document);
+        ArgumentNullException.ThrowIfNull(files);
+        var problems = new List<Problem>();
+        var header = Header(document, problems);
+        if (document.Alternatives.Count == 0)
+            problems.Add(new Problem("alternatives", "", "a study needs at least one alternative", "[ { ... } ]"));
+        var names = new HashSet<string>(StringComparer.Ordinal);
+        var alternatives = new List<AlternativeInput>();
+        for (var i = 0; i < document.Alternatives.Count; i++)
+        {
+            var path = $"alternatives[{i}]";
+            if (!names.Add(document.Alternatives[i].Name ?? ""))
+                problems.Add(new Problem(path + ".name", document.Alternatives[i].Name ?? "", "another alternative has this name already"));
+            alternatives.Add(Alternative(document.Alternatives[i], path, new FieldReader(problems), files));
+        }
+
+        return problems.Count == 0 ? Checked.Of(new StudyInput(header, alternatives)) : Checked.Refused<StudyInput>(problems);
+    }
+
+    private static StudyHeader Header(StudyDocument d, List<Problem> problems)
+    {
+        if (string.IsNullOrWhiteSpace(d.Name))
+            problems.Add(new Problem("name", "", "the study needs a name"));
+        var units = d.Units?.Trim().ToUpperInvariant() switch
+        {
+            "US" => UnitSystem.US,
+            "SI" => UnitSystem.SI,
+            _ => (UnitSystem?)null,
+        };
+        if (units is null)
+            problems.Add(new Problem("units", d.Units ?? "", "say in which units results are shown", "US or SI"));
+        return new StudyHeader(d.Name ?? "", d.Place ?? "", d.Client ?? "", d.Author ?? "", d.Date ?? "", d.Revision ?? "", d.Notes ?? "", units ?? UnitSystem.SI);
+    }
+
+    private static AlternativeInput Alternative(AlternativeDocument d, string path, FieldReader read, IFlowFileSource files)
+    {
+        var before = read.Problems.Count;
+        var site = new SiteInput(
+            read.Assumed(d.Site.Latitude, Dimension.Angle, path + ".site.latitude", -Math.PI / 2, Math.PI / 2, "45 deg", "The latitude"),
+            read.Assumed(d.Site.Elevation, Dimension.Length, path + ".site.elevation", -430, 6000, "0 m", "The elevation"),
+            read.Assumed(d.Site.WaterTemperature, Dimension.Temperature, path + ".site.waterTemperature", 0, 40, "10 degC", "The water temperature"),
+            read.Assumed(d.Site.GridFrequency, Dimension.Frequency, path + ".site.gridFrequency", 45, 65, "60 Hz", "The grid frequency"));
+        var flow = FlowBuilder.Build(d.Flow, path + ".flow", read, files);
+        var head = Head(d.Head, path + ".head", read);
+        var waterway = WaterwayBuilder.Build(d.Waterway, path + ".waterway", read);
+        var turbine = TurbineBuilder.Build(d.Turbine, path + ".turbine", read);
+        var train = Train(d.Losses, path + ".losses", read);
+
+        // With a problem anywhere the value is thrown away by the caller; the placeholders only keep the types whole.
+        return new AlternativeInput(
+            string.IsNullOrWhiteSpace(d.Name) ? "as described" : d.Name,
+            site,
+            flow!,
+            head ?? new HeadInput(GrossHead.FromMetres(1), 1, 0, false),
+            waterway,
+            turbine,
+            train,
+            read.Problems.Count == before ? [.. read.Assumptions] : []);
+    }
+
+    private static HeadInput? Head(HeadDocument d, string path, FieldReader read)
+    {
+        var hasLevels = !string.IsNullOrWhiteSpace(d.Headwater) || !string.IsNullOrWhiteSpace(d.Tailwater);
+        if (!string.IsNullOrWhiteSpace(d.Gross) && hasLevels)
+        {
+            read.Refuse(path, d.Gross, "gross head and levels are both given; they could disagree", "either gross, or headwater and tailwater");
+            return null;
+        }
+
+        if (!hasLevels)
+        {
+            var count = read.Problems.Count;
+            var gross = read.Quantity(d.Gross, Dimension.Length, path + ".gross", 0.05, 2500);
+            return read.Problems.Count > count ? null : new HeadInput(GrossHead.FromMetres(gross), gross, 0, false);
+        }
+
+        var before = read.Problems.Count;
+        var headwater = read.Quantity(d.Headwater, Dimension.Length, path + ".headwater", -430, 9000);
+        var tailwater = read.Quantity(d.Tailwater, Dimension.Length, path + ".tailwater", -430, 9000);
+        if (read.Problems.Count > before)
+            return null;
+        var fall = headwater - tailwater;
+        if (fall is < 0.05 or > 2500)
+        {
+            read.Refuse(path + ".tailwater", d.Tailwater, $"headwater less tailwater is {UnitDisplay.Number(fall)} m", "a fall of 0.05 m to 2500 m");
+            return null;
+        }
+
+        return new HeadInput(GrossHead.FromMetres(fall), headwater, tailwater, true);
+    }
+
+    private static PowerTrain Train(LossesDocument d, string path, FieldReader read)
+    {
+        double ownRatio = 0, ownKw = 0;
+        if (!string.IsNullOrWhiteSpace(d.OwnUse))
+        {
+            if (d.OwnUse.Contains('%', StringComparison.Ordinal))
+                ownRatio = read.Optional(d.OwnUse, Dimension.Ratio, path + ".ownUse", 0, 0.5) ?? 0;
+            else
+                ownKw = (read.Optional(d.OwnUse, Dimension.Power, path + ".ownUse", 0, 1e7) ?? 0) / 1000;
+        }
+
+        return new PowerTrain(
+            read.Assumed(d.Drive, Dimension.Ratio, path + ".drive", 0.3, 1, "100 %", "The efficiency of gear or belt"),
+            read.Assumed(d.Generator, Dimension.Ratio, path + ".generator", 0.3, 1, "93 %", "The generator efficiency"),
+            read.Assumed(d.Transformer, Dimension.Ratio, path + ".transformer", 0.3, 1, "99 %", "The transformer efficiency"),
+            read.Assumed(d.Line, Dimension.Ratio, path + ".line", 0.3, 1, "99 %", "The line efficiency"),
+            ownRatio,
+            ownKw,
+            read.Assumed(d.Availability, Dimension.Ratio, path + ".availability", 0.1, 1, "95 %", "The availability"));
+    }
+}

@@ -1,0 +1,272 @@
+namespace HeadToWatts.Files.StudyFiles;
+
+/// <summary>
+/// A study as it is written and edited: every quantity is the author's own text with its unit. Screens edit it, files hold it;
+/// <see cref="StudyBuilder"/> turns it into an input or lists what is wrong.
+/// </summary>
+public sealed class StudyDocument
+{
+    /// <summary>The number of the format written today.</summary>
+    public const int CurrentFormat = 1;
+
+    /// <summary>Format of the file.</summary>
+    public int Format { get; set; } = CurrentFormat;
+
+    /// <summary>Name of the study.</summary>
+    public string? Name { get; set; }
+
+    /// <summary>Where the site is.</summary>
+    public string? Place { get; set; }
+
+    /// <summary>For whom.</summary>
+    public string? Client { get; set; }
+
+    /// <summary>By whom.</summary>
+    public string? Author { get; set; }
+
+    /// <summary>Date of the memo.</summary>
+    public string? Date { get; set; }
+
+    /// <summary>Revision mark.</summary>
+    public string? Revision { get; set; }
+
+    /// <summary>Remarks to be printed.</summary>
+    public string? Notes { get; set; }
+
+    /// <summary>"US" or "SI": how results are shown.</summary>
+    public string? Units { get; set; }
+
+    /// <summary>One or more alternatives.</summary>
+    public List<AlternativeDocument> Alternatives { get; set; } = [];
+}
+
+/// <summary>One complete way of using the site.</summary>
+public sealed class AlternativeDocument
+{
+    /// <summary>Name.</summary>
+    public string? Name { get; set; }
+
+    /// <summary>Place and water.</summary>
+    public SiteDocument Site { get; set; } = new();
+
+    /// <summary>Flow.</summary>
+    public FlowDocument Flow { get; set; } = new();
+
+    /// <summary>Head.</summary>
+    public HeadDocument Head { get; set; } = new();
+
+    /// <summary>Waterway.</summary>
+    public WaterwayDocument Waterway { get; set; } = new();
+
+    /// <summary>Turbine.</summary>
+    public TurbineDocument Turbine { get; set; } = new();
+
+    /// <summary>From the shaft to the meter.</summary>
+    public LossesDocument Losses { get; set; } = new();
+}
+
+/// <summary>Place and water.</summary>
+public sealed class SiteDocument
+{
+    /// <summary>Latitude, an angle.</summary>
+    public string? Latitude { get; set; }
+
+    /// <summary>Elevation above the sea, a length.</summary>
+    public string? Elevation { get; set; }
+
+    /// <summary>Water temperature.</summary>
+    public string? WaterTemperature { get; set; }
+
+    /// <summary>Grid frequency: 50 Hz or 60 Hz.</summary>
+    public string? GridFrequency { get; set; }
+}
+
+/// <summary>The flow and what may be used of it.</summary>
+public sealed class FlowDocument
+{
+    /// <summary>Where the figures come from.</summary>
+    public string? Source { get; set; }
+
+    /// <summary>Rows of percent of time exceeded and flow; none when there is a record.</summary>
+    public List<CurveRowDocument>? Curve { get; set; }
+
+    /// <summary>"year" or "season": what the percentages of the rows count.</summary>
+    public string? RowsAreFor { get; set; }
+
+    /// <summary>"hold" or "dry": the flow beyond the last row.</summary>
+    public string? BeyondLastRow { get; set; }
+
+    /// <summary>A daily record; none when rows are given.</summary>
+    public RecordDocument? Record { get; set; }
+
+    /// <summary>Name of the plotting position.</summary>
+    public string? PlottingPosition { get; set; }
+
+    /// <summary>Days of operation, as in "Apr 15 to Oct 15" or "all year".</summary>
+    public string? Season { get; set; }
+
+    /// <summary>Reserved flow: a flow, a percent of the flow, or "none".</summary>
+    public string? ReservedFlow { get; set; }
+
+    /// <summary>Prior deliveries: a flow.</summary>
+    public string? PriorDeliveries { get; set; }
+
+    /// <summary>Design flow of all units together, or "suggest".</summary>
+    public string? DesignFlow { get; set; }
+}
+
+/// <summary>A row of a duration curve.</summary>
+public sealed class CurveRowDocument
+{
+    /// <summary>Percent of time exceeded.</summary>
+    public string? Exceeded { get; set; }
+
+    /// <summary>Flow.</summary>
+    public string? Flow { get; set; }
+}
+
+/// <summary>A daily record: a file beside the study, or the days themselves.</summary>
+public sealed class RecordDocument
+{
+    /// <summary>Name of a flow file beside the study file.</summary>
+    public string? File { get; set; }
+
+    /// <summary>Unit of the flows, where the file does not say it; the unit of the days when they stand here.</summary>
+    public string? Unit { get; set; }
+
+    /// <summary>"day-month" or "month-day", where the file does not decide it.</summary>
+    public string? DateOrder { get; set; }
+
+    /// <summary>Name of the column with the flows, where there are several.</summary>
+    public string? Column { get; set; }
+
+    /// <summary>First day, yyyy-mm-dd, when the days stand here.</summary>
+    public string? FirstDay { get; set; }
+
+    /// <summary>Flows of successive days, apart by spaces, "-" for a day without a flow.</summary>
+    public string? Days { get; set; }
+}
+
+/// <summary>The fall: gross head, or the two levels.</summary>
+public sealed class HeadDocument
+{
+    /// <summary>Gross head.</summary>
+    public string? Gross { get; set; }
+
+    /// <summary>Headwater level.</summary>
+    public string? Headwater { get; set; }
+
+    /// <summary>Tailwater level.</summary>
+    public string? Tailwater { get; set; }
+}
+
+/// <summary>The waterway.</summary>
+public sealed class WaterwayDocument
+{
+    /// <summary>Name of the friction formula.</summary>
+    public string? Friction { get; set; }
+
+    /// <summary>Kinetic energy coefficient alpha, 1 to 1.3.</summary>
+    public string? KineticEnergyCoefficient { get; set; }
+
+    /// <summary>Pipe elements in order from the headwater; none when the machine stands at the drop.</summary>
+    public List<ElementDocument> Elements { get; set; } = [];
+}
+
+/// <summary>A pipe element.</summary>
+public sealed class ElementDocument
+{
+    /// <summary>Name.</summary>
+    public string? Name { get; set; }
+
+    /// <summary>Length.</summary>
+    public string? Length { get; set; }
+
+    /// <summary>Inside diameter.</summary>
+    public string? InsideDiameter { get; set; }
+
+    /// <summary>Material.</summary>
+    public string? Material { get; set; }
+
+    /// <summary>Roughness, when it is not the material's usual one.</summary>
+    public string? Roughness { get; set; }
+
+    /// <summary>Hazen-Williams C, when it is not the material's usual one.</summary>
+    public string? HazenWilliamsC { get; set; }
+
+    /// <summary>Manning n, when it is not the material's usual one.</summary>
+    public string? ManningN { get; set; }
+
+    /// <summary>Fittings and other local losses.</summary>
+    public List<FittingDocument>? Fittings { get; set; }
+
+    /// <summary>Wall thickness.</summary>
+    public string? WallThickness { get; set; }
+
+    /// <summary>Pressure rating of the pipe.</summary>
+    public string? PressureRating { get; set; }
+
+    /// <summary>Elevation of the centre line at the lower end.</summary>
+    public string? EndElevation { get; set; }
+}
+
+/// <summary>A local loss.</summary>
+public sealed class FittingDocument
+{
+    /// <summary>Name of a known fitting, or one's own words together with K.</summary>
+    public string? Fitting { get; set; }
+
+    /// <summary>Loss coefficient K, when it is not the fitting's usual one.</summary>
+    public string? K { get; set; }
+
+    /// <summary>How many.</summary>
+    public string? Count { get; set; }
+}
+
+/// <summary>The turbine.</summary>
+public sealed class TurbineDocument
+{
+    /// <summary>Type, or "suggest".</summary>
+    public string? Type { get; set; }
+
+    /// <summary>Number of units, or "suggest".</summary>
+    public string? Units { get; set; }
+
+    /// <summary>A manufacturer's table of efficiency over flow.</summary>
+    public List<EfficiencyRowDocument>? EfficiencyTable { get; set; }
+
+    /// <summary>Least flow of a unit in percent of its design flow.</summary>
+    public string? LeastFlow { get; set; }
+}
+
+/// <summary>A row of a manufacturer's table.</summary>
+public sealed class EfficiencyRowDocument
+{
+    /// <summary>Flow of the unit in percent of its design flow.</summary>
+    public string? Flow { get; set; }
+
+    /// <summary>Turbine efficiency in percent.</summary>
+    public string? Efficiency { get; set; }
+}
+
+/// <summary>From the shaft to the meter.</summary>
+public sealed class LossesDocument
+{
+    /// <summary>Efficiency of gear or belt.</summary>
+    public string? Drive { get; set; }
+
+    /// <summary>Efficiency of the generator.</summary>
+    public string? Generator { get; set; }
+
+    /// <summary>Efficiency of the transformer.</summary>
+    public string? Transformer { get; set; }
+
+    /// <summary>Efficiency of the line.</summary>
+    public string? Line { get; set; }
+
+    /// <summary>Own use: a percent of the output or a power.</summary>
+    public string? OwnUse { get; set; }
+
+    /// <summary>Availability.</summary>
+    public string? Availability { get; set; }
+}

@@ -1,0 +1,108 @@
+namespace HeadToWatts.Files.StudyFiles;
+
+/// <summary>The fields of a study file by name; docs/study.schema.json says the same to editors.</summary>
+internal static class StudyDocumentFields
+{
+    internal static StudyDocument Read(JsonObjectReader r) => new()
+    {
+        Name = r.Text("name"),
+        Place = r.Text("place"),
+        Client = r.Text("client"),
+        Author = r.Text("author"),
+        Date = r.Text("date"),
+        Revision = r.Text("revision"),
+        Notes = r.Text("notes"),
+        Units = r.Text("units"),
+        Alternatives = r.Array("alternatives", Alternative) ?? [],
+    };
+
+    private static AlternativeDocument Alternative(JsonObjectReader r) => new()
+    {
+        Name = r.Text("name"),
+        Site = r.Object("site", Site) ?? new SiteDocument(),
+        Flow = r.Object("flow", Flow) ?? new FlowDocument(),
+        Head = r.Object("head", Head) ?? new HeadDocument(),
+        Waterway = r.Object("waterway", Waterway) ?? new WaterwayDocument(),
+        Turbine = r.Object("turbine", Turbine) ?? new TurbineDocument(),
+        Losses = r.Object("losses", Losses) ?? new LossesDocument(),
+    };
+
+    private static SiteDocument Site(JsonObjectReader r) => new()
+    {
+        Latitude = r.Text("latitude"),
+        Elevation = r.Text("elevation"),
+        WaterTemperature = r.Text("waterTemperature"),
+        GridFrequency = r.Text("gridFrequency"),
+    };
+
+    private static FlowDocument Flow(JsonObjectReader r) => new()
+    {
+        Source = r.Text("source"),
+        Curve = r.Array("curve", row => new CurveRowDocument { Exceeded = row.Text("exceeded"), Flow = row.Text("flow") }),
+        RowsAreFor = r.Text("rowsAreFor"),
+        BeyondLastRow = r.Text("beyondLastRow"),
+        Record = r.Object("record", Record),
+        PlottingPosition = r.Text("plottingPosition"),
+        Season = r.Text("season"),
+        ReservedFlow = r.Text("reservedFlow"),
+        PriorDeliveries = r.Text("priorDeliveries"),
+        DesignFlow = r.Text("designFlow"),
+    };
+
+    private static RecordDocument Record(JsonObjectReader r) => new()
+    {
+        File = r.Text("file"),
+        Unit = r.Text("unit"),
+        DateOrder = r.Text("dateOrder"),
+        Column = r.Text("column"),
+        FirstDay = r.Text("firstDay"),
+        Days = r.Text("days"),
+    };
+
+    private static HeadDocument Head(JsonObjectReader r) => new()
+    {
+        Gross = r.Text("gross"),
+        Headwater = r.Text("headwater"),
+        Tailwater = r.Text("tailwater"),
+    };
+
+    private static WaterwayDocument Waterway(JsonObjectReader r) => new()
+    {
+        Friction = r.Text("friction"),
+        KineticEnergyCoefficient = r.NumberText("kineticEnergyCoefficient"),
+        Elements = r.Array("elements", Element) ?? [],
+    };
+
+    private static ElementDocument Element(JsonObjectReader r) => new()
+    {
+        Name = r.Text("name"),
+        Length = r.Text("length"),
+        InsideDiameter = r.Text("insideDiameter"),
+        Material = r.Text("material"),
+        Roughness = r.Text("roughness"),
+        HazenWilliamsC = r.NumberText("hazenWilliamsC"),
+        ManningN = r.NumberText("manningN"),
+        Fittings = r.Array("fittings", f => new FittingDocument { Fitting = f.Text("fitting"), K = f.NumberText("k"), Count = f.NumberText("count") }),
+        WallThickness = r.Text("wallThickness"),
+        PressureRating = r.Text("pressureRating"),
+        EndElevation = r.Text("endElevation"),
+    };
+
+    private static TurbineDocument Turbine(JsonObjectReader r) => new()
+    {
+        Type = r.Text("type"),
+        Units = r.NumberText("units"),
+        EfficiencyTable = r.Array("efficiencyTable", row => new EfficiencyRowDocument { Flow = row.Text("flow"), Efficiency = row.Text("efficiency") }),
+        LeastFlow = r.Text("leastFlow"),
+    };
+
+    private static LossesDocument Losses(JsonObjectReader r) => new()
+    {
+        Drive = r.Text("drive"),
+        Generator = r.Text("generator"),
+        Transformer = r.Text("transformer"),
+        Line = r.Text("line"),
+        OwnUse = r.Text("ownUse"),
+        Availability = r.Text("availability"),
+    };
+}

@@ -1,0 +1,30 @@
+using HeadToWatts.Basis.Units;
+using HeadToWatts.Studies.Inputs;
+using HeadToWatts.Turbines;
+
+namespace HeadToWatts.Files.StudyFiles;
+
+/// <summary>Builds the turbine of an alternative.</summary>
+internal static class TurbineBuilder
+{
+    internal static TurbineInput Build(TurbineDocument d, string path, FieldReader read)
+    {
+        var type = FlowBuilder.IsSuggest(d.Type) ? null : read.Named(d.Type, path + ".type", TurbineTypes.Find, TurbineTypes.All.Select(t => t.Name).Prepend("suggest"));
+        int? units = FlowBuilder.IsSuggest(d.Units) ? null : read.Whole(d.Units, path + ".units", 1, 12);
+        var least = read.Optional(d.LeastFlow, Dimension.Ratio, path + ".leastFlow", 0, 1);
+        EfficiencyCurve? curve = null;
+        if (d.EfficiencyTable is { Count: > 0 } table)
+        {
+            if (type is null)
+                read.Refuse(path + ".type", d.Type, "a manufacturer's table belongs to one type; name it", string.Join(", ", TurbineTypes.All.Select(t => t.Name)));
+            var before = read.Problems.Count;
+            var rows = table.Select((r, i) => (
+                read.Quantity(r.Flow, Dimension.Ratio, $"{path}.efficiencyTable[{i}].flow", 0, 1.5),
+                read.Quantity(r.Efficiency, Dimension.Ratio, $"{path}.efficiencyTable[{i}].efficiency", 0, 1))).ToList();
+            if (read.Problems.Count == before && EfficiencyCurve.FromTable(rows, path + ".efficiencyTable").TryGet(read.Problems, out var made))
+                curve = made;
+        }
+
+        return new TurbineInput(type, units, curve, least);
+    }
+}
