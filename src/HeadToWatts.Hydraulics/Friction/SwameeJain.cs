@@ -2,7 +2,7 @@ using HeadToWatts.Basis.Sources;
 
 namespace HeadToWatts.Hydraulics.Friction;
 
-/// <summary>Swamee and Jain: f = 0.25 / (log10(e/(3.7 D) + 5.74/Re^0.9))^2, within 3 % of Colebrook-White in its range.</summary>
+/// <summary>Swamee and Jain: f = 0.25 / (log10(e/(3.7 D) + 5.74/Re^0.9))^2, within about 3 % of Colebrook-White in its range.</summary>
 public sealed class SwameeJain : DarcyFormula
 {
     /// <summary>Makes the formula.</summary>
