@@ -25,7 +25,7 @@ public static class TransitionFlow
     public static readonly Method Transition = new(
         "transition-interpolation", "Transition between laminar and turbulent flow",
         "log f linear in log Re from 64/2000 at Re = 2000 to the turbulent f at Re = 4000",
-        Source.Decision("0004", "Friction between Reynolds numbers 2,000 and 4,000"), "",
+        Source.Decision("0004", "Friction between laminar and turbulent flow"), "",
         [new InputRange("Re", "Reynolds number", "1", LaminarReynolds, TurbulentReynolds)]);
 
     /// <summary>The regime at a Reynolds number.</summary>
