@@ -8,8 +8,8 @@ using HeadToWatts.Turbines.Units;
 namespace HeadToWatts.EnergyYield;
 
 /// <summary>
-/// Weighs every turbine type on a site: those whose envelope holds the design point first, by annual energy; the others after
-/// them by how far outside they lie (decision 0005). Cost is not weighed here.
+/// Weighs every turbine type on a site: those whose envelope holds the design point first, by annual energy less three percent
+/// for every unit beyond the first; the others after them by how far outside they lie (decision 0005). Cost is not weighed here.
 /// </summary>
 public static class TurbineRanking
 {
@@ -60,7 +60,7 @@ public static class TurbineRanking
 
         return
         [
-            .. candidates.Where(c => c.Fit.IsInside).OrderByDescending(c => c.AnnualEnergyKwh),
+            .. candidates.Where(c => c.Fit.IsInside).OrderByDescending(c => c.AnnualEnergyKwh * Math.Pow(1 - GainOfOneMoreUnit, c.UnitCount - 1)),
             .. candidates.Where(c => !c.Fit.IsInside).OrderBy(c => c.Fit.DecadesOutside),
         ];
     }

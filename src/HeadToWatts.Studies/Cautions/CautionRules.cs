@@ -21,6 +21,7 @@ public static class CautionRules
         new TailwaterConstant(),
         new PressureBelowAir(),
         new PressureNearRating(),
+        new SurgeOverRating(),
         new VelocityHigh(),
         new VelocityOverLimit(),
         new VelocityLow(),
