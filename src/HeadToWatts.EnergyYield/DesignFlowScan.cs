@@ -45,6 +45,7 @@ public sealed record DesignFlowScan(IReadOnlyList<DesignFlowPoint> Points, doubl
             return new DesignFlowScan([], 0, DesignFlowReason.NoUsableFlow);
 
         var middles = supply.MiddlesM3PerS(TurbineRanking.ComparisonShares);
+        var losses = new LossTable(waterway, site, largest);
         var points = new List<DesignFlowPoint>(Steps);
         double lastKw = 0, lastKwh = 0;
         var suggested = 0.0;
@@ -52,7 +53,7 @@ public sealed record DesignFlowScan(IReadOnlyList<DesignFlowPoint> Points, doubl
         for (var i = 1; i <= Steps; i++)
         {
             var flow = largest * i / Steps;
-            var plant = new PlantCurve(new PlantDesign(site, grossHead, waterway, unitsOf(flow), train));
+            var plant = new PlantCurve(new PlantDesign(site, grossHead, waterway, unitsOf(flow), train) { QuickLosses = losses });
             var kwh = TurbineRanking.QuickEnergyKwh(plant, middles);
             var kw = train.GeneratedPowerKw(plant.At(plant.BestFlowM3PerS).ShaftPowerKw);
             var grows = kw > lastKw * (1 + 1e-6) && kw > 0;

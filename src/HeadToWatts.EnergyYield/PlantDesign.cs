@@ -13,7 +13,11 @@ namespace HeadToWatts.EnergyYield;
 /// <param name="Train">From the shaft to the meter.</param>
 public sealed record PlantDesign(SiteConditions Site, GrossHead GrossHead, Waterway Waterway, UnitSet Units, PowerTrain Train)
 {
+    /// <summary>Tabulated losses for quick comparisons; null where figures are reported.</summary>
+    public LossTable? QuickLosses { get; init; }
+
     /// <summary>Net head when the waterway carries a flow, m.</summary>
     /// <param name="turbineFlowM3PerS">Flow through the waterway, m3/s.</param>
-    public double NetHeadM(double turbineFlowM3PerS) => GrossHead.Metres - Waterway.LossM(turbineFlowM3PerS, Site);
+    public double NetHeadM(double turbineFlowM3PerS) => 
+        GrossHead.Metres - (QuickLosses?.LossM(turbineFlowM3PerS) ?? Waterway.LossM(turbineFlowM3PerS, Site));
 }

@@ -41,6 +41,7 @@ public static class TurbineRanking
         ArgumentNullException.ThrowIfNull(supply);
         ArgumentNullException.ThrowIfNull(train);
         var middles = supply.MiddlesM3PerS(ComparisonShares);
+        var losses = new LossTable(waterway, site, designFlowM3PerS);
         var candidates = new List<TurbineCandidate>();
         foreach (var type in TurbineTypes.All)
         {
@@ -49,12 +50,12 @@ public static class TurbineRanking
             for (var n = 1; n <= 4; n++)
             {
                 var units = new UnitSet(type, type.Efficiency, type.LeastFlowRatio, n, designFlowM3PerS);
-                plants[n - 1] = new PlantCurve(new PlantDesign(site, grossHead, waterway, units, train));
+                plants[n - 1] = new PlantCurve(new PlantDesign(site, grossHead, waterway, units, train) { QuickLosses = losses });
                 byUnits[n - 1] = QuickEnergyKwh(plants[n - 1], middles);
             }
 
             var count = fixedUnitCount ?? BestCount(type, plants, byUnits);
-            var plant = count <= 4 ? plants[count - 1] : new PlantCurve(new PlantDesign(site, grossHead, waterway, new UnitSet(type, type.Efficiency, type.LeastFlowRatio, count, designFlowM3PerS), train));
+            var plant = count <= 4 ? plants[count - 1] : new PlantCurve(new PlantDesign(site, grossHead, waterway, new UnitSet(type, type.Efficiency, type.LeastFlowRatio, count, designFlowM3PerS), train) { QuickLosses = losses });
             candidates.Add(Candidate(type, count, plant, byUnits, supply, middles, frequencyHz));
         }
 
