@@ -1,0 +1,24 @@
+namespace HeadToWatts.Files.FlowFiles.Reading;
+
+/// <summary>Counts marks in the order they first stood.</summary>
+internal sealed class Tally
+{
+    private const int MostKinds = 200;
+    private readonly Dictionary<string, int> _counts = new(StringComparer.Ordinal);
+    private readonly List<string> _order = [];
+
+    public void Add(string mark)
+    {
+        if (_counts.TryGetValue(mark, out var count))
+        {
+            _counts[mark] = count + 1;
+        }
+        else if (_order.Count < MostKinds)
+        {
+            _counts[mark] = 1;
+            _order.Add(mark);
+        }
+    }
+
+    public IReadOnlyList<MarkCount> Counts() => [.. _order.Select(m => new MarkCount(m, _counts[m]))];
+}

@@ -1,0 +1,121 @@
+using System.Globalization;
+
+namespace HeadToWatts.Files.FlowFiles.Reading;
+
+/// <summary>What a value cell held.</summary>
+internal enum CellKind
+{
+    Value,
+    Missing,
+    Wrong,
+}
+
+/// <summary>How numbers are written in a column.</summary>
+internal enum NumberSigns
+{
+    /// <summary>A decimal point and no other sign.</summary>
+    Point,
+
+    /// <summary>A decimal point, and commas between thousands.</summary>
+    PointAndThousands,
+
+    /// <summary>A decimal comma; points between thousands.</summary>
+    Comma,
+}
+
+/// <summary>Reads value cells. Marks of agencies and loggers for "no value" are missing, never numbers.</summary>
+internal static class WrittenValue
+{
+    private const string Blank = "(blank)";
+
+    private static readonly HashSet<string> Words = new(StringComparer.OrdinalIgnoreCase)
+    {
+        "-", "--", "---", "***", "*", "?", "NA", "N/A", "#N/A", "NaN", "null", "none", "nil", "missing", "M", "ND", "no data", "nodata",
+        "ice", "eqp", "ssn", "rat", "dis", "bkw", "mnt", "fld", "tst", "pr", "rps",
+    };
+
+    // -99 is left out on purpose: computed inflows reach it.
+    private static readonly HashSet<double> Numbers = [-999, -9999, -99999, -999.9, -999.99, -9999.99, 998877];
+
+    /// <summary>Reads one cell.</summary>
+    /// <param name="cell">The cell, trimmed.</param>
+    /// <param name="signs">How numbers are written.</param>
+    /// <param name="value">The value; NaN when missing or wrong.</param>
+    /// <param name="note">The mark when missing, the reason when wrong, "Dry" for that word, otherwise empty.</param>
+    public static CellKind Read(string cell, NumberSigns signs, out double value, out string note)
+    {
+        value = double.NaN;
+        note = Blank;
+        if (cell.Length == 0)
+            return CellKind.Missing;
+        note = "";
+
+        var text = cell;
+        if (signs == NumberSigns.PointAndThousands)
+            text = text.Replace(",", "", StringComparison.Ordinal);
+        else if (signs == NumberSigns.Comma)
+            text = text.Replace(".", "", StringComparison.Ordinal).Replace(',', '.');
+        if (double.TryParse(text, NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out var number)
+            && double.IsFinite(number))
+        {
+            if (Numbers.Contains(number))
+            {
+                note = cell;
+                return CellKind.Missing;
+            }
+
+            value = number;
+            return CellKind.Value;
+        }
+
+        if (Words.Contains(cell))
+        {
+            note = cell;
+            return CellKind.Missing;
+        }
+
+        if (cell.Equals("dry", StringComparison.OrdinalIgnoreCase))
+        {
+            note = "Dry";
+            value = 0;
+            return CellKind.Value;
+        }
+
+        note = cell[0] is '<' or '>'
+            ? "this is a limit, not a value"
+            : text.Contains(',', StringComparison.Ordinal) ? "the comma may be a decimal sign or a thousands sign" : "this is neither a number nor a known mark for a missing value";
+        return CellKind.Wrong;
+    }
+
+    /// <summary>Settles how numbers are written from cells that hold a comma.</summary>
+    public static NumberSigns Detect(IEnumerable<string> cells, out string evidence)
+    {
+        evidence = "";
+        foreach (var cell in cells)
+        {
+            var comma = cell.LastIndexOf(',');
+            if (comma < 0)
+                continue;
+            var point = cell.IndexOf('.', StringComparison.Ordinal);
+            if (point > comma)
+            {
+                evidence = $"commas stand between thousands, as '{cell}' shows";
+                return NumberSigns.PointAndThousands;
+            }
+
+            if ((point >= 0 && point < comma) || cell.Length - comma - 1 != 3 || cell.StartsWith("0,", StringComparison.Ordinal))
+            {
+                evidence = $"the comma is the decimal sign, as '{cell}' shows";
+                return NumberSigns.Comma;
+            }
+
+            if (cell.IndexOf(',', StringComparison.Ordinal) != comma)
+            {
+                evidence = $"commas stand between thousands, as '{cell}' shows";
+                return NumberSigns.PointAndThousands;
+            }
+        }
+
+        return NumberSigns.Point;
+    }
+}
