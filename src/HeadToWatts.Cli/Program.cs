@@ -1,1 +1,1 @@
-return 0;
+return HeadToWatts.Cli.CommandLine.Run(args, Console.Out, Console.Error, Console.OpenStandardInput);

@@ -1,0 +1,33 @@
+using HeadToWatts.Basis.Units;
+using HeadToWatts.Studies;
+using HeadToWatts.Studies.Cautions;
+
+namespace HeadToWatts.Cli;
+
+/// <summary>The answer of a study in a few lines, aligned for a terminal and plain enough for a pipe.</summary>
+internal static class Summary
+{
+    internal static void Write(TextWriter output, StudyResult r)
+    {
+        var show = r.Show();
+        var annual = r.Energy.Annual;
+        output.WriteLine($"{r.Header.Name}: {r.Input.Name}");
+        Line("power at the meter", UnitDisplay.Power(annual.MeterPowerKw), $"installed {UnitDisplay.Power(annual.InstalledPowerKw)}");
+        Line("energy in a mean year", UnitDisplay.Energy(annual.AnnualEnergyKwh), r.Energy.Days?.DryYearKwh is { } dry ? $"{UnitDisplay.Energy(dry)} in a dry year" : "");
+        Line("plant factor", UnitDisplay.Percent(annual.PlantFactor), $"{UnitDisplay.Number(annual.FullLoadHours)} full-load hours, {UnitDisplay.Number(annual.RunningHours)} h running");
+        Line("design flow", show.Flow(r.Flow.DesignFlowM3PerS), $"{(r.Flow.DesignFlowIsSuggested ? "suggested" : "given")}, reached {UnitDisplay.Percent(r.Flow.DesignFlowExceedance)} of the year");
+        Line("net head", show.Length(r.Head.NetHeadAtDesignM), $"of {show.Length(r.Head.GrossHeadM)} gross");
+        Line("velocity", show.Velocity(r.Waterway.HighestVelocityMPerS), $"limit {show.Velocity(r.Waterway.VelocityLimitMPerS)}");
+        Line("turbine", $"{r.Turbine.Chosen.Type.Name} x {r.Turbine.Chosen.UnitCount}", r.Turbine.Chosen.Fit.IsInside ? "inside its envelope" : "OUTSIDE its envelope");
+        foreach (var caution in CautionRules.For(r, show))
+        {
+            var mark = caution.Severity switch { Severity.SettleFirst => "settle first", Severity.Weigh => "weigh", _ => "note" };
+            output.WriteLine($"  [{mark}] {caution.Title}. {caution.Text}");
+        }
+
+        output.WriteLine($"  {StandingCautions.Status}. Local codes govern; licensed professionals must check what is built on it.");
+
+        void Line(string name, string value, string note) =>
+            output.WriteLine($"  {name,-22} {value,12}" + (note.Length > 0 ? "   " + note : ""));
+    }
+}
