@@ -59,16 +59,14 @@ public static class ResultTables
     private static ResultTable Table(string fileName, string[] header, IEnumerable<object?[]> rows)
     {
         using var text = new StringWriter(CultureInfo.InvariantCulture) { NewLine = "\n" };
-        using (var csv = new CsvWriter(text, new CsvHelper.Configuration.CsvConfiguration(CultureInfo.InvariantCulture) { NewLine = "\n" }))
+        using (var csv = CsvWriter.Create(text, CsvWriterOptions.Default with { NewLine = "\n", FormatProvider = CultureInfo.InvariantCulture }, leaveOpen: true))
         {
-            foreach (var name in header)
-                csv.WriteField(name);
-            csv.NextRecord();
+            csv.WriteHeader(header);
             foreach (var row in rows)
             {
                 foreach (var cell in row)
-                    csv.WriteField(cell switch { double d => d.ToString("R", CultureInfo.InvariantCulture), bool b => b ? "true" : "false", _ => Convert.ToString(cell, CultureInfo.InvariantCulture) });
-                csv.NextRecord();
+                    csv.WriteField(cell switch { double d => d.ToString("R", CultureInfo.InvariantCulture), bool b => b ? "true" : "false", _ => Convert.ToString(cell, CultureInfo.InvariantCulture) ?? "" });
+                csv.EndRecord();
             }
         }
 

@@ -30,6 +30,8 @@ internal static class FlowBuilder
 
         var curve = hasRows ? Curve(d, path, read) : null;
         var record = d.Record is { } r ? Record(r, path + ".record", read, files) : null;
+        if (record is not null && record.ValidDaysIn(season) == 0)
+            read.Refuse(path + ".season", d.Season, "no day of the record falls into the season with a flow", "a season that the record covers");
         var forSeason = RowsAreForSeason(d, path, season, hasRows, read);
         var (reserved, stated) = Reserved(d.ReservedFlow, path + ".reservedFlow", read);
         var prior = read.Optional(d.PriorDeliveries, Dimension.Flow, path + ".priorDeliveries", 0, LargestFlowM3PerS) ?? 0;
