@@ -55,7 +55,7 @@ public static partial class DesignFlowChart
             Upright(suggested, InkRole.Soft, isMain: false);
 
         var type = size.Type;
-        frame.Labels.TryPlace(frame.Canvas, $"{(same ? "suggested" : "this study")} {show.Flow(input.Chosen.DesignFlowM3PerS)}", frame.StrongStyle(InkRole.Ink), Beside(input.Chosen));
+        frame.Labels.TryPlace(frame.Canvas, $"{(same ? "suggested" : "this study")} {Wording.Trimmed(show.Flow(input.Chosen.DesignFlowM3PerS))}", frame.StrongStyle(InkRole.Ink), Beside(input.Chosen));
         if (input.Suggested is { } other && !same)
             frame.Labels.TryPlace(frame.Canvas, $"suggested {show.Flow(other.DesignFlowM3PerS)}", frame.LabelStyle(InkRole.Soft), Beside(other));
         frame.Labels.TryPlace(frame.Canvas, "energy", frame.StrongStyle(InkRole.Ochre), Spots.AlongCurve(energy, type.Strong, 0.7));
@@ -74,7 +74,7 @@ public static partial class DesignFlowChart
             Point[] line = [new(at.X, frame.Top), new(at.X, frame.Bottom)];
             frame.Canvas.Line(line[0], line[1], new Stroke(role, 1, isMain ? Dash.Solid : Dash.Dashed));
             frame.Labels.AvoidLines(line, 0.5);
-            frame.Canvas.BeginMark($"{(isMain ? "this study" : "suggested")}: {show.Flow(p.DesignFlowM3PerS)}, {UnitDisplay.Energy(p.AnnualEnergyKwh)} a year, plant factor {UnitDisplay.Percent(p.PlantFactor)}");
+            frame.Canvas.BeginMark($"{(isMain ? "this study" : "suggested")}: {show.Flow(p.DesignFlowM3PerS)}, {UnitDisplay.Energy(p.AnnualEnergyKwh)} a year, plant factor {Wording.Share(p.PlantFactor)}");
             frame.Canvas.Circle(at, isMain ? 4.5 : 3.5, new Paint(new Fill(role), new Stroke(InkRole.Card, 1.5)));
             frame.Canvas.EndMark();
             frame.Labels.Avoid(LabelBox.Of(new Point(at.X - 6, at.Y - 6), 12, 12));
@@ -98,17 +98,17 @@ public static partial class DesignFlowChart
         var step = Math.Max(1, points.Count / most);
         var places = new List<(Point Dot, string Text)>();
         for (var i = 0; i < points.Count; i += step)
-            places.Add((at(points[i]), $"{show.Flow(points[i].DesignFlowM3PerS)}: {UnitDisplay.Energy(points[i].AnnualEnergyKwh)} a year, plant factor {UnitDisplay.Percent(points[i].PlantFactor)}"));
+            places.Add((at(points[i]), $"{show.Flow(points[i].DesignFlowM3PerS)}: {UnitDisplay.Energy(points[i].AnnualEnergyKwh)} a year, plant factor {Wording.Share(points[i].PlantFactor)}"));
         return places;
     }
 
     private static string Describe(DesignFlowInput input, UnitDisplay show, bool same)
     {
-        var text = $"With the design flow of this study, {show.Flow(input.Chosen.DesignFlowM3PerS)}, the plant gives {UnitDisplay.Energy(input.Chosen.AnnualEnergyKwh)} a year at a plant factor of {UnitDisplay.Percent(input.Chosen.PlantFactor)}.";
+        var text = $"With the design flow of this study, {show.Flow(input.Chosen.DesignFlowM3PerS)}, the plant gives {UnitDisplay.Energy(input.Chosen.AnnualEnergyKwh)} a year at a plant factor of {Wording.Share(input.Chosen.PlantFactor)}.";
         if (same)
             return text + " That is the design flow suggested.";
         return input.Suggested is { } s
-            ? text + $" Suggested is {show.Flow(s.DesignFlowM3PerS)}, with {UnitDisplay.Energy(s.AnnualEnergyKwh)} a year at {UnitDisplay.Percent(s.PlantFactor)}."
+            ? text + $" Suggested is {show.Flow(s.DesignFlowM3PerS)}, with {UnitDisplay.Energy(s.AnnualEnergyKwh)} a year at {Wording.Share(s.PlantFactor)}."
             : text;
     }
 }

@@ -10,11 +10,25 @@ namespace HeadToWatts.Drawings;
 /// <param name="NetHeadM">Net head.</param>
 public readonly record struct HeadAndFlow(double FlowM3PerS, double NetHeadM);
 
+/// <summary>How a machine takes its energy from the water.</summary>
+public enum MachineFamily
+{
+    /// <summary>Jets in air: Pelton, Turgo, crossflow.</summary>
+    Impulse,
+
+    /// <summary>Runs full of water: Francis, Kaplan, propeller, pump as turbine.</summary>
+    Reaction,
+
+    /// <summary>Moved by the weight of the water: screws and water wheels.</summary>
+    Gravity,
+}
+
 /// <summary>The range of head and flow a turbine type is built for.</summary>
 /// <param name="Name">Name of the type.</param>
 /// <param name="Corners">Corners of the range, joined straight in log head and log flow.</param>
+/// <param name="Family">How it works; families share a colour.</param>
 /// <param name="IsChosen">True for the type of this study.</param>
-public sealed record EnvelopeShape(string Name, IReadOnlyList<HeadAndFlow> Corners, bool IsChosen);
+public sealed record EnvelopeShape(string Name, IReadOnlyList<HeadAndFlow> Corners, MachineFamily Family, bool IsChosen);
 
 /// <summary>What the envelope chart shows.</summary>
 /// <param name="Shapes">The turbine types.</param>
@@ -25,7 +39,7 @@ public sealed record EnvelopeInput(IReadOnlyList<EnvelopeShape> Shapes, HeadAndF
 /// <summary>The ranges of the turbine types over log head and log flow, with the site's point and its range through the year.</summary>
 public static partial class EnvelopeChart
 {
-    private static readonly InkRole[] Others = [InkRole.Plum, InkRole.Green, InkRole.Ochre, InkRole.Soft];
+    private static readonly InkRole[] OfFamily = [InkRole.Plum, InkRole.Green, InkRole.Ochre];
 
     /// <summary>Draws the chart.</summary>
     public static Drawing Draw(EnvelopeInput input, UnitDisplay show, DrawingSize size)
@@ -43,10 +57,9 @@ public static partial class EnvelopeChart
         var frame = ChartFrame.Begin(size, x, y);
 
         var shapes = new List<(EnvelopeShape Shape, InkRole Role, IReadOnlyList<Point> Outline)>();
-        var next = 0;
         foreach (var shape in input.Shapes)
         {
-            var role = shape.IsChosen ? InkRole.Water : Others[next++ % Others.Length];
+            var role = shape.IsChosen ? InkRole.Water : OfFamily[(int)shape.Family];
             var outline = ClipPolygon.To([.. shape.Corners.Where(c => c.FlowM3PerS > 0 && c.NetHeadM > 0).Select(At)], frame.Left, frame.Top, frame.Right, frame.Bottom);
             if (outline.Count >= 3)
                 shapes.Add((shape, role, outline));
@@ -57,7 +70,7 @@ public static partial class EnvelopeChart
         foreach (var (shape, role, outline) in shapes)
         {
             frame.Canvas.BeginMark(shape.Name + (shape.IsChosen ? ", the type of this study" : ""));
-            frame.Canvas.Polygon(outline, new Paint(new Fill(role, shape.IsChosen ? 0.24 : 0.08), new Stroke(role, shape.IsChosen ? 1.8 : 1.1, Dash.Solid, shape.IsChosen ? 1 : 0.8)));
+            frame.Canvas.Polygon(outline, new Paint(new Fill(role, shape.IsChosen ? 0.22 : 0.05), new Stroke(role, shape.IsChosen ? 1.8 : 1, Dash.Solid, shape.IsChosen ? 1 : 0.65)));
             frame.Canvas.EndMark();
             frame.Labels.AvoidLines([.. outline, outline[0]]);
         }
@@ -104,7 +117,7 @@ public static partial class EnvelopeChart
         var half = TextMeasure.Width(text, style) / 2;
         var (left, right) = (outline.Min(p => p.X) + half + 4, outline.Max(p => p.X) - half - 4);
         var (top, bottom) = (outline.Min(p => p.Y) + (style.Size * 1.1), outline.Max(p => p.Y) - (style.Size * 0.5));
-        const int across = 12, down = 10;
+        const int across = 10, down = 8;
         var found = new List<(double Cost, LabelSpot Spot)>();
         for (var i = 0; i <= across; i++)
         {

@@ -26,9 +26,15 @@ public readonly record struct FlowShare(
 /// <param name="DesignFlowM3PerS">Full flow of all units together.</param>
 /// <param name="DesignExceedance">Share of the time with at least the design flow to use.</param>
 /// <param name="LeastFlowM3PerS">Least flow that one unit runs on; 0 when it runs on any.</param>
-/// <param name="DryNote">Said where there is no flow, as "canal dry, 15 Oct – 1 Apr"; null when unknown.</param>
+/// <param name="DryNote">Said where there is no flow, as "canal dry, 15 Oct to 1 Apr"; null when unknown.</param>
+/// <param name="ReservedName">What the reserved part is called.</param>
 public sealed record FlowDurationInput(
-    IReadOnlyList<FlowShare> Shares, double DesignFlowM3PerS, double DesignExceedance, double LeastFlowM3PerS, string? DryNote = null);
+    IReadOnlyList<FlowShare> Shares,
+    double DesignFlowM3PerS,
+    double DesignExceedance,
+    double LeastFlowM3PerS,
+    string? DryNote = null,
+    string ReservedName = "reserved");
 
 /// <summary>
 /// The flow-duration curve with what goes through the turbines, is spilled, is reserved, and is too little to use. Reserved
@@ -37,7 +43,7 @@ public sealed record FlowDurationInput(
 public static partial class FlowDurationChart
 {
     // A flood of many times the design flow would press the part that matters flat against the axis.
-    private const double HighestShownDesignFlows = 4;
+    private const double HighestShownDesignFlows = 3;
 
     /// <summary>Draws the chart.</summary>
     /// <exception cref="ArgumentException">There are fewer than two points.</exception>
@@ -51,7 +57,8 @@ public static partial class FlowDurationChart
 
         var unit = show.FlowUnit;
         var peak = input.Shares.Max(s => s.TotalFlowM3PerS);
-        var limit = HighestShownDesignFlows * (input.DesignFlowM3PerS + input.Shares.Max(s => Math.Min(s.ReservedFlowM3PerS, input.DesignFlowM3PerS)));
+        var atDesign = input.Shares.MinBy(s => Math.Abs(s.UsableFlowM3PerS - input.DesignFlowM3PerS));
+        var limit = HighestShownDesignFlows * (input.DesignFlowM3PerS + atDesign.ReservedFlowM3PerS);
         var isCut = input.DesignFlowM3PerS > 0 && peak > limit * 1.2;
         var highest = Math.Max(isCut ? limit : peak, input.DesignFlowM3PerS * 1.08);
         var x = Axis.Linear("percent of the time exceeded", 0, 100, ChartFrame.HorizontalIntervals(size, 3) >= 10 ? 10 : 5);
@@ -68,9 +75,9 @@ public static partial class FlowDurationChart
         Area(running, turbine, new Fill(InkRole.Plum, 0.22));
         Area(usable, running, new Fill(InkRole.Grid));
         Area(total, usable, new Fill(InkRole.Green, 0.22));
-        frame.Curve(usable, new Stroke(InkRole.Water, 2.2));
+        frame.Curve(Simplify.Curve(usable), new Stroke(InkRole.Water, 2.2));
         if (HasArea(total, usable))
-            frame.Curve(total, new Stroke(InkRole.Green, 1.2));
+            frame.Curve(Simplify.Curve(total), new Stroke(InkRole.Green, 1.2));
 
         var designY = frame.AtY(unit.FromHeld(input.DesignFlowM3PerS));
         LevelLine(designY, new Stroke(InkRole.Ochre, 1.4));
@@ -79,22 +86,22 @@ public static partial class FlowDurationChart
         if (least)
             LevelLine(leastY, new Stroke(InkRole.Soft, 1, Dash.Dashed));
 
-        var designText = "design flow " + show.Flow(input.DesignFlowM3PerS);
-        PlaceFirst([designText + ", exceeded " + UnitDisplay.Percent(input.DesignExceedance), designText], frame.LabelStyle(InkRole.Ochre), designY);
-        if (least)
-            PlaceFirst(["least flow " + show.Flow(input.LeastFlowM3PerS)], frame.LabelStyle(InkRole.Soft), leastY);
         AreaLabel(turbine, zero, "through the turbine", frame.StrongStyle(InkRole.Water));
+        var designText = "design flow " + Wording.Trimmed(show.Flow(input.DesignFlowM3PerS));
+        PlaceFirst([designText + ", exceeded " + Wording.Share(input.DesignExceedance), designText], frame.LabelStyle(InkRole.Ochre), designY);
+        if (least)
+            PlaceFirst(["least flow " + Wording.Trimmed(show.Flow(input.LeastFlowM3PerS))], frame.LabelStyle(InkRole.Soft), leastY);
         AreaLabel(usable, running, "spilled", frame.LabelStyle(InkRole.Soft));
-        AreaLabel(total, usable, "reserved", frame.LabelStyle(InkRole.Green));
+        AreaLabel(total, usable, input.ReservedName, frame.LabelStyle(InkRole.Green));
         AreaLabel(running, turbine, "below least flow", frame.LabelStyle(InkRole.Plum));
         DryLabel();
         if (isCut)
         {
-            frame.Labels.TryPlace(frame.Canvas, "up to " + show.Flow(peak), frame.LabelStyle(InkRole.Soft),
+            frame.Labels.TryPlace(frame.Canvas, "up to " + Wording.Trimmed(show.Flow(peak)), frame.LabelStyle(InkRole.Soft),
                 [new LabelSpot(new Point(frame.Left + 14, frame.Top + size.Type.Label)), new LabelSpot(new Point(frame.Left + 34, frame.Top + size.Type.Label)), new LabelSpot(new Point(frame.Left + 70, frame.Top + size.Type.Label))]);
         }
 
-        frame.HoverBands(Hovers(input.Shares, show, frame));
+        frame.HoverBands(Hovers(input.Shares, input.ReservedName, show, frame));
         return frame.Canvas.Finish("Flow-duration curve", Describe(input, show), size.Width, size.Height);
 
         IReadOnlyList<Point> Level(IReadOnlyList<FlowShare> shares, Func<FlowShare, double> flow) =>
@@ -126,7 +133,7 @@ public static partial class FlowDurationChart
         {
             if (!HasArea(upper, lower))
                 return;
-            var inside = Spots.BetweenCurves(upper, lower, text, style).ToList();
+            var inside = Spots.BetweenCurves(Simplify.Curve(upper), Simplify.Curve(lower), text, style).ToList();
             if (inside.Count > 0 && frame.Labels.TryPlace(frame.Canvas, text, style with { Halo = false }, inside, 0.5))
                 return;
             OutsideLabel(upper, lower, text, style);
@@ -176,7 +183,7 @@ public static partial class FlowDurationChart
         return false;
     }
 
-    private static List<(Point Dot, string Text)> Hovers(IReadOnlyList<FlowShare> shares, UnitDisplay show, ChartFrame frame)
+    private static List<(Point Dot, string Text)> Hovers(IReadOnlyList<FlowShare> shares, string reservedName, UnitDisplay show, ChartFrame frame)
     {
         const int bands = 40;
         var places = new List<(Point Dot, string Text)>();
@@ -185,11 +192,11 @@ public static partial class FlowDurationChart
             var share = At(shares, (double)band / bands);
             var parts = new List<string> { "through the turbine " + show.Flow(share.TurbineFlowM3PerS) };
             Add("spilled", share.SpilledFlowM3PerS);
-            Add("reserved", share.ReservedFlowM3PerS);
+            Add(reservedName, share.ReservedFlowM3PerS);
             Add("below least flow", share.BelowMinimumFlowM3PerS);
             places.Add((
                 new Point(frame.AtX(share.Exceedance * 100), Math.Max(frame.Top, frame.AtY(show.FlowUnit.FromHeld(share.UsableFlowM3PerS)))),
-                $"{UnitDisplay.Percent(share.Exceedance)} of the time at least {show.Flow(share.TotalFlowM3PerS)}: {string.Join(", ", parts)}"));
+                $"{Wording.Share(share.Exceedance)} of the time at least {show.Flow(share.TotalFlowM3PerS)}: {string.Join(", ", parts)}"));
 
             void Add(string name, double flowM3PerS)
             {
@@ -230,12 +237,12 @@ public static partial class FlowDurationChart
         var last = input.Shares[^1];
         var running = input.Shares.Where(s => s.TurbineFlowM3PerS > 0).Select(s => s.Exceedance).DefaultIfEmpty(0).Max();
         var text = $"The flow runs from {show.Flow(first.TotalFlowM3PerS)} at its highest to {show.Flow(last.TotalFlowM3PerS)} at its lowest. "
-            + $"The design flow {show.Flow(input.DesignFlowM3PerS)} is exceeded {UnitDisplay.Percent(input.DesignExceedance)} of the time; the turbines run {UnitDisplay.Percent(running)} of the time.";
+            + $"The design flow {show.Flow(input.DesignFlowM3PerS)} is exceeded {Wording.Share(input.DesignExceedance)} of the time; the turbines run {Wording.Share(running)} of the time.";
         if (input.LeastFlowM3PerS > 0)
             text += $" The least flow they run on is {show.Flow(input.LeastFlowM3PerS)}.";
         var reserved = input.Shares.Max(s => s.ReservedFlowM3PerS);
         if (reserved > 0)
-            text += $" Up to {show.Flow(reserved)} is reserved.";
+            text += $" Up to {show.Flow(reserved)} is {input.ReservedName}.";
         return input.DryNote is null ? text : text + " " + char.ToUpperInvariant(input.DryNote[0]) + input.DryNote[1..] + ".";
     }
 }

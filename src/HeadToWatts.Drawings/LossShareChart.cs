@@ -33,7 +33,7 @@ public static partial class LossShareChart
         var total = input.Shares.Sum(s => s.LossM);
         var most = rows.Select(r => r.LossM).DefaultIfEmpty(0).Max();
         var row = type.Label * 1.9;
-        var values = rows.Select(r => show.Length(r.LossM) + (total > 0 ? ", " + UnitDisplay.Percent(r.LossM / total) : "")).ToList();
+        var values = rows.Select(r => Short(r.LossM) + (total > 0 ? ", " + ShareOf(r.LossM / total) : "")).ToList();
         var valueWidth = values.Select(v => TextMeasure.Width(v, type.Label)).DefaultIfEmpty(0).Max();
         var nameRoom = Math.Min(rows.Select(r => TextMeasure.Width(r.Name, type.Label)).DefaultIfEmpty(0).Max(), size.Width * 0.42);
         var left = 3 + nameRoom + 10;
@@ -52,13 +52,17 @@ public static partial class LossShareChart
 
         var sumY = 4 + (rows.Count * row) + type.Strong;
         canvas.Line(new Point(left, 4), new Point(left, 4 + (rows.Count * row)), new Stroke(InkRole.Line));
-        var sum = $"together {show.Length(total)}" + (input.GrossHeadM > 0 ? $", {UnitDisplay.Percent(total / input.GrossHeadM)} of the gross head" : "");
+        var sum = $"together {show.Length(total)}" + (input.GrossHeadM > 0 ? $", {Wording.Share(total / input.GrossHeadM)} of the gross head" : "");
         canvas.Text(new Point(Math.Min(left, size.Width - 4 - TextMeasure.Width(sum, type.Strong, TextWeight.SemiBold)), sumY), sum, new TextStyle(InkRole.Ochre, type.Strong, Weight: TextWeight.SemiBold));
         return canvas.Finish(
             "Where head is lost",
             $"At {show.Flow(input.FlowM3PerS)} the losses are {sum}: {string.Join("; ", rows.Select((r, i) => r.Name + " " + values[i]))}.",
             size.Width,
             sumY + (type.Strong * 0.6));
+
+        string Short(double lossM) => UnitDisplay.In(lossM, show.LengthUnit, 2) + " " + show.LengthUnit.Symbol;
+
+        static string ShareOf(double ratio) => ratio is > 0 and < 0.01 ? "< 1 %" : Wording.Share(ratio);
     }
 
     // Many small fittings are shown as one row, so that nothing is left out of the sum.

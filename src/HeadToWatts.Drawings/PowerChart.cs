@@ -60,7 +60,7 @@ public static partial class PowerChart
         var type = size.Type;
         frame.Labels.TryPlace(frame.Canvas, "net head, " + show.Length(input.Design.NetHeadM) + " at design flow", frame.LabelStyle(InkRole.Water), Spots.AlongCurve(head, type.Label, 0.35));
         frame.Labels.TryPlace(frame.Canvas, "power, " + UnitDisplay.Power(input.Design.PowerKw) + " at design flow", frame.StrongStyle(InkRole.Ochre), Spots.AlongCurve(power, type.Strong, 0.55, aboveFirst: false));
-        frame.Labels.TryPlace(frame.Canvas, "design flow " + show.Flow(input.Design.FlowM3PerS), frame.LabelStyle(InkRole.Soft), DesignSpots());
+        frame.Labels.TryPlace(frame.Canvas, "design flow " + Wording.Trimmed(show.Flow(input.Design.FlowM3PerS)), frame.LabelStyle(InkRole.Soft), DesignSpots());
 
         frame.HoverBands(Hovers(input.Points, show, frame, Shown));
         var units = input.Units == 1 ? "one unit" : $"{input.Units} units brought in one after another";

@@ -24,6 +24,13 @@ internal static class Spots
                     continue;
                 var x = from + (share * (to - from));
                 var y = HeightAt(curve, x);
+
+                // Beside a steep stretch there is no room above or below: end on it from the left, begin on it to the right.
+                var rises = HeightAt(curve, x + 1) < HeightAt(curve, x - 1);
+                var left = new LabelSpot(new Point(x - 6, rises ? y - (size * 0.3) : y + size), TextAnchor.End);
+                var right = new LabelSpot(new Point(x + 6, rises ? y + size : y - (size * 0.3)));
+                yield return rises == aboveFirst ? left : right;
+                yield return rises == aboveFirst ? right : left;
                 foreach (var gap in Gaps)
                 {
                     var above = new LabelSpot(new Point(x, y - (size * gap)), TextAnchor.Middle);
@@ -96,7 +103,10 @@ internal static class Spots
             found.Add((room, new LabelSpot(new Point(centre, baseline), TextAnchor.Middle)));
         }
 
-        return found.OrderByDescending(f => f.Room).Select(f => f.Spot);
+        // Roomy spots are equal; among them the middle of the area is the most natural.
+        const double roomy = 10;
+        var middle = found.Count == 0 ? 0 : found.Sum(f => f.Room * f.Spot.At.X) / found.Sum(f => f.Room);
+        return found.OrderByDescending(f => Math.Min(f.Room, roomy)).ThenBy(f => Math.Abs(f.Spot.At.X - middle)).Select(f => f.Spot);
     }
 
     /// <summary>Height of a curve that runs from left to right, at a place across; the ends go on level.</summary>
@@ -104,14 +114,19 @@ internal static class Spots
     {
         if (x <= curve[0].X)
             return curve[0].Y;
-        for (var i = 1; i < curve.Count; i++)
+        if (x > curve[^1].X)
+            return curve[^1].Y;
+        int low = 0, high = curve.Count - 1;
+        while (high - low > 1)
         {
-            if (x > curve[i].X)
-                continue;
-            var (a, b) = (curve[i - 1], curve[i]);
-            return b.X - a.X <= 0 ? b.Y : a.Y + ((x - a.X) / (b.X - a.X) * (b.Y - a.Y));
+            var middle = (low + high) / 2;
+            if (curve[middle].X < x)
+                low = middle;
+            else
+                high = middle;
         }
 
-        return curve[^1].Y;
+        var (a, b) = (curve[low], curve[high]);
+        return b.X - a.X <= 0 ? b.Y : a.Y + ((x - a.X) / (b.X - a.X) * (b.Y - a.Y));
     }
 }

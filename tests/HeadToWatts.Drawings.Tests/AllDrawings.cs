@@ -1,0 +1,51 @@
+using HeadToWatts.Basis.Units;
+using HeadToWatts.Drawings.Canvas;
+
+namespace HeadToWatts.Drawings.Tests;
+
+/// <summary>Every drawing of every scenario at every size, in both families of units.</summary>
+public static class AllDrawings
+{
+    public static readonly IReadOnlyDictionary<string, DrawingSize> Sizes = new Dictionary<string, DrawingSize>
+    {
+        ["wide"] = DrawingSize.Wide,
+        ["half"] = DrawingSize.Half,
+        ["phone"] = DrawingSize.Phone,
+        ["memo"] = DrawingSize.MemoPage,
+    };
+
+    public static IReadOnlyList<(string Name, Drawing Drawing)> Of(string scenario, string size, UnitSystem units)
+    {
+        var result = Scenarios.Get(scenario);
+        var show = result.Show(units);
+        var s = Sizes[size];
+        var all = new List<(string, Drawing?)>
+        {
+            ("section", SchemeSection.Draw(result, show, s)),
+            ("section at half flow", SchemeSection.Draw(result, show, s, result.Flow.DesignFlowM3PerS / 2)),
+            ("section standing", SchemeSection.Draw(result, show, s, 0)),
+            ("flow duration", FlowDurationChart.Draw(result, show, s)),
+            ("envelope", EnvelopeChart.Draw(result, show, s)),
+            ("power", PowerChart.Draw(result, show, s)),
+            ("design flow", DesignFlowChart.Draw(result, show, s)),
+            ("months", MonthsChart.Draw(result, s)),
+            ("losses", LossShareChart.Draw(result, show, s)),
+        };
+        return [.. all.Where(d => d.Item2 is not null).Select(d => (d.Item1, d.Item2!))];
+    }
+
+    public static TheoryData<string, string, UnitSystem> Cases()
+    {
+        var data = new TheoryData<string, string, UnitSystem>();
+        foreach (var scenario in Scenarios.Names)
+        {
+            foreach (var size in Sizes.Keys)
+            {
+                data.Add(scenario, size, UnitSystem.US);
+                data.Add(scenario, size, UnitSystem.SI);
+            }
+        }
+
+        return data;
+    }
+}

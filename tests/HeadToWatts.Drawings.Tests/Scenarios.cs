@@ -1,0 +1,143 @@
+using HeadToWatts.Basis.Quantities;
+using HeadToWatts.Basis.Units;
+using HeadToWatts.EnergyYield;
+using HeadToWatts.FlowRecords;
+using HeadToWatts.Hydraulics.Friction;
+using HeadToWatts.Hydraulics.LocalLosses;
+using HeadToWatts.Hydraulics.Pipes;
+using HeadToWatts.Hydraulics.Waterways;
+using HeadToWatts.Studies;
+using HeadToWatts.Studies.Inputs;
+using HeadToWatts.Turbines;
+
+namespace HeadToWatts.Drawings.Tests;
+
+/// <summary>Invented studies of very different shape, on which every drawing has to hold.</summary>
+public static class Scenarios
+{
+    private const double Foot = 0.3048;
+    private const double Cfs = Foot * Foot * Foot;
+
+    private static readonly Lazy<IReadOnlyDictionary<string, StudyResult>> Results = new(() => new Dictionary<string, StudyResult>
+    {
+        ["canal drop"] = CanalDrop(),
+        ["farm creek"] = FarmCreek(),
+        ["district pipeline"] = DistrictPipeline(),
+        ["drop without pipe"] = DropWithoutPipe(),
+        ["flashy stream"] = FlashyStream(),
+        ["overloaded pipe"] = OverloadedPipe(),
+        ["steep shaft"] = SteepShaft(),
+    });
+
+    public static IEnumerable<string> Names => Results.Value.Keys;
+
+    public static StudyResult Get(string name) => Results.Value[name];
+
+    private static StudyResult CanalDrop() => Run(
+        "Alder Bench canal, drop 7",
+        UnitSystem.US,
+        Typed([(0, 196), (0.02, 184), (0.05, 172), (0.10, 161), (0.20, 146), (0.25, 140), (0.30, 133), (0.40, 112), (0.45, 96), (0.50, 74), (0.53, 52), (0.56, 22), (0.58, 0)], Cfs,
+            OperatingSeason.Span(new MonthDay(4, 1), new MonthDay(10, 15)), WaterAllocation.None, 140 * Cfs),
+        Levels(100 * Foot, 81.5 * Foot),
+        [Pipe("steel pipe", 120 * Foot, 66 * 0.0254, "steel-lined", "trash-rack", "entrance-rounded", "bend-22", "bend-22", "valve-butterfly", "draft-tube-exit")],
+        "kaplan");
+
+    private static StudyResult FarmCreek() => Run(
+        "Quail Creek farm",
+        UnitSystem.SI,
+        Recorded(0.018, 0.9, 0.35, Reserve(0.005, 0), null),
+        Direct(60),
+        [Pipe("penstock", 600, 0.2, "hdpe", "trash-rack", "entrance-square", "bend-45", "bend-45", "valve-gate")],
+        null);
+
+    private static StudyResult DistrictPipeline() => Run(
+        "Sage Flat pressure pipeline",
+        UnitSystem.US,
+        Recorded(0.55, 0.6, 0.2, Reserve(0.05, 0.08), 0.6),
+        Levels(1432.6, 1387.1),
+        [
+            Pipe("upper main", 900, 0.9, "concrete-smooth", "trash-rack", "entrance-bell-mouth", "bend-30"),
+            Pipe("middle main", 450, 0.8, "ductile-iron", "contraction-gradual", "bend-22"),
+            Pipe("lower main", 220, 0.7, "steel-new", "contraction-gradual", "valve-butterfly", "meter-magnetic") with { EndElevationM = 1389 },
+        ],
+        null);
+
+    private static StudyResult DropWithoutPipe() => Run(
+        "Mill weir",
+        UnitSystem.SI,
+        Typed([(0.0, 3.4), (0.1, 2.6), (0.3, 2.0), (0.6, 1.2), (0.9, 0.5), (1, 0.3)], 1, OperatingSeason.WholeYear, Reserve(0.3, 0), 2.0),
+        Levels(52.2, 50.0),
+        [],
+        "archimedes-screw");
+
+    private static StudyResult FlashyStream() => Run(
+        "Gully Fork",
+        UnitSystem.SI,
+        Typed([(0, 90), (0.01, 30), (0.05, 8), (0.2, 2.4), (0.5, 0.9), (0.8, 0.35), (0.95, 0.12), (1, 0.05)], 1, OperatingSeason.WholeYear, Percent(0.1), 1.6),
+        Direct(118),
+        [Pipe("penstock", 340, 0.75, "steel-new", "trash-rack", "entrance-bell-mouth", "bend-30", "valve-ball")],
+        null,
+        2);
+
+    // The pipe loses a third of the head at design flow.
+    private static StudyResult OverloadedPipe() => Run(
+        "Old ditch line",
+        UnitSystem.US,
+        Typed([(0, 9), (0.5, 7), (1, 2)], Cfs, OperatingSeason.WholeYear, WaterAllocation.None, 7 * Cfs),
+        Levels(1250 * Foot, 1190 * Foot),
+        [Pipe("riveted pipe", 480 * Foot, 12 * 0.0254, "steel-riveted", "trash-rack", "entrance-re-entrant", "elbow-90-flanged", "valve-gate", "exit")],
+        null);
+
+    // Falls nearly as far as it is long.
+    private static StudyResult SteepShaft() => Run(
+        "Bluff shaft",
+        UnitSystem.SI,
+        Typed([(0, 1.4), (0.5, 1), (1, 0.4)], 1, OperatingSeason.WholeYear, WaterAllocation.None, 1),
+        Levels(140, 98),
+        [Pipe("shaft", 46, 0.8, "steel-new", "trash-rack", "entrance-bell-mouth", "bend-90", "valve-butterfly")],
+        null);
+
+    private static StudyResult Run(string name, UnitSystem units, FlowInput flow, HeadInput head, IReadOnlyList<PipeElement> pipes, string? type, int? unitCount = null) =>
+        Study.Run(
+            new StudyHeader(name, "invented", "", "", "", "", "", units),
+            new AlternativeInput(
+                "as proposed",
+                new SiteInput(0.75, 800, 12, 60),
+                flow,
+                head,
+                new WaterwayInput(pipes, FrictionFormulas.Default, 1.05),
+                new TurbineInput(type is null ? null : TurbineTypes.Find(type), unitCount, null, null),
+                new PowerTrain(1, 0.94, 0.985, 0.99, 0.01, 0, 0.96)));
+
+    private static HeadInput Levels(double headwaterM, double tailwaterM) => new(GrossHead.FromMetres(headwaterM - tailwaterM), headwaterM, tailwaterM, true);
+
+    private static HeadInput Direct(double grossM) => new(GrossHead.FromMetres(grossM), grossM, 0, false);
+
+    private static PipeElement Pipe(string name, double lengthM, double diameterM, string material, params string[] fittings) =>
+        PipeElement.Of(name, lengthM, diameterM, PipeMaterials.Find(material)!, [.. fittings.Select(f => Fitting.Of(FittingKinds.Find(f)!))]);
+
+    private static WaterAllocation Reserve(double reservedM3PerS, double priorM3PerS) => new(ReservedFlow.Constant(reservedM3PerS), priorM3PerS);
+
+    private static WaterAllocation Percent(double ratio) => new(ReservedFlow.PercentOfFlow(ratio), 0);
+
+    private static FlowInput Typed((double P, double Q)[] rows, double unitM3PerS, OperatingSeason season, WaterAllocation allocation, double designFlowM3PerS) =>
+        new(
+            FlowDurationCurve.FromRows([.. rows.Select(r => new CurvePoint(r.P, r.Q * unitM3PerS))], BeyondLastRow.Dry, "rows").Value,
+            false, null, PlottingPositions.Default, season, allocation, true, designFlowM3PerS, "invented");
+
+    // Twelve years of a flow that swells in spring, with a wobble from day to day and from year to year.
+    private static FlowInput Recorded(double middleM3PerS, double swing, double wobble, WaterAllocation allocation, double? designFlowM3PerS)
+    {
+        var first = new DateOnly(2001, 1, 1);
+        var flows = new double[4383];
+        for (var i = 0; i < flows.Length; i++)
+        {
+            var day = first.AddDays(i);
+            var season = Math.Sin((day.DayOfYear - 40) / 365.0 * Math.Tau);
+            var weather = Math.Sin(i * 0.37) + (0.6 * Math.Sin(i * 0.083)) + (0.5 * Math.Cos(day.Year * 2.1));
+            flows[i] = Math.Round(middleM3PerS * Math.Exp((swing * season) + (wobble * weather)), 5);
+        }
+
+        return new FlowInput(null, false, new DailyRecord(first, flows, "invented"), PlottingPositions.Default, OperatingSeason.WholeYear, allocation, true, designFlowM3PerS, "invented");
+    }
+}
