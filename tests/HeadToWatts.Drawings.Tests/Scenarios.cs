@@ -107,7 +107,8 @@ public static class Scenarios
                 head,
                 new WaterwayInput(pipes, FrictionFormulas.Default, 1.05),
                 new TurbineInput(type is null ? null : TurbineTypes.Find(type), unitCount, null, null),
-                new PowerTrain(1, 0.94, 0.985, 0.99, 0.01, 0, 0.96)));
+                new PowerTrain(1, 0.94, 0.985, 0.99, 0.01, 0, 0.96),
+                []));
 
     private static HeadInput Levels(double headwaterM, double tailwaterM) => new(GrossHead.FromMetres(headwaterM - tailwaterM), headwaterM, tailwaterM, true);
 
