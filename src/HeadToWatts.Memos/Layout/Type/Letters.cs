@@ -1,4 +1,5 @@
 using System.Text;
+using System.Text.RegularExpressions;
 using HeadToWatts.Memos.Content;
 
 namespace HeadToWatts.Memos.Layout.Type;
@@ -7,7 +8,7 @@ namespace HeadToWatts.Memos.Layout.Type;
 /// Fits text to the typeface. A character it lacks would be drawn as nothing and nobody would notice: known ones get a stand-in,
 /// the others become a question mark and are reported.
 /// </summary>
-internal static class Letters
+internal static partial class Letters
 {
     private const string Raised = "⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻ⁿ";
     private const string RaisedPlain = "0123456789+−n";
@@ -42,7 +43,7 @@ internal static class Letters
     public static IEnumerable<TextRun> Fit(TextRun run)
     {
         var text = new StringBuilder();
-        var runes = run.Text.EnumerateRunes().ToArray();
+        var runes = Typographic(run.Text).EnumerateRunes().ToArray();
         for (var i = 0; i < runes.Length;)
         {
             var raised = SmallLength(runes, i, Raised);
@@ -75,11 +76,24 @@ internal static class Letters
     }
 
     /// <summary>The text as the typeface can draw it, on one line and at one height.</summary>
-    public static string FitPlain(string text) => string.Concat(text.EnumerateRunes().Select(Drawable));
+    public static string FitPlain(string text) => string.Concat(Typographic(text).EnumerateRunes().Select(Drawable));
 
     /// <summary>The characters of a text for which there is neither a glyph nor a stand-in.</summary>
     public static IEnumerable<Rune> Missing(string text) =>
         text.EnumerateRunes().Where(r => !Typeface.Has(r) && !StandIns.ContainsKey(r.Value) && !IsSmall(r) && !Rune.IsControl(r)).Distinct();
+
+    // Units are written "m3/s" and "degC" on keyboards and in files; print has the proper marks.
+    private static string Typographic(string text)
+    {
+        text = PlainPower().Replace(text, m => m.Value[..^1] + (m.Value[^1] == '2' ? '²' : '³'));
+        return PlainDegree().Replace(text, "°$1");
+    }
+
+    [GeneratedRegex(@"(?<![\p{L}\p{N}_])(?:mm|cm|km|m|ft|in|s)[23](?![\p{L}\p{N}])")]
+    private static partial Regex PlainPower();
+
+    [GeneratedRegex(@"(?<!\p{L})deg([CF])(?!\p{L})")]
+    private static partial Regex PlainDegree();
 
     private static string Drawable(Rune rune)
     {

@@ -1,0 +1,93 @@
+using HeadToWatts.Basis.Units;
+using HeadToWatts.FlowRecords;
+using HeadToWatts.Memos.Content;
+
+namespace HeadToWatts.Memos.Sections;
+
+/// <summary>What was put in.</summary>
+internal static class InputsAppendix
+{
+    private const int RowsShown = 60;
+
+    public static void Write(MemoContext memo)
+    {
+        var body = memo.Body;
+        var input = memo.Result.Input;
+        var show = memo.Show;
+        body.Appendix("Inputs as given", "inputs", onNewPage: true);
+        var rows = new List<TableRow>
+        {
+            Row("Alternative", MemoContext.OrElse(input.Name, "not named")),
+            Row("Latitude", UnitDisplay.Number(input.Site.LatitudeRad * 180 / Math.PI, 4) + "°"),
+            Row("Elevation", show.Length(input.Site.ElevationM)),
+            Row("Water temperature", show.Temperature(input.Site.WaterTemperatureDegC)),
+            Row("Grid frequency", UnitDisplay.Number(input.Site.FrequencyHz) + " Hz"),
+        };
+        if (input.Head.IsFromLevels)
+        {
+            rows.Add(Row("Headwater level", show.Length(input.Head.HeadwaterM)));
+            rows.Add(Row("Tailwater level", show.Length(input.Head.TailwaterM)));
+        }
+        else
+        {
+            rows.Add(Row("Gross head", show.Length(input.Head.Gross.Metres)));
+        }
+
+        var flow = input.Flow;
+        rows.Add(Row("Flow", TitleSection.Period(memo)));
+        if (flow.Record is not null)
+            rows.Add(Row("Plotting position", flow.PlottingPosition.Name));
+        rows.Add(Row("Season of operation", flow.Season.IsWholeYear ? "all year" : flow.Season.Describe()));
+        rows.Add(Row("Prior deliveries", show.Flow(flow.Allocation.PriorDeliveriesM3PerS)));
+        rows.Add(Row("Reserved flow", flow.Allocation.Reserved.Kind switch
+        {
+            ReservedFlowKind.Constant => show.Flow(flow.Allocation.Reserved.FlowM3PerS),
+            ReservedFlowKind.PercentOfFlow => MemoContext.Percent(flow.Allocation.Reserved.Ratio) + " of the flow arriving",
+            _ => flow.ReservedFlowIsStated ? "none" : "not stated",
+        }));
+        rows.Add(Row("Design flow", flow.DesignFlowM3PerS is { } design ? show.Flow(design) : "to be suggested"));
+        rows.Add(Row("Friction formula", input.Waterway.Formula.Name));
+        rows.Add(Row("Kinetic energy coefficient α", UnitDisplay.Number(input.Waterway.KineticEnergyCoefficient)));
+        rows.Add(Row("Turbine type", input.Turbine.Type?.Name ?? "to be suggested"));
+        rows.Add(Row("Number of units", input.Turbine.UnitCount is { } units ? MemoContext.Count(units) : "to be suggested"));
+        if (input.Turbine.LeastFlowRatio is { } least)
+            rows.Add(Row("Least flow of a unit", MemoContext.Percent(least) + " of its full flow"));
+        rows.Add(Row("Efficiency", input.Turbine.MakersCurve is null ? "typical of the type" : "manufacturer's table, printed in the section on turbines"));
+        var train = input.Train;
+        rows.Add(Row("Gear or belt; generator; transformer; line", $"{MemoContext.Percent(train.DriveEfficiency)}; {MemoContext.Percent(train.GeneratorEfficiency)}; {MemoContext.Percent(train.TransformerEfficiency)}; {MemoContext.Percent(train.LineEfficiency)}"));
+        rows.Add(Row("Own use", $"{MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}"));
+        rows.Add(Row("Availability", MemoContext.Percent(train.Availability)));
+        body.Table("tab-inputs", "Inputs.", [new("Input", Share: 1), new("Value", Share: 2)], rows);
+        Pipes(memo);
+        Curve(memo);
+    }
+
+    private static void Pipes(MemoContext memo)
+    {
+        var pipes = memo.Result.Input.Waterway.Elements;
+        if (pipes.Count == 0)
+            return;
+        var show = memo.Show;
+        memo.Body.Table("tab-pipes", "Pipe elements.",
+            [
+                new("Element"), new(MemoContext.Head("Length", show.LengthUnit), ColumnAlign.Right, 0.3), new(MemoContext.Head("Inside diameter", show.DiameterUnit), ColumnAlign.Right, 0.3),
+                new("Material"), new("Roughness", ColumnAlign.Right, 0.3), new("Fittings", Share: 2),
+            ],
+            [.. pipes.Select(p => new TableRow([
+                p.Name, memo.Length(p.LengthM), UnitDisplay.In(p.InsideDiameterM, show.DiameterUnit), p.Material.Name, show.Roughness(p.RoughnessM),
+                p.Fittings.Count == 0 ? "none" : string.Join(", ", p.Fittings.Select(f => $"{(f.Count > 1 ? f.Count + " × " : "")}{f.Name} (K = {UnitDisplay.Number(f.LossCoefficient)})")),
+            ]))]);
+    }
+
+    private static void Curve(MemoContext memo)
+    {
+        if (memo.Result.Input.Flow.TypedCurve is not { } curve)
+            return;
+        var rows = curve.Rows.Take(RowsShown).Select(r => new TableRow([UnitDisplay.Number(r.Exceedance * 100, 4), memo.Flow(r.FlowM3PerS)]));
+        memo.Body.Table("tab-curve", "Rows of the flow-duration curve.",
+            [new("Exceeded, %", ColumnAlign.Right, 0), new(MemoContext.Head("Flow", memo.Show.FlowUnit), ColumnAlign.Right, 0)], [.. rows],
+            curve.Rows.Count > RowsShown ? $"The first {RowsShown} of {curve.Rows.Count} rows." : "");
+    }
+
+    private static TableRow Row(string name, string value) => new([name, value]);
+}

@@ -1,0 +1,36 @@
+using HeadToWatts.Memos.Content;
+using HeadToWatts.Studies.Workings;
+
+namespace HeadToWatts.Memos.Sections;
+
+/// <summary>How each number came about: the same text as on the screen.</summary>
+internal static class WorkingsAppendix
+{
+    public static void Write(MemoContext memo)
+    {
+        var body = memo.Body;
+        body.Appendix("Workings", "workings");
+        body.Say("Each number with its formula in symbols, the same with this study's numbers, the result, and where the formula comes from. Numbers are shown rounded; they were reckoned in full.");
+        foreach (var stage in WorkingsList.For(memo.Result, memo.Show).GroupBy(w => w.Stage))
+        {
+            body.Part(stage.Key.ToString(), "workings-" + stage.Key);
+            foreach (var working in stage)
+                One(memo, working);
+        }
+    }
+
+    private static void One(MemoContext memo, Working working)
+    {
+        var body = memo.Body;
+        body.Say(RichText.Bold(working.Title), keepWithNext: true);
+        var cites = working.Methods.DistinctBy(m => m.Id).Select(m => body.Cite(m.Source, m.Locator)).DistinctBy(c => c.Plain).ToArray();
+        body.Add(new FormulaBlock(RichText.Formula(working.Formula), cites.Length == 0 ? RichText.Empty : cites[0]));
+        body.Add(new FormulaBlock(RichText.Of("= " + working.Numbers), RichText.Empty));
+        body.Add(new FormulaBlock(RichText.Of("= ") + RichText.Bold(working.Result), RichText.Empty));
+        var note = RichText.Of(working.Note);
+        if (cites.Length > 1)
+            note += (working.Note.Length > 0 ? " Also " : "Also ") + RichText.Join("; ", cites.Skip(1)) + ".";
+        if (!note.IsEmpty)
+            body.Say(note, ParagraphKind.Note);
+    }
+}
