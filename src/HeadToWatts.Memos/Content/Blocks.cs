@@ -25,6 +25,9 @@ public enum ParagraphKind
 
     /// <summary>A remark in smaller, softer type.</summary>
     Note,
+
+    /// <summary>A title within a part, too small for a number.</summary>
+    Title,
 }
 
 /// <summary>A paragraph.</summary>
@@ -36,7 +39,9 @@ public sealed record ParagraphBlock(RichText Text, ParagraphKind Kind = Paragrap
 /// <summary>A formula on a line of its own.</summary>
 /// <param name="Formula">The formula.</param>
 /// <param name="Remark">Softer text at the right edge: a number or where it comes from.</param>
-public sealed record FormulaBlock(RichText Formula, RichText Remark) : Block;
+/// <param name="ContinuesAbove">True for a further line of the formula above it.</param>
+/// <param name="KeepWithNext">True to keep it on the page of what follows.</param>
+public sealed record FormulaBlock(RichText Formula, RichText Remark, bool ContinuesAbove = false, bool KeepWithNext = false) : Block;
 
 /// <summary>A list.</summary>
 /// <param name="Items">Its items.</param>

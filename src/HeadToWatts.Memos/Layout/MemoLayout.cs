@@ -19,11 +19,19 @@ internal sealed record MemoLayout(MemoDocument Document, double WidthPt, double 
         var (width, height) = Look.Size(document.Paper);
         IReadOnlyDictionary<string, Place> anchors = new Dictionary<string, Place>(StringComparer.Ordinal);
         IReadOnlyList<PageLayout> pages = [];
+        var set = new Dictionary<Block, List<Strip>>(ReferenceEqualityComparer.Instance);
         for (var pass = 0; pass < 2; pass++)
         {
             var known = anchors;
             var setting = new Setting(Look.MarginXPt, width - 2 * Look.MarginXPt, a => known.TryGetValue(a, out var place) ? place.Page : 0);
-            var strips = document.Blocks.SelectMany(b => Set(setting, document, b)).ToList();
+            // Only the contents depend on the pages; the rest is set once.
+            foreach (var block in document.Blocks)
+            {
+                if (pass == 0 || block is ContentsBlock)
+                    set[block] = Set(setting, document, block);
+            }
+
+            var strips = document.Blocks.SelectMany(b => set[b]).ToList();
             pages = Paginator.Paginate(strips, Look.FirstBodyTopPt, Look.BodyTopPt, height - Look.BodyBottomFromBottomPt);
             anchors = Find(pages);
         }

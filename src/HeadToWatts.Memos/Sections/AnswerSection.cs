@@ -81,7 +81,7 @@ internal static class AnswerSection
     {
         var turbine = memo.Result.Turbine;
         var inside = turbine.Chosen.Fit.IsInside ? "inside the range such machines are built for" : "outside the range such machines are usually built for";
-        return RichText.Bold("Turbine. ") + MemoContext.Sentence($"{Machines(memo)}{(turbine.TypeIsSuggested ? ", suggested" : ", as given")}: {inside}. {MemoContext.Sentence(turbine.Chosen.Type.Uses)}");
+        return RichText.Bold("Turbine. ") + MemoContext.Sentence($"{Machines(memo)}{(turbine.TypeIsSuggested ? ", suggested" : ", as given")}: {inside}. Usual place: {char.ToLowerInvariant(turbine.Chosen.Type.Uses[0])}{turbine.Chosen.Type.Uses[1..]}");
     }
 
     private static RichText NextStep(MemoContext memo)
@@ -97,7 +97,7 @@ internal static class AnswerSection
     {
         var own = memo.Cautions
             .Where(c => c.Severity != Severity.Note)
-            .Select(c => RichText.Bold(c.Title + ". ") + FirstSentence(c.Text));
+            .Select(c => RichText.Bold(c.Title + ". ") + MemoContext.Sentence(FirstSentence(c.Text)));
         var standing = Standing.Select(s => RichText.Bold(s.Title + ": ") + s.Text + ".");
         return own.Concat(standing).Take(3);
     }

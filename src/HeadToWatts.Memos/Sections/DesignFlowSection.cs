@@ -19,9 +19,9 @@ internal static class DesignFlowSection
         body.Say(flow.DesignFlowIsSuggested
             ? $"A design flow of {show.Flow(flow.DesignFlowM3PerS)} is suggested: {DesignFlowWords.Reason(memo.Result, show)}. Cost is not weighed; a size is settled by net benefit in a feasibility study, not by the largest power."
             : $"The design flow of {show.Flow(flow.DesignFlowM3PerS)} was given by the author. By energy alone this project would suggest {show.Flow(flow.Scan.SuggestedM3PerS)}: {DesignFlowWords.Reason(memo.Result, show)}.");
-        if (flow.Scan.Points.Count < 2)
+        if (Figures.DesignFlow(memo) is not { } drawing)
             return;
-        body.Figure("fig-design-flow", Figures.DesignFlow(memo), "Energy in a mean year and plant factor against the design flow.");
+        body.Figure("fig-design-flow", drawing, "Energy in a mean year and plant factor against the design flow.");
         var points = Spread(flow.Scan.Points);
         body.Table("tab-scan", "What other sizes would give.",
             [

@@ -59,7 +59,8 @@ internal static class EnergySection
         var body = memo.Body;
         body.Part("By month", "months");
         body.Say($"The record was also run day by day. The twelve months add up to {UnitDisplay.Energy(sum)}; the duration curve gives {UnitDisplay.Energy(memo.Result.Energy.Annual.AnnualEnergyKwh)}. The two differ a little where months have different numbers of missing days.");
-        body.Figure("fig-months", Figures.Months(memo), "Energy by month, mean of the record.");
+        if (Figures.Months(memo) is { } drawing)
+            body.Figure("fig-months", drawing, "Energy by month, mean of the record.");
         var names = CultureInfo.InvariantCulture.DateTimeFormat;
         var step = RoundToSum.StepFor(sum / 1000, 4);
         var energies = RoundToSum.Of([.. days.Months.Select(m => m.MeanEnergyKwh / 1000)], step);

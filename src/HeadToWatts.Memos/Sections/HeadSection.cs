@@ -26,8 +26,8 @@ internal static class HeadSection
         var formula = result.Input.Waterway.Formula;
         body.Say(RichText.Of($"Friction is by {formula.Name} ") + body.Cite(formula.Method.Source, formula.Method.Locator) + ", fittings by their loss coefficients K. " + RichText.See("tab-losses") + " shows each.");
         Losses(memo, losses);
-        if (losses.Elements.Sum(e => 1 + e.Fittings.Count) > 1)
-            body.Figure("fig-losses", Figures.Losses(memo), "Head lost in each element and fitting at the design flow.");
+        if (losses.Elements.Sum(e => 1 + e.Fittings.Count) > 1 && Figures.Losses(memo) is { } drawing)
+            body.Figure("fig-losses", drawing, "Head lost in each element and fitting at the design flow.");
         Velocities(memo, losses);
         if (result.Waterway.Surge is { } surge)
             Pressures(memo, surge);

@@ -43,6 +43,8 @@ internal sealed class MemoContext(StudyResult result, UnitDisplay show)
     /// <summary>Name and unit of a column, as "Flow, cfs".</summary>
     public static RichText Head(string name, UnitOfMeasure unit) => RichText.Of(name + ", " + unit.Symbol);
 
+    public static string Capital(string text) => text.Length == 0 ? text : char.ToUpperInvariant(text[0]) + text[1..];
+
     /// <summary>A sentence that begins with a capital and ends with a full stop.</summary>
     public static string Sentence(string text)
     {

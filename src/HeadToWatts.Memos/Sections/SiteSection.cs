@@ -20,7 +20,7 @@ internal static class SiteSection
         var way = pipes.Count == 0
             ? "The machine stands at the drop, without a pipe before it."
             : pipes.Count == 1
-                ? $"{pipes[0].Name}, {show.Length(pipes[0].LengthM)} of {Named(pipes[0].Material.Name)} with an inside diameter of {show.Diameter(pipes[0].InsideDiameterM)}, leads to the machine."
+                ? $"{MemoContext.Capital(pipes[0].Name)}, {show.Length(pipes[0].LengthM)} of {Named(pipes[0].Material.Name)} with an inside diameter of {show.Diameter(pipes[0].InsideDiameterM)}, leads to the machine."
                 : $"{MemoContext.Count(pipes.Count)} pipe elements, {show.Length(pipes.Sum(p => p.LengthM))} together, lead to the machine.";
         body.Say(fall + " " + way + $" At the design flow of {show.Flow(result.Flow.DesignFlowM3PerS)} the losses leave {show.Length(result.Head.NetHeadAtDesignM)} net. " + RichText.See("fig-section") + " shows the scheme to scale in height, with the energy and hydraulic grade lines.");
         body.Figure("fig-section", Figures.Section(memo), "Section through the scheme at the design flow, with water levels, pipe, machine, energy and hydraulic grade lines and the heads.");

@@ -12,7 +12,7 @@ internal static class TitleSection
     {
         var header = memo.Result.Header;
         var alternative = memo.Result.Input.Name;
-        var subtitle = string.Join(", ", new[] { header.Place, alternative }.Where(t => !string.IsNullOrWhiteSpace(t)));
+        var subtitle = string.Join(". ", new[] { header.Place, alternative }.Where(t => !string.IsNullOrWhiteSpace(t)).Select(t => t.Trim().TrimEnd('.')));
         memo.Body.Add(new TitleBlock(
             "Hydropower pre-feasibility memo",
             MemoContext.OrElse(header.Name, "Unnamed site"),

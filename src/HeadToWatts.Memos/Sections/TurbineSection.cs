@@ -18,7 +18,7 @@ internal static class TurbineSection
         var show = memo.Show;
         body.Section("Turbine options", "turbine");
         var who = turbine.TypeIsSuggested ? "is suggested" : "was chosen by the author";
-        body.Say($"{chosen.Type.Name} with {MemoContext.Count(turbine.Units.UnitCount, "unit", "units")} {who}. Types whose usual range of head and flow holds the design point come first, by the energy they would give on this curve; the others follow by how far outside they lie. Cost is not weighed.");
+        body.Say($"{MemoContext.Capital(chosen.Type.Name)} with {MemoContext.Count(turbine.Units.UnitCount, "unit", "units")} {who}. Types whose usual range of head and flow holds the design point come first, by the energy they would give on this curve; the others follow by how far outside they lie. Cost is not weighed.");
         body.Table("tab-turbines", "Turbine types in order, each with the number of units that suits it best.",
             [
                 new("Type", Share: 2), new("Units", ColumnAlign.Right, 0), new("Range", Share: 1), new("Energy, MWh a year", ColumnAlign.Right, 0.5),
@@ -27,7 +27,7 @@ internal static class TurbineSection
             ],
             [.. turbine.Ranking.Select(c => new TableRow(
             [
-                c.Type.Name, MemoContext.Count(c.UnitCount), c.Fit.IsInside ? "inside" : "outside",
+                MemoContext.Capital(c.Type.Name), MemoContext.Count(c.UnitCount), c.Fit.IsInside ? "inside" : "outside",
                 UnitDisplay.Number(c.AnnualEnergyKwh / 1000), MemoContext.PercentColumn(c.PeakEfficiency), MemoContext.PercentColumn(c.EfficiencyAtHalfLoad),
                 memo.Flow(c.LeastFlowM3PerS), MemoContext.PercentColumn(c.ShareOfYearBelowLeast),
             ], c.Type.Id == chosen.Type.Id ? RowKind.Chosen : RowKind.Plain))],
@@ -37,7 +37,7 @@ internal static class TurbineSection
         if (explained.All(c => c.Type.Id != chosen.Type.Id))
             explained.Add(chosen);
         foreach (var candidate in explained)
-            body.Say(RichText.Bold(candidate.Type.Name + ". ") + string.Join(" ", TurbineWords.Reasons(candidate, show)) + " " + RichText.Italic("Against it: ") + candidate.Type.Limits);
+            body.Say(RichText.Bold(MemoContext.Capital(candidate.Type.Name) + ". ") + string.Join(" ", TurbineWords.Reasons(candidate, show)) + " " + RichText.Italic("Against it: ") + candidate.Type.Limits);
         Efficiency(memo, chosen.Type);
     }
 

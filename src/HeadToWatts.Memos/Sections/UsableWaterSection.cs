@@ -28,7 +28,7 @@ internal static class UsableWaterSection
         var season = input.Season.IsWholeYear ? " The plant may run all year." : $" The plant may run from {input.Season.Describe()}: {MemoContext.Count(input.Season.DaysPerYear, "day", "days")} a year.";
         body.Say(rights + prior + season + " What is reserved comes off before the turbine's limit, never after.");
         body.Say($"The mean flow arriving over the year is {show.Flow(result.Flow.MeanFlowM3PerS)}, of which {show.Flow(result.Flow.MeanUsableFlowM3PerS)} may be used; there is some to use in {MemoContext.Percent(result.Flow.WetShareOfYear)} of the year. The design flow of {show.Flow(result.Flow.DesignFlowM3PerS)} is reached in {MemoContext.Percent(result.Flow.DesignFlowExceedance)} of the year. " + RichText.See("fig-fdc") + " and " + RichText.See("tab-exceedance") + " show the curve." + Position(memo));
-        body.Figure("fig-fdc", Figures.FlowDuration(memo), "Flow-duration curve of the year: what goes through the turbines, what is spilled, reserved, and too little to run on.");
+        body.Figure("fig-fdc", Figures.FlowDuration(memo), "Flow-duration curve of the year: what goes through the turbines, what is spilled, what is too little to run on, and on top what is reserved or delivered first.");
         body.Table("tab-exceedance", "Flow exceeded for a share of the year.",
             [
                 new("Exceeded, % of the year", ColumnAlign.Right),

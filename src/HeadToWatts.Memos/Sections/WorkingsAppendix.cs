@@ -19,14 +19,20 @@ internal static class WorkingsAppendix
         }
     }
 
+    // Some workings are words, not sums; an equals sign before words is wrong.
+    private static RichText Equals(string text) => Sign(text) + text;
+
+    private static string Sign(string text) => text.Length > 0 && (char.IsDigit(text[0]) || text[0] is '(' or '−') ? "= " : "";
+
     private static void One(MemoContext memo, Working working)
     {
         var body = memo.Body;
-        body.Say(RichText.Bold(working.Title), keepWithNext: true);
+        body.Say(RichText.Bold(working.Title), ParagraphKind.Title, keepWithNext: true);
         var cites = working.Methods.DistinctBy(m => m.Id).Select(m => body.Cite(m.Source, m.Locator)).DistinctBy(c => c.Plain).ToArray();
-        body.Add(new FormulaBlock(RichText.Formula(working.Formula), cites.Length == 0 ? RichText.Empty : cites[0]));
-        body.Add(new FormulaBlock(RichText.Of("= " + working.Numbers), RichText.Empty));
-        body.Add(new FormulaBlock(RichText.Of("= ") + RichText.Bold(working.Result), RichText.Empty));
+        body.Add(new FormulaBlock(RichText.Formula(working.Formula), cites.Length == 0 ? RichText.Empty : cites[0], KeepWithNext: true));
+        body.Add(new FormulaBlock(Equals(working.Numbers), RichText.Empty, ContinuesAbove: true, KeepWithNext: true));
+        var ends = working.Note.Length == 0 && cites.Length < 2;
+        body.Add(new FormulaBlock(RichText.Of(Sign(working.Result)) + RichText.Bold(working.Result), RichText.Empty, ContinuesAbove: true, KeepWithNext: !ends));
         var note = RichText.Of(working.Note);
         if (cites.Length > 1)
             note += (working.Note.Length > 0 ? " Also " : "Also ") + RichText.Join("; ", cites.Skip(1)) + ".";

@@ -13,7 +13,7 @@ internal static class TableSetter
     private const int LinesInARow = 36;
 
     // A table up to this height is kept in one piece.
-    private const double SmallTablePt = 250;
+    private const double SmallTablePt = 330;
 
     public static List<Strip> Table(Setting setting, TableBlock block)
     {

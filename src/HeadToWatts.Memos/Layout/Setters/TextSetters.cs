@@ -42,7 +42,7 @@ internal static class TextSetters
             _ => (Look.BodyPt, Look.BodyLeadingPt, Look.Ink),
         };
         var strips = setting.Lines(block.Text, size, leading, colour);
-        strips[0].SpaceBeforePt = block.Kind == ParagraphKind.Note ? 5 : 7;
+        strips[0].SpaceBeforePt = block.Kind switch { ParagraphKind.Note => 5, ParagraphKind.Title => 13, _ => 7 };
         strips[^1].KeepWithNext = block.KeepWithNext;
         Setting.Tag(strips, "P");
         return strips;
@@ -58,7 +58,10 @@ internal static class TextSetters
         var strips = setting.Lines(block.Formula, size, leading, Look.Ink, indent, room);
         if (!block.Remark.IsEmpty)
             Setting.Put(strips[^1].Ops, remark, setting.LeftPt + setting.WidthPt - remark.WidthPt, Setting.Baseline(leading, size), Look.Soft);
-        strips[0].SpaceBeforePt = 6;
+        strips[0].SpaceBeforePt = block.ContinuesAbove ? 0 : 4;
+        foreach (var strip in strips.SkipLast(1))
+            strip.KeepWithNext = true;
+        strips[^1].KeepWithNext = block.KeepWithNext;
         Setting.Tag(strips, "P");
         return strips;
     }

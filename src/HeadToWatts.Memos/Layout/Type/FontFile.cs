@@ -8,7 +8,8 @@ namespace HeadToWatts.Memos.Layout.Type;
 /// </summary>
 internal sealed class FontFile
 {
-    private readonly Dictionary<int, int> _glyphs = [];
+    // By code point: format 4 has no characters beyond the first plane.
+    private readonly ushort[] _glyphs = new ushort[0x10000];
     private readonly double[] _advances;
 
     private FontFile(byte[] data)
@@ -42,10 +43,10 @@ internal sealed class FontFile
     public static FontFile Read(byte[] data) => new(data);
 
     /// <summary>True when the face can draw the character.</summary>
-    public bool Has(int codePoint) => _glyphs.ContainsKey(codePoint);
+    public bool Has(int codePoint) => codePoint is >= 0 and < 0x10000 && _glyphs[codePoint] != 0;
 
     /// <summary>Width of a character in ems; 0 when the face lacks it.</summary>
-    public double AdvancePerEm(int codePoint) => _glyphs.TryGetValue(codePoint, out var glyph) ? _advances[glyph] : 0;
+    public double AdvancePerEm(int codePoint) => Has(codePoint) ? _advances[_glyphs[codePoint]] : 0;
 
     private static Dictionary<string, int> Tables(byte[] data)
     {
@@ -60,7 +61,7 @@ internal sealed class FontFile
         return tables;
     }
 
-    // Only the Unicode tables of formats 4 and 12 matter for a TrueType text face.
+    // The table of format 4 holds every character of the first plane, which is all that a text face of this kind has.
     private void ReadCharacters(byte[] data, int cmap)
     {
         var count = U16(data, cmap + 2);
@@ -90,8 +91,7 @@ internal sealed class FontFile
                 var glyph = offset == 0
                     ? (c + delta) & 0xffff
                     : U16(data, offsets + 2 * s + offset + 2 * (c - start)) is var g && g != 0 ? (g + delta) & 0xffff : 0;
-                if (glyph != 0)
-                    _glyphs[c] = glyph;
+                _glyphs[c] = (ushort)glyph;
             }
         }
     }

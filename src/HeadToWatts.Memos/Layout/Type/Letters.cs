@@ -85,12 +85,19 @@ internal static partial class Letters
     // Units are written "m3/s" and "degC" on keyboards and in files; print has the proper marks.
     private static string Typographic(string text)
     {
+        if (!text.Any(char.IsAsciiDigit) && !text.Contains("deg", StringComparison.Ordinal))
+            return text;
         text = PlainPower().Replace(text, m => m.Value[..^1] + (m.Value[^1] == '2' ? '²' : '³'));
-        return PlainDegree().Replace(text, "°$1");
+        text = PlainDegree().Replace(text, "°$1");
+        // A number is not parted from its unit at the end of a line.
+        return BeforeUnit().Replace(text, "\u00a0");
     }
 
     [GeneratedRegex(@"(?<![\p{L}\p{N}_])(?:mm|cm|km|m|ft|in|s)[23](?![\p{L}\p{N}])")]
     private static partial Regex PlainPower();
+
+    [GeneratedRegex(@"(?<=\d) (?=(?:%|kW|W|MWh|kWh|cfs|gpm|ft|in|mm|m|psi|kPa|Hz|rpm|h|s|acre-ft|L/s|°[CF]|lbf|kN|N|kg|MW|km|mi|days?|years?)(?![\p{L}\p{N}]))")]
+    private static partial Regex BeforeUnit();
 
     [GeneratedRegex(@"(?<!\p{L})deg([CF])(?!\p{L})")]
     private static partial Regex PlainDegree();

@@ -1,0 +1,24 @@
+using HeadToWatts.Drawings;
+using HeadToWatts.Drawings.Canvas;
+
+namespace HeadToWatts.Memos.Sections;
+
+/// <summary>The figures of the memo: the same drawings as on the screen, at the size of the page. Null where a study has nothing to draw.</summary>
+internal static class Figures
+{
+    private static readonly DrawingSize Size = DrawingSize.MemoPage;
+
+    public static Drawing Section(MemoContext memo) => SchemeSection.Draw(memo.Result, memo.Show, Size);
+
+    public static Drawing FlowDuration(MemoContext memo) => FlowDurationChart.Draw(memo.Result, memo.Show, Size);
+
+    public static Drawing Envelopes(MemoContext memo) => EnvelopeChart.Draw(memo.Result, memo.Show, Size with { Height = 290 });
+
+    public static Drawing? DesignFlow(MemoContext memo) => DesignFlowChart.Draw(memo.Result, memo.Show, Size);
+
+    public static Drawing Power(MemoContext memo) => PowerChart.Draw(memo.Result, memo.Show, Size);
+
+    public static Drawing? Losses(MemoContext memo) => LossShareChart.Draw(memo.Result, memo.Show, Size);
+
+    public static Drawing? Months(MemoContext memo) => MonthsChart.Draw(memo.Result, Size with { Height = 190 });
+}
