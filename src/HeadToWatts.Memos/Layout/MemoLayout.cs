@@ -42,7 +42,7 @@ internal sealed record MemoLayout(MemoDocument Document, double WidthPt, double 
     private static List<Strip> Set(Setting setting, MemoDocument document, Block block) => block switch
     {
         TitleBlock b => FrontSetters.Title(setting, b),
-        ContentsBlock => FrontSetters.Contents(setting, document.Blocks.OfType<HeadingBlock>().Where(h => h.InContents)),
+        ContentsBlock => FrontSetters.Contents(setting, [.. document.Blocks.OfType<HeadingBlock>().Where(h => h.InContents)]),
         HeadingBlock b => TextSetters.Heading(setting, b),
         ParagraphBlock b => TextSetters.Paragraph(setting, b),
         FormulaBlock b => TextSetters.Formula(setting, b),
@@ -75,9 +75,10 @@ internal sealed record MemoLayout(MemoDocument Document, double WidthPt, double 
         var ops = new List<Op>();
         if (page.Number > 1)
         {
-            var right = Typeface.WidthPt(document.HeaderRight, Face.Regular, Look.NotePt);
-            Decorate(ops, Cut(document.HeaderLeft, inner - right - 20), left, Look.HeaderBaselinePt);
-            Decorate(ops, document.HeaderRight, left + inner - right, Look.HeaderBaselinePt);
+            var revision = Letters.Cut(document.HeaderRight, Face.Regular, Look.NotePt, inner / 3);
+            var right = Typeface.WidthPt(revision, Face.Regular, Look.NotePt);
+            Decorate(ops, Letters.Cut(document.HeaderLeft, Face.Regular, Look.NotePt, inner - right - 20), left, Look.HeaderBaselinePt);
+            Decorate(ops, revision, left + inner - right, Look.HeaderBaselinePt);
             ops.Add(new RuleOp(left, Look.HeaderRulePt, inner, 0.6, Look.Hairline));
         }
 
@@ -85,7 +86,7 @@ internal sealed record MemoLayout(MemoDocument Document, double WidthPt, double 
         var number = string.Create(CultureInfo.InvariantCulture, $"Page {page.Number} of {count}");
         var numberWidth = Typeface.WidthPt(number, Face.Regular, Look.NotePt);
         ops.Add(new RuleOp(left, height - Look.FooterRuleFromBottomPt, inner, 0.6, Look.Hairline));
-        Decorate(ops, Cut(document.FooterLeft, inner - numberWidth - 20), left, height - Look.FooterBaselineFromBottomPt);
+        Decorate(ops, Letters.Cut(document.FooterLeft, Face.Regular, Look.NotePt, inner - numberWidth - 20), left, height - Look.FooterBaselineFromBottomPt);
         Decorate(ops, number, left + inner - numberWidth, height - Look.FooterBaselineFromBottomPt);
         return page with { Ops = ops };
     }
@@ -94,15 +95,5 @@ internal sealed record MemoLayout(MemoDocument Document, double WidthPt, double 
     {
         if (text.Length > 0)
             ops.Add(new TextOp(x, y, Letters.FitPlain(text), Face.Regular, Look.NotePt, Look.Soft, Typeface.WidthPt(Letters.FitPlain(text), Face.Regular, Look.NotePt), Decoration: true));
-    }
-
-    private static string Cut(string text, double widthPt)
-    {
-        if (Typeface.WidthPt(text, Face.Regular, Look.NotePt) <= widthPt)
-            return text;
-        var cut = text;
-        while (cut.Length > 1 && Typeface.WidthPt(cut + "…", Face.Regular, Look.NotePt) > widthPt)
-            cut = cut[..^1];
-        return cut.TrimEnd() + "…";
     }
 }

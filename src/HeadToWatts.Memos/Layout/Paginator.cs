@@ -5,7 +5,7 @@ internal sealed record PageLayout(int Number, IReadOnlyList<Op> Ops);
 
 /// <summary>
 /// Puts strips on pages. Strips that belong together stay together; a figure that does not fit waits for the next page while the
-/// text goes on, but never past the heading of the next section.
+/// text goes on, but never past a heading that begins a page.
 /// </summary>
 internal sealed class Paginator
 {
@@ -43,12 +43,8 @@ internal sealed class Paginator
             var group = strips.Skip(i).Take(end - i + 1).ToList();
             i = end + 1;
             // A heading keeps its first lines, not the picture after them.
-            if (group[0].NewPage && !_atTop)
-                PlaceWaiting(force: true);
-            else if (group[0].EndsFloats)
-                PlaceWaiting(force: true);
-            else
-                PlaceWaiting(force: false);
+            // A figure that waits may stand in the section after its own, but not in an appendix.
+            PlaceWaiting(force: group[0].NewPage && !_atTop);
             if (group[0].NewPage && !_atTop)
                 NewPage();
             if (group is [{ Floats: true }] && (_waiting.Count > 0 || !Fits(group)))

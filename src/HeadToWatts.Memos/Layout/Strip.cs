@@ -17,9 +17,6 @@ internal sealed class Strip
     /// <summary>True for a figure that may move to the top of the next page while the text goes on.</summary>
     public bool Floats { get; set; }
 
-    /// <summary>True for the heading of a section: figures that wait are placed before it.</summary>
-    public bool EndsFloats { get; set; }
-
     /// <summary>Drawn above it when it begins a page: the head of a table.</summary>
     public Strip? Repeat { get; set; }
 

@@ -25,8 +25,8 @@ internal static class InputsAppendix
         };
         if (input.Head.IsFromLevels)
         {
-            rows.Add(Row("Headwater level", show.Length(input.Head.HeadwaterM)));
-            rows.Add(Row("Tailwater level", show.Length(input.Head.TailwaterM)));
+            rows.Add(Row("Headwater level", memo.Level(input.Head.HeadwaterM)));
+            rows.Add(Row("Tailwater level", memo.Level(input.Head.TailwaterM)));
         }
         else
         {

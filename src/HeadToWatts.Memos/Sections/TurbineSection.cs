@@ -28,7 +28,7 @@ internal static class TurbineSection
             [.. turbine.Ranking.Select(c => new TableRow(
             [
                 MemoContext.Capital(c.Type.Name), MemoContext.Count(c.UnitCount), c.Fit.IsInside ? "inside" : "outside",
-                UnitDisplay.Number(c.AnnualEnergyKwh / 1000), MemoContext.PercentColumn(c.PeakEfficiency), MemoContext.PercentColumn(c.EfficiencyAtHalfLoad),
+                UnitDisplay.Number(c.AnnualEnergyKwh / 1000), MemoContext.PercentColumn(c.PeakEfficiency), c.EfficiencyAtHalfLoad > 0 ? MemoContext.PercentColumn(c.EfficiencyAtHalfLoad) : "stands",
                 memo.Flow(c.LeastFlowM3PerS), MemoContext.PercentColumn(c.ShareOfYearBelowLeast),
             ], c.Type.Id == chosen.Type.Id ? RowKind.Chosen : RowKind.Plain))],
             "Energy compared on 800 equal shares of the year; the energy reported for the plant uses the full integral.");

@@ -6,7 +6,7 @@ namespace HeadToWatts.Memos.Sections;
 /// <summary>The flow-duration curve and the water that may be used.</summary>
 internal static class UsableWaterSection
 {
-    private static readonly double[] Exceedances = [0.0, 0.05, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 0.95, 1.0];
+    private static readonly double[] Exceedances = [0.05, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 0.95];
 
     public static void Write(MemoContext memo)
     {

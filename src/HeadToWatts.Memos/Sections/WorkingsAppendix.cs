@@ -1,10 +1,11 @@
+using System.Text.RegularExpressions;
 using HeadToWatts.Memos.Content;
 using HeadToWatts.Studies.Workings;
 
 namespace HeadToWatts.Memos.Sections;
 
 /// <summary>How each number came about: the same text as on the screen.</summary>
-internal static class WorkingsAppendix
+internal static partial class WorkingsAppendix
 {
     public static void Write(MemoContext memo)
     {
@@ -20,7 +21,23 @@ internal static class WorkingsAppendix
     }
 
     // Some workings are words, not sums; an equals sign before words is wrong.
-    private static RichText Equals(string text) => Sign(text) + text;
+    private static RichText Equals(string text)
+    {
+        var runs = new List<TextRun> { new(Sign(text)) };
+        var from = 0;
+        foreach (Match power in Power().Matches(text))
+        {
+            runs.Add(new TextRun(text[from..power.Index]));
+            runs.Add(new TextRun(power.Groups[1].Value, Standing: Standing.Above));
+            from = power.Index + power.Length;
+        }
+
+        runs.Add(new TextRun(text[from..]));
+        return RichText.From(runs.Where(r => r.Text.Length > 0));
+    }
+
+    [GeneratedRegex(@"\^\(([^)]+)\)")]
+    private static partial Regex Power();
 
     private static string Sign(string text) => text.Length > 0 && (char.IsDigit(text[0]) || text[0] is '(' or '−') ? "= " : "";
 

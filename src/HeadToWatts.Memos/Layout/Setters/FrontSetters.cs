@@ -29,55 +29,52 @@ internal static class FrontSetters
         }
     }
 
-    public static List<Strip> Contents(Setting setting, IEnumerable<HeadingBlock> headings)
+    public static List<Strip> Contents(Setting setting, IReadOnlyList<HeadingBlock> headings)
     {
         const double size = Look.BodyPt;
-        const double leading = 17;
-        const double indent = 26;
+        const double leading = 16.5;
+        const double indent = 24;
+        const double gap = 28;
         var strips = setting.Lines(RichText.Bold("Contents"), 11.5, 16, Look.Ink);
         strips[0].SpaceBeforePt = 20;
         strips[0].HeightPt += 3;
         strips[0].KeepWithNext = true;
         Setting.Tag(strips, "P");
-        var entries = new List<Strip>();
-        foreach (var heading in headings)
+        if (headings.Count == 0)
+            return strips;
+
+        // Two columns read one after the other, so they are one strip.
+        var rows = (headings.Count + 1) / 2;
+        var width = (setting.WidthPt - gap) / 2;
+        var strip = new Strip { HeightPt = rows * leading + 6 };
+        strip.Ops.Add(new OpenTag("TOC", Grouping: true));
+        for (var i = 0; i < headings.Count; i++)
         {
-            var page = setting.PageOf(heading.Anchor).ToString(CultureInfo.InvariantCulture);
-            var lines = LineBreaker.Break(RichText.Link(heading.Text, heading.Anchor), size, setting.WidthPt - indent - 40);
-            for (var l = 0; l < lines.Count; l++)
-            {
-                var strip = new Strip { HeightPt = leading, KeepWithNext = l < lines.Count - 1 };
-                var baseline = Setting.Baseline(leading, size);
-                if (l == 0)
-                {
-                    strip.Ops.Add(new OpenTag("TOCI", Grouping: true));
-                    strip.Ops.Add(new OpenTag("P"));
-                    strip.Ops.Add(new TextOp(setting.LeftPt, baseline, heading.Number + " ", Face.SemiBold, size, Look.Accent, Typeface.WidthPt(heading.Number, Face.SemiBold, size)));
-                }
-
-                foreach (var f in lines[l].Fragments)
-                    strip.Ops.Add(new TextOp(setting.LeftPt + indent + f.XPt, baseline, f.Text + (l == lines.Count - 1 ? " " : ""), f.Face, f.SizePt, Look.Ink, f.WidthPt, f.Target));
-                if (l == lines.Count - 1)
-                {
-                    var pageWidth = Typeface.WidthPt(page, Face.Regular, size);
-                    var right = setting.LeftPt + setting.WidthPt;
-                    // The page number is part of the link's line; the leader is not read out.
-                    strip.Ops.Add(new TextOp(right - pageWidth, baseline, page, Face.Regular, size, Look.Ink, pageWidth));
-                    strip.Ops.Add(new CloseTag());
-                    strip.Ops.Add(new CloseTag());
-                    var from = setting.LeftPt + indent + lines[l].WidthPt + 8;
-                    strip.Ops.Add(new RuleOp(from, baseline, Math.Max(0, right - 18 - from), 0.4, Look.Hairline));
-                }
-
-                entries.Add(strip);
-            }
+            var left = setting.LeftPt + (i < rows ? 0 : width + gap);
+            var baseline = i % rows * leading + Setting.Baseline(leading, size);
+            Entry(strip.Ops, headings[i], setting.PageOf(headings[i].Anchor), left, width, baseline);
         }
 
-        if (entries.Count > 0)
-            Setting.Tag(entries, "TOC", grouping: true);
-        strips.AddRange(entries);
-        strips[^1].HeightPt += 4;
+        strip.Ops.Add(new CloseTag());
+        strips.Add(strip);
         return strips;
+
+        static void Entry(List<Op> ops, HeadingBlock heading, int page, double left, double width, double baseline)
+        {
+            var number = page.ToString(CultureInfo.InvariantCulture);
+            var numberWidth = Typeface.WidthPt(number, Face.Regular, size);
+            var text = Letters.Cut(heading.Text, Face.Regular, size, width - indent - 34);
+            var textWidth = Typeface.WidthPt(text, Face.Regular, size);
+            ops.Add(new OpenTag("TOCI", Grouping: true));
+            ops.Add(new OpenTag("P"));
+            ops.Add(new TextOp(left, baseline, heading.Number + " ", Face.SemiBold, size, Look.Accent, Typeface.WidthPt(heading.Number, Face.SemiBold, size)));
+            ops.Add(new TextOp(left + indent, baseline, text + " ", Face.Regular, size, Look.Ink, textWidth, heading.Anchor));
+            ops.Add(new TextOp(left + width - numberWidth, baseline, number, Face.Regular, size, Look.Ink, numberWidth));
+            ops.Add(new CloseTag());
+            ops.Add(new CloseTag());
+            var from = left + indent + textWidth + 6;
+            ops.Add(new RuleOp(from, baseline, Math.Max(0, left + width - 20 - from), 0.4, Look.Hairline));
+        }
     }
 
     private static Strip Status(Setting setting, string status)

@@ -9,7 +9,7 @@ namespace HeadToWatts.Memos.Layout.Setters;
 internal static class TableSetter
 {
     private const double PadXPt = 6;
-    private const double PadYPt = 4;
+    private const double PadYPt = 3.2;
     private const int LinesInARow = 36;
 
     // A table up to this height is kept in one piece.

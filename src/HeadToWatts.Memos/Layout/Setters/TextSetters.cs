@@ -18,7 +18,6 @@ internal static class TextSetters
         var first = strips[0];
         first.SpaceBeforePt = section ? 26 : 16;
         first.NewPage = block.OnNewPage;
-        first.EndsFloats = section;
         if (block.Number.Length > 0)
         {
             var number = block.Number + " ";

@@ -78,6 +78,17 @@ internal static partial class Letters
     /// <summary>The text as the typeface can draw it, on one line and at one height.</summary>
     public static string FitPlain(string text) => string.Concat(Typographic(text).EnumerateRunes().Select(Drawable));
 
+    /// <summary>The text on one line of a width, its end cut off where it does not fit.</summary>
+    public static string Cut(string text, Face face, double sizePt, double widthPt)
+    {
+        text = FitPlain(text);
+        if (Typeface.WidthPt(text, face, sizePt) <= widthPt)
+            return text;
+        while (text.Length > 1 && Typeface.WidthPt(text + "…", face, sizePt) > widthPt)
+            text = text[..^1];
+        return text.TrimEnd() + "…";
+    }
+
     /// <summary>The characters of a text for which there is neither a glyph nor a stand-in.</summary>
     public static IEnumerable<Rune> Missing(string text) =>
         text.EnumerateRunes().Where(r => !Typeface.Has(r) && !StandIns.ContainsKey(r.Value) && !IsSmall(r) && !Rune.IsControl(r)).Distinct();
