@@ -33,6 +33,8 @@ internal sealed class PagePainter(PdfDocument document, MemoLayout layout)
             _graphics = XGraphics.FromPdfPage(_page);
             _nothingMarked = true;
             _openInText = false;
+            // The library sets up a page with its first text; that must not happen between a mark and its text.
+            Decoration(Space);
             foreach (var op in page.Ops)
                 Do(op);
             EndMark();
@@ -97,7 +99,7 @@ internal sealed class PagePainter(PdfDocument document, MemoLayout layout)
         if (_nothingMarked)
         {
             _tags.StructureBuilder.BeginBlockLevelElement("/P");
-            Marked(() => _graphics.DrawString(" ", Font(Face.Regular, 1), XBrushes.Black, figure.XPt, figure.YPt, XStringFormats.BaseLineLeft));
+            Marked(Space);
             EndMark();
             _tags.StructureBuilder.End();
         }
@@ -107,6 +109,8 @@ internal sealed class PagePainter(PdfDocument document, MemoLayout layout)
         var bottom = layout.HeightPt - figure.YPt - figure.HeightPt;
         _tags.StructureBuilder.BeginIllustrationElement("/Figure", figure.AltText, new XRect(figure.XPt, bottom, figure.WidthPt, figure.HeightPt));
     }
+
+    private void Space() => _graphics.DrawString(" ", Font(Face.Regular, Look.BodyPt), XBrushes.Black, Look.MarginXPt, Look.BodyTopPt, XStringFormats.BaseLineLeft);
 
     private void Marked(Action draw)
     {

@@ -28,7 +28,7 @@ internal static class DesignFlowSection
                 new(MemoContext.Head("Design flow", show.FlowUnit), ColumnAlign.Right), new("Reached, % of the year", ColumnAlign.Right), new("Installed, kW", ColumnAlign.Right),
                 new("Energy, MWh a year", ColumnAlign.Right), new("Plant factor, %", ColumnAlign.Right), new("Last kW works, h a year", ColumnAlign.Right),
             ],
-            [.. points.Select(p => new TableRow([memo.Flow(p.DesignFlowM3PerS), MemoContext.PercentColumn(p.Exceedance), UnitDisplay.Number(p.InstalledPowerKw), UnitDisplay.Number(p.AnnualEnergyKwh / 1000), MemoContext.PercentColumn(p.PlantFactor), UnitDisplay.Number(p.HoursOfLastKw)]))]);
+            [.. points.Select(p => new TableRow([memo.Flow(p.DesignFlowM3PerS), MemoContext.PercentColumn(p.Exceedance), UnitDisplay.Number(p.InstalledPowerKw), UnitDisplay.Number(p.AnnualEnergyKwh / 1000), MemoContext.PercentColumn(p.PlantFactor), p.HoursOfLastKw > 0 ? UnitDisplay.Number(p.HoursOfLastKw) : "none"]))]);
     }
 
     private static IEnumerable<DesignFlowPoint> Spread(IReadOnlyList<DesignFlowPoint> points)

@@ -83,7 +83,7 @@ internal static class InputsAppendix
     {
         if (memo.Result.Input.Flow.TypedCurve is not { } curve)
             return;
-        var rows = curve.Rows.Take(RowsShown).Select(r => new TableRow([UnitDisplay.Number(r.Exceedance * 100, 4), memo.Flow(r.FlowM3PerS)]));
+        var rows = curve.Rows.Take(RowsShown).Select(r => new TableRow([(r.Exceedance * 100).ToString("0.###", System.Globalization.CultureInfo.InvariantCulture), memo.Flow(r.FlowM3PerS)]));
         memo.Body.Table("tab-curve", "Rows of the flow-duration curve.",
             [new("Exceeded, %", ColumnAlign.Right, 0), new(MemoContext.Head("Flow", memo.Show.FlowUnit), ColumnAlign.Right, 0)], [.. rows],
             curve.Rows.Count > RowsShown ? $"The first {RowsShown} of {curve.Rows.Count} rows." : "");

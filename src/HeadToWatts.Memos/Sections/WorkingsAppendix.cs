@@ -39,7 +39,9 @@ internal static partial class WorkingsAppendix
     [GeneratedRegex(@"\^\(([^)]+)\)")]
     private static partial Regex Power();
 
-    private static string Sign(string text) => text.Length > 0 && (char.IsDigit(text[0]) || text[0] is '(' or '−') ? "= " : "";
+    private static string Sign(string text) => text.Length > 0 && (char.IsDigit(text[0]) || text[0] is '(' or '−') && (IsSum(text) || !text.Contains(", ", StringComparison.Ordinal) && text.Count(c => c == ' ') < 5) ? "= " : "";
+
+    private static bool IsSum(string text) => new[] { " × ", " / ", " + ", " − " }.Any(o => text.Contains(o, StringComparison.Ordinal));
 
     private static void One(MemoContext memo, Working working)
     {

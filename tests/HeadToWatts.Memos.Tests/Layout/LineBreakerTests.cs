@@ -16,7 +16,7 @@ public class LineBreakerTests
             var width = 20 + random.NextDouble() * 400;
             var lines = LineBreaker.Break(RichText.Of(text) + RichText.Formula("h_{net}") + RichText.Bold(text), 10, width);
             Assert.All(lines, l => Assert.InRange(l.WidthPt, 0, width + 1e-6));
-            var kept = string.Concat(lines.SelectMany(l => l.Fragments).Select(f => f.Text)).Replace(" ", "", StringComparison.Ordinal);
+            var kept = string.Concat(lines.SelectMany(l => l.Fragments).Select(f => f.Text)).Replace(" ", "", StringComparison.Ordinal).Replace("\u00a0", "", StringComparison.Ordinal);
             Assert.Equal((text + "hnet" + text).Replace(" ", "", StringComparison.Ordinal), kept);
         }
     }
@@ -42,7 +42,7 @@ public class LineBreakerTests
     public void Small_figures_stand_above_and_below_the_line()
     {
         var line = LineBreaker.Break(RichText.Formula("V^2 h_{net}"), 10, 500)[0];
-        Assert.Contains(line.Fragments, f => f.Text == "2" && f.RisePt > 0 && f.SizePt < 10);
+        Assert.Contains(line.Fragments, f => f.Text.Trim() == "2" && f.RisePt > 0 && f.SizePt < 10);
         Assert.Contains(line.Fragments, f => f.Text == "net" && f.RisePt < 0 && f.SizePt < 10);
     }
 }

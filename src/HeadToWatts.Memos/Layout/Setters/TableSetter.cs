@@ -186,6 +186,8 @@ internal static class TableSetter
                 least[i] = Math.Max(least[i], LineBreaker.WidestWordPt(row.Cells[i], Look.TablePt, bold));
             }
 
+            // Short texts are not broken to make room for long ones.
+            least[i] = Math.Max(least[i], Math.Min(natural[i], 62));
             natural[i] += 2 * PadXPt + 0.01;
             least[i] += 2 * PadXPt + 0.01;
         }

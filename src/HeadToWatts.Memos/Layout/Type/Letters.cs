@@ -107,7 +107,7 @@ internal static partial class Letters
     [GeneratedRegex(@"(?<![\p{L}\p{N}_])(?:mm|cm|km|m|ft|in|s)[23](?![\p{L}\p{N}])")]
     private static partial Regex PlainPower();
 
-    [GeneratedRegex(@"(?<=\d) (?=(?:%|kW|W|MWh|kWh|cfs|gpm|ft|in|mm|m|psi|kPa|Hz|rpm|h|s|acre-ft|L/s|°[CF]|lbf|kN|N|kg|MW|km|mi|days?|years?)(?![\p{L}\p{N}]))")]
+    [GeneratedRegex(@"(?<=\d) (?=(?:%|kW|W|MWh|kWh|cfs|gpm|ft|in|mm|m[²³]?|psi|kPa|Hz|rpm|h|s|acre-ft|L|°[CF]|lbf|kN|N|kg|MW|km|mi|days?|years?)(?![\p{L}\p{N}]))")]
     private static partial Regex BeforeUnit();
 
     [GeneratedRegex(@"(?<!\p{L})deg([CF])(?!\p{L})")]
