@@ -7,6 +7,8 @@ namespace HeadToWatts.Memos.Sections;
 /// <summary>How each number came about: the same text as on the screen.</summary>
 internal static partial class WorkingsAppendix
 {
+    private static readonly string[] Operators = [" × ", " / ", " + ", " − "];
+
     public static void Write(MemoContext memo)
     {
         var body = memo.Body;
@@ -41,7 +43,7 @@ internal static partial class WorkingsAppendix
 
     private static string Sign(string text) => text.Length > 0 && (char.IsDigit(text[0]) || text[0] is '(' or '−') && (IsSum(text) || !text.Contains(", ", StringComparison.Ordinal) && text.Count(c => c == ' ') < 5) ? "= " : "";
 
-    private static bool IsSum(string text) => new[] { " × ", " / ", " + ", " − " }.Any(o => text.Contains(o, StringComparison.Ordinal));
+    private static bool IsSum(string text) => Operators.Any(o => text.Contains(o, StringComparison.Ordinal));
 
     private static void One(MemoContext memo, Working working)
     {

@@ -76,10 +76,10 @@ public class MemoPdfTests
             Assert.Equal(height, page.Height, 0.01);
             Assert.All(page.Letters.Where(l => !string.IsNullOrWhiteSpace(l.Value)), l =>
             {
-                Assert.InRange(l.GlyphRectangle.Left, 60, width - 60);
-                Assert.InRange(l.GlyphRectangle.Right, 60, width - 60);
-                Assert.InRange(l.GlyphRectangle.Bottom, 30, height - 30);
-                Assert.InRange(l.GlyphRectangle.Top, 30, height - 30);
+                Assert.InRange(l.BoundingBox.Left, 60, width - 60);
+                Assert.InRange(l.BoundingBox.Right, 60, width - 60);
+                Assert.InRange(l.BoundingBox.Bottom, 30, height - 30);
+                Assert.InRange(l.BoundingBox.Top, 30, height - 30);
             });
         }
     }

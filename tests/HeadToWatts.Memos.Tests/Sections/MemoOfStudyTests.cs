@@ -158,10 +158,10 @@ public partial class MemoOfStudyTests
         {
             Assert.All(page.Letters.Where(l => !string.IsNullOrWhiteSpace(l.Value)), l =>
             {
-                Assert.InRange(l.GlyphRectangle.Left, 58, page.Width - 58);
-                Assert.InRange(l.GlyphRectangle.Right, 58, page.Width - 58);
-                Assert.InRange(l.GlyphRectangle.Bottom, 30, page.Height - 30);
-                Assert.InRange(l.GlyphRectangle.Top, 30, page.Height - 30);
+                Assert.InRange(l.BoundingBox.Left, 58, page.Width - 58);
+                Assert.InRange(l.BoundingBox.Right, 58, page.Width - 58);
+                Assert.InRange(l.BoundingBox.Bottom, 30, page.Height - 30);
+                Assert.InRange(l.BoundingBox.Top, 30, page.Height - 30);
             });
         }
 
