@@ -26,15 +26,19 @@ public sealed record AnnualEnergy(
     /// <summary>Runs a plant over a year of flows.</summary>
     /// <param name="plant">The plant.</param>
     /// <param name="supply">The flows.</param>
-    public static AnnualEnergy Of(PlantCurve plant, FlowSupply supply)
+    public static AnnualEnergy Of(PlantCurve plant, FlowSupply supply) => Of([new YearPart(plant, supply)]);
+
+    /// <summary>Runs a plant over the parts of a year.</summary>
+    /// <param name="parts">Parts that together make the year, each dry outside its part; at least one.</param>
+    public static AnnualEnergy Of(IReadOnlyList<YearPart> parts)
     {
-        ArgumentNullException.ThrowIfNull(plant);
-        ArgumentNullException.ThrowIfNull(supply);
-        var year = YearIntegral.Over(plant, supply);
-        var train = plant.Design.Train;
+        ArgumentNullException.ThrowIfNull(parts);
+        var year = parts.Count == 1 ? YearIntegral.Over(parts[0].Plant, parts[0].Supply) : YearIntegral.Sum([.. parts.Select(p => YearIntegral.Over(p.Plant, p.Supply))]);
+        var best = parts.MaxBy(p => p.Plant.BestPowerKw)!.Plant;
+        var train = best.Design.Train;
         var availability = train.Availability;
         var energyKwh = year.MeterPowerKw * PhysicalConstants.HoursPerYear * availability;
-        var top = plant.At(plant.BestFlowM3PerS);
+        var top = best.At(best.BestUsableFlowM3PerS);
         var installedKw = train.GeneratedPowerKw(top.ShaftPowerKw);
         var fullLoadHours = installedKw > 0 ? energyKwh / installedKw : 0;
         return new AnnualEnergy(
@@ -44,26 +48,29 @@ public sealed record AnnualEnergy(
             fullLoadHours / PhysicalConstants.HoursPerYear,
             year.RunningShare * availability * PhysicalConstants.HoursPerYear,
             fullLoadHours,
-            Balance(supply, year, availability),
+            Balance(parts, year, availability),
             EnergyStaircase.Of(year, train, PhysicalConstants.HoursPerYear),
             year);
     }
 
     // Every part is integrated on its own, so that the balance is a check and not a definition: spill alone is the rest.
-    private static WaterBalance Balance(FlowSupply supply, YearIntegral year, double availability)
+    private static WaterBalance Balance(IReadOnlyList<YearPart> parts, YearIntegral year, double availability)
     {
         const double s = PhysicalConstants.SecondsPerYear;
-        var p = supply.Exceedance;
-        var q = supply.ArrivingM3PerS;
         double arriving = 0, prior = 0, reserved = 0;
-        for (var i = 0; i + 1 < p.Length; i++)
+        foreach (var supply in parts.Select(part => part.Supply))
         {
-            var half = (p[i + 1] - p[i]) / 2;
-            var a = supply.Allocation.Split(q[i]);
-            var b = supply.Allocation.Split(q[i + 1]);
-            arriving += half * (q[i] + q[i + 1]);
-            prior += half * (a.PriorM3PerS + b.PriorM3PerS);
-            reserved += half * (a.ReservedM3PerS + b.ReservedM3PerS);
+            var p = supply.Exceedance;
+            var q = supply.ArrivingM3PerS;
+            for (var i = 0; i + 1 < p.Length; i++)
+            {
+                var half = (p[i + 1] - p[i]) / 2;
+                var a = supply.Allocation.Split(q[i]);
+                var b = supply.Allocation.Split(q[i + 1]);
+                arriving += half * (q[i] + q[i + 1]);
+                prior += half * (a.PriorM3PerS + b.PriorM3PerS);
+                reserved += half * (a.ReservedM3PerS + b.ReservedM3PerS);
+            }
         }
 
         var spilled = year.UsableM3PerS - year.TurbineFlowM3PerS - year.BelowLeastM3PerS;

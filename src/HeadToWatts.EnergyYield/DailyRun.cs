@@ -53,15 +53,34 @@ public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<Y
     public static DailyRun Over(PlantCurve plant, DailyRecord record, OperatingSeason season, WaterAllocation allocation)
     {
         ArgumentNullException.ThrowIfNull(plant);
+        ArgumentNullException.ThrowIfNull(allocation);
+        return Over([.. Enumerable.Repeat(plant, 12)], record, season, [.. Enumerable.Repeat(allocation, 12)]);
+    }
+
+    /// <summary>Runs the plant over a record where each month has its own head or its own allocation.</summary>
+    /// <param name="plants">The plant in each month, January first.</param>
+    /// <param name="record">Daily flows arriving.</param>
+    /// <param name="season">Days on which the plant may run.</param>
+    /// <param name="allocations">Prior deliveries and reserved flow in each month, January first.</param>
+    public static DailyRun Over(IReadOnlyList<PlantCurve> plants, DailyRecord record, OperatingSeason season, IReadOnlyList<WaterAllocation> allocations)
+    {
+        ArgumentNullException.ThrowIfNull(plants);
         ArgumentNullException.ThrowIfNull(record);
         ArgumentNullException.ThrowIfNull(season);
-        ArgumentNullException.ThrowIfNull(allocation);
-        var availability = plant.Design.Train.Availability;
+        ArgumentNullException.ThrowIfNull(allocations);
+        var availability = plants[0].Design.Train.Availability;
         var powerSum = new double[12];
         var flowSum = new double[12];
         var days = new int[12];
         var years = new List<YearEnergy>();
-        var known = new Dictionary<double, double>();
+        // Records repeat their flows; each distinct flow is worked out once for the months that share plant and allocation.
+        var known = new Dictionary<double, double>[12];
+        for (var m = 0; m < 12; m++)
+        {
+            var like = Enumerable.Range(0, m).FirstOrDefault(k => ReferenceEquals(plants[k], plants[m]) && allocations[k] == allocations[m], m);
+            known[m] = like == m ? [] : known[like];
+        }
+
         var flows = record.Flows;
         var day = record.FirstDay;
         var (year, yearKwh, yearDays) = (day.Year, 0.0, 0);
@@ -76,13 +95,13 @@ public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<Y
             if (double.IsNaN(flows[i]))
                 continue;
             var arriving = season.Runs(day) ? flows[i] : 0;
-            if (!known.TryGetValue(arriving, out var powerKw))
+            var month = day.Month - 1;
+            if (!known[month].TryGetValue(arriving, out var powerKw))
             {
-                powerKw = plant.At(allocation.Split(arriving).UsableM3PerS).MeterPowerKw * availability;
-                known.Add(arriving, powerKw);
+                powerKw = plants[month].At(allocations[month].Split(arriving).UsableM3PerS).MeterPowerKw * availability;
+                known[month].Add(arriving, powerKw);
             }
 
-            var month = day.Month - 1;
             powerSum[month] += powerKw;
             flowSum[month] += arriving;
             days[month]++;

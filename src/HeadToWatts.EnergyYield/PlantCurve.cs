@@ -20,6 +20,17 @@ public sealed class PlantCurve
         ArgumentNullException.ThrowIfNull(design);
         Design = design;
         _gammaKnPerM3 = design.Site.SpecificWeightNPerM3 / 1000;
+        if (design.MovingHead is not null)
+        {
+            _from = [0];
+            _heldFlow = [double.NaN];
+            var points = BreakpointsM3PerS.Where(q => q > 0).Select(At).ToList();
+            var highest = points.MaxBy(p => p.MeterPowerKw);
+            BestFlowM3PerS = highest.TurbineFlowM3PerS;
+            BestPowerKw = highest.MeterPowerKw;
+            BestUsableFlowM3PerS = highest.UsableFlowM3PerS;
+            return;
+        }
 
         var from = new List<double>();
         var held = new List<double>();
@@ -33,6 +44,7 @@ public sealed class PlantCurve
         Add(edges[^1], best.FlowM3PerS);
         BestFlowM3PerS = best.FlowM3PerS;
         BestPowerKw = best.PowerKw;
+        BestUsableFlowM3PerS = best.FlowM3PerS;
         _from = [.. from];
         _heldFlow = [.. held];
 
@@ -60,6 +72,12 @@ public sealed class PlantCurve
     /// <summary>The highest power at the meter, kW.</summary>
     public double BestPowerKw { get; }
 
+    /// <summary>The usable flow of highest power, m3/s; where the head moves with the flow it may lie below or above the design flow.</summary>
+    public double BestUsableFlowM3PerS { get; }
+
+    /// <summary>True when each usable flow has a gross head of its own, so that power may fall as the flow rises.</summary>
+    public bool HeadMoves => Design.MovingHead is not null;
+
     /// <summary>Usable flows at which the behaviour changes, ascending, m3/s.</summary>
     public IReadOnlyList<double> BreakpointsM3PerS
     {
@@ -67,6 +85,8 @@ public sealed class PlantCurve
         {
             var all = new SortedSet<double>(Edges(Design.Units));
             foreach (var flow in _from)
+                all.Add(flow);
+            foreach (var flow in Design.MovingHead?.BreakpointsM3PerS() ?? [])
                 all.Add(flow);
             return [.. all];
         }
@@ -76,14 +96,17 @@ public sealed class PlantCurve
     /// <param name="usableFlowM3PerS">Usable flow, m3/s.</param>
     public PlantPoint At(double usableFlowM3PerS)
     {
-        var taken = FlowTakenM3PerS(usableFlowM3PerS);
-        return taken > 0 ? Follow(taken) with { UsableFlowM3PerS = usableFlowM3PerS } : new PlantPoint(usableFlowM3PerS, 0, 0, Design.GrossHead.Metres, 0, 0, 0);
+        var grossHeadM = Design.GrossHeadM(usableFlowM3PerS);
+        var taken = Design.MovingHead is null ? FlowTakenM3PerS(usableFlowM3PerS) : MovingDispatch.FlowTakenM3PerS(this, usableFlowM3PerS, grossHeadM);
+        return taken > 0 ? Follow(taken, grossHeadM) with { UsableFlowM3PerS = usableFlowM3PerS } : Standing(usableFlowM3PerS, grossHeadM);
     }
 
     /// <summary>Of a usable flow, what the plant would take, m3/s.</summary>
     /// <param name="usableFlowM3PerS">Usable flow, m3/s.</param>
     public double FlowTakenM3PerS(double usableFlowM3PerS)
     {
+        if (Design.MovingHead is { } moving)
+            return MovingDispatch.FlowTakenM3PerS(this, usableFlowM3PerS, moving.GrossHeadM(usableFlowM3PerS));
         var lo = 0;
         var hi = _from.Length - 1;
         while (lo < hi)
@@ -188,16 +211,20 @@ public sealed class PlantCurve
         return b;
     }
 
-    private double PowerKw(double flowM3PerS) => Follow(flowM3PerS).MeterPowerKw;
+    private static PlantPoint Standing(double usableFlowM3PerS, double grossHeadM) =>
+        new(usableFlowM3PerS, 0, 0, grossHeadM, 0, 0, 0) { GrossHeadM = grossHeadM };
 
-    private PlantPoint Follow(double flowM3PerS)
+    private double PowerKw(double flowM3PerS) => Follow(flowM3PerS, Design.GrossHead.Metres).MeterPowerKw;
+
+    // The units' own answer to a flow, whether or not taking it is wise.
+    internal PlantPoint Follow(double flowM3PerS, double grossHeadM)
     {
         var load = Design.Units.LoadAt(flowM3PerS);
         if (load.Running == 0)
-            return new PlantPoint(flowM3PerS, 0, 0, Design.GrossHead.Metres, 0, 0, 0);
-        var netHeadM = Design.NetHeadM(load.TurbineFlowM3PerS);
+            return Standing(flowM3PerS, grossHeadM);
+        var netHeadM = grossHeadM - Design.LossM(load.TurbineFlowM3PerS);
         var shaftKw = _gammaKnPerM3 * load.TurbineFlowM3PerS * netHeadM * load.Efficiency;
-        return new PlantPoint(flowM3PerS, load.TurbineFlowM3PerS, load.Running, netHeadM, load.Efficiency, shaftKw, Design.Train.MeterPowerKw(shaftKw));
+        return new PlantPoint(flowM3PerS, load.TurbineFlowM3PerS, load.Running, netHeadM, load.Efficiency, shaftKw, Design.Train.MeterPowerKw(shaftKw)) { GrossHeadM = grossHeadM };
     }
 
     private readonly record struct Best(double FlowM3PerS, double PowerKw);

@@ -17,6 +17,9 @@ public readonly record struct PlantPoint(
     double ShaftPowerKw,
     double MeterPowerKw)
 {
+    /// <summary>Gross head at this flow, m.</summary>
+    public double GrossHeadM { get; init; }
+
     /// <summary>True when water goes through a turbine.</summary>
     public bool IsRunning => TurbineFlowM3PerS > 0;
 }

@@ -69,6 +69,23 @@ public sealed record YearIntegral(
         return sums.Done();
     }
 
+    /// <summary>Adds the integrals of parts of the year, such as months, each dry outside its part.</summary>
+    /// <param name="parts">The parts.</param>
+    public static YearIntegral Sum(IReadOnlyList<YearIntegral> parts)
+    {
+        ArgumentNullException.ThrowIfNull(parts);
+        return new YearIntegral(
+            parts.Sum(p => p.TurbineFlowM3PerS),
+            parts.Sum(p => p.GrossPowerKw),
+            parts.Sum(p => p.HydraulicPowerKw),
+            parts.Sum(p => p.ShaftPowerKw),
+            parts.Sum(p => p.MeterPowerKw),
+            parts.Sum(p => p.RunningShare),
+            parts.Sum(p => p.BelowLeastM3PerS),
+            parts.Sum(p => p.UsableM3PerS),
+            parts.Sum(p => p.Panels));
+    }
+
     private static int LastBelow(IReadOnlyList<double> edges, double flow)
     {
         var lo = 0;
@@ -90,6 +107,7 @@ public sealed record YearIntegral(
         private readonly double _gammaKn = plant.Design.Site.SpecificWeightNPerM3 / 1000;
         private readonly double _tolerance = Agreement * Math.Max(plant.BestPowerKw, 1e-12);
         private double _turbine;
+        private double _gross;
         private double _hydraulic;
         private double _shaft;
         private double _meter;
@@ -108,7 +126,7 @@ public sealed record YearIntegral(
             var middle = plant.At((high + low) / 2);
 
             // Held: everything but the passing water is constant over the panel.
-            if (!middle.IsRunning || middle.TurbineFlowM3PerS < low || middle.TurbineFlowM3PerS > high)
+            if (!plant.HeadMoves && (!middle.IsRunning || middle.TurbineFlowM3PerS < low || middle.TurbineFlowM3PerS > high))
             {
                 Add(middle, width);
                 return;
@@ -124,7 +142,7 @@ public sealed record YearIntegral(
         }
 
         public YearIntegral Done() =>
-            new(_turbine, _gammaKn * _turbine * plant.Design.GrossHead.Metres, _hydraulic, _shaft, _meter, _running, _below, _usable, _panels);
+            new(_turbine, _gross, _hydraulic, _shaft, _meter, _running, _below, _usable, _panels);
 
         private double Mean(double high, double low)
         {
@@ -167,6 +185,7 @@ public sealed record YearIntegral(
 
             _running += width;
             _turbine += width * point.TurbineFlowM3PerS;
+            _gross += width * _gammaKn * point.TurbineFlowM3PerS * point.GrossHeadM;
             _hydraulic += width * _gammaKn * point.TurbineFlowM3PerS * point.NetHeadM;
             _shaft += width * point.ShaftPowerKw;
             _meter += width * point.MeterPowerKw;

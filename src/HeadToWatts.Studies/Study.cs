@@ -30,16 +30,21 @@ public static class Study
     {
         ArgumentNullException.ThrowIfNull(header);
         ArgumentNullException.ThrowIfNull(input);
+        input = RatedHead.Settle(input);
         var site = SiteConditions.At(input.Site.LatitudeRad, input.Site.ElevationM, input.Site.WaterTemperatureDegC);
         var curve = input.Flow.CurveOfYear();
         var supply = new FlowSupply(curve, input.Flow.Allocation);
         var waterway = input.Waterway.Build();
         var choice = PlantChoice.Make(input, site, waterway, supply);
         var designFlow = choice.DesignFlowM3PerS;
+        if (input.Head.Moves)
+            input = RatedHead.At(input, designFlow);
 
-        var plant = new PlantCurve(new PlantDesign(site, input.Head.Gross, waterway, choice.Units, input.Train));
-        var annual = AnnualEnergy.Of(plant, supply);
-        var days = input.Flow.Record is { } record ? DailyRun.Over(plant, record, input.Flow.Season, input.Flow.Allocation) : null;
+        var design = new PlantDesign(site, input.Head.Gross, waterway, choice.Units, input.Train);
+        var year = YearOfParts.Make(input, design, supply);
+        var plant = year.Representative;
+        var annual = AnnualEnergy.Of(year.Parts);
+        var days = input.Flow.Record is { } record ? DailyRun.Over(year.PlantOfMonth, record, input.Flow.Season, year.AllocationOfMonth) : null;
         var losses = waterway.At(designFlow, site);
         var highest = losses.Elements.Count == 0 ? 0 : losses.Elements.Max(e => e.VelocityMPerS);
         var surge = losses.Elements.Count == 0 ? null : SurgeScreening.Of(waterway, designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site);
@@ -65,7 +70,7 @@ public static class Study
                 input.Head.HeadwaterM,
                 input.Head.TailwaterM,
                 plant.Design.NetHeadM(designFlow),
-                [.. Shares.Select(s => NetHead(plant, s * designFlow, s))]),
+                [.. Shares.Select(s => NetHead(plant, s * designFlow, s))]) { Levels = LevelTable.Of(input, supply, designFlow) },
             new WaterwayResult(
                 waterway,
                 losses,
@@ -88,8 +93,8 @@ public static class Study
 
     private static NetHeadPoint NetHead(PlantCurve plant, double flowM3PerS, double share)
     {
-        var net = plant.Design.NetHeadM(flowM3PerS);
-        return new NetHeadPoint(share, flowM3PerS, plant.Design.GrossHead.Metres - net, net);
+        var loss = plant.Design.LossM(flowM3PerS);
+        return new NetHeadPoint(share, flowM3PerS, loss, plant.Design.GrossHeadM(flowM3PerS) - loss);
     }
 
     // Evenly spaced, with both sides of every breakpoint so that steps are drawn as steps.

@@ -23,6 +23,10 @@ public sealed record FlowInput(
     double? DesignFlowM3PerS,
     string SourceDescription)
 {
+    /// <summary>The allocation in a month; the same all year here.</summary>
+    /// <param name="month">Month, 1 to 12.</param>
+    public WaterAllocation AllocationIn(int month) => Allocation;
+
     /// <summary>The curve of the year on which the plant is run: dry outside the season.</summary>
     /// <exception cref="InvalidOperationException">There is neither a curve nor a record.</exception>
     public FlowDurationCurve CurveOfYear()

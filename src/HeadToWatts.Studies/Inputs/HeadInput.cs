@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Quantities;
+using HeadToWatts.Hydraulics.Levels;
 
 namespace HeadToWatts.Studies.Inputs;
 
@@ -7,4 +8,23 @@ namespace HeadToWatts.Studies.Inputs;
 /// <param name="HeadwaterM">Headwater level, m; when the head was given directly, the gross head above a tailwater at zero.</param>
 /// <param name="TailwaterM">Tailwater level, m.</param>
 /// <param name="IsFromLevels">True when the levels were given.</param>
-public sealed record HeadInput(GrossHead Gross, double HeadwaterM, double TailwaterM, bool IsFromLevels);
+public sealed record HeadInput(GrossHead Gross, double HeadwaterM, double TailwaterM, bool IsFromLevels)
+{
+    /// <summary>Headwater level by flow or month; null when it stays at <see cref="HeadwaterM"/>.</summary>
+    public LevelRule? HeadwaterRule { get; init; }
+
+    /// <summary>Tailwater level by flow or month; null when it stays at <see cref="TailwaterM"/>.</summary>
+    public LevelRule? TailwaterRule { get; init; }
+
+    /// <summary>True when a level moves with the flow or the month.</summary>
+    public bool Moves => HeadwaterRule is not null || TailwaterRule is not null;
+
+    /// <summary>True when a level moves with the month.</summary>
+    public bool MovesWithMonth => HeadwaterRule is { FollowsMonth: true } || TailwaterRule is { FollowsMonth: true };
+
+    /// <summary>The headwater level as a rule, moving or not.</summary>
+    public LevelRule Headwater => HeadwaterRule ?? new ConstantLevel(HeadwaterM);
+
+    /// <summary>The tailwater level as a rule, moving or not.</summary>
+    public LevelRule Tailwater => TailwaterRule ?? new ConstantLevel(TailwaterM);
+}

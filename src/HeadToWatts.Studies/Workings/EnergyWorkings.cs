@@ -10,7 +10,7 @@ internal static class EnergyWorkings
     {
         var annual = result.Energy.Annual;
         var train = result.Input.Train;
-        var point = result.Energy.Plant.At(result.Energy.Plant.BestFlowM3PerS);
+        var point = result.Energy.Plant.At(result.Energy.Plant.BestUsableFlowM3PerS);
         var gamma = UnitDisplay.Number(result.Site.SpecificWeightNPerM3 / 1000, 4);
         yield return new Working(
             "shaft-power", StudyStage.Energy, "Power at the shaft", "P_{shaft} = η_t γ Q H_n",

@@ -19,7 +19,7 @@ internal static class TurbineWorkings
 
         if (chosen.Speed is { } speed && result.Energy.Annual.MeterPowerKw > 0)
         {
-            var point = result.Energy.Plant.At(result.Energy.Plant.BestFlowM3PerS);
+            var point = result.Energy.Plant.At(result.Energy.Plant.BestUsableFlowM3PerS);
             var perUnit = point.ShaftPowerKw / Math.Max(1, point.UnitsRunning);
             yield return new Working(
                 "specific-speed", StudyStage.Turbine, "Specific speed (rpm, kW, m)", TurbineMethods.SpecificSpeedKwM.Formula,
