@@ -99,6 +99,20 @@ internal sealed class JsonObjectReader
         return list;
     }
 
+    /// <summary>A list of texts.</summary>
+    internal List<string?>? Texts(string name)
+    {
+        if (!Take(name, out var value))
+            return null;
+        if (value.ValueKind != JsonValueKind.Array || value.EnumerateArray().Any(v => v.ValueKind != JsonValueKind.String))
+        {
+            _problems.Add(new Problem(At(name), Shorten(value.GetRawText()), "a list of texts in square brackets is wanted here"));
+            return null;
+        }
+
+        return [.. value.EnumerateArray().Select(v => v.GetString())];
+    }
+
     /// <summary>Refuses every field that was not asked for.</summary>
     internal void Done()
     {

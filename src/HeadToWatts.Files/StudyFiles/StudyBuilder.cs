@@ -57,7 +57,7 @@ public static class StudyBuilder
             read.Assumed(d.Site.WaterTemperature, Dimension.Temperature, path + ".site.waterTemperature", 0, 40, "10 degC", "The water temperature"),
             read.Assumed(d.Site.GridFrequency, Dimension.Frequency, path + ".site.gridFrequency", 45, 65, "60 Hz", "The grid frequency"));
         var flow = FlowBuilder.Build(d.Flow, path + ".flow", read, files);
-        var head = Head(d.Head, path + ".head", read);
+        var head = HeadBuilder.Build(d.Head, path + ".head", read);
         var waterway = WaterwayBuilder.Build(d.Waterway, path + ".waterway", read);
         var turbine = TurbineBuilder.Build(d.Turbine, path + ".turbine", read);
         var train = Train(d.Losses, path + ".losses", read);
@@ -72,37 +72,6 @@ public static class StudyBuilder
             turbine,
             train,
             read.Problems.Count == before ? [.. read.Assumptions] : []);
-    }
-
-    private static HeadInput? Head(HeadDocument d, string path, FieldReader read)
-    {
-        var hasLevels = !string.IsNullOrWhiteSpace(d.Headwater) || !string.IsNullOrWhiteSpace(d.Tailwater);
-        if (!string.IsNullOrWhiteSpace(d.Gross) && hasLevels)
-        {
-            read.Refuse(path, d.Gross, "gross head and levels are both given; they could disagree", "either gross, or headwater and tailwater");
-            return null;
-        }
-
-        if (!hasLevels)
-        {
-            var count = read.Problems.Count;
-            var gross = read.Quantity(d.Gross, Dimension.Length, path + ".gross", 0.05, 2500);
-            return read.Problems.Count > count ? null : new HeadInput(GrossHead.FromMetres(gross), gross, 0, false);
-        }
-
-        var before = read.Problems.Count;
-        var headwater = read.Quantity(d.Headwater, Dimension.Length, path + ".headwater", -430, 9000);
-        var tailwater = read.Quantity(d.Tailwater, Dimension.Length, path + ".tailwater", -430, 9000);
-        if (read.Problems.Count > before)
-            return null;
-        var fall = headwater - tailwater;
-        if (fall is < 0.05 or > 2500)
-        {
-            read.Refuse(path + ".tailwater", d.Tailwater, $"headwater less tailwater is {UnitDisplay.Number(fall)} m", "a fall of 0.05 m to 2500 m");
-            return null;
-        }
-
-        return new HeadInput(GrossHead.FromMetres(fall), headwater, tailwater, true);
     }
 
     private static PowerTrain Train(LossesDocument d, string path, FieldReader read)

@@ -158,6 +158,44 @@ public sealed class HeadDocument
 
     /// <summary>Tailwater level.</summary>
     public string? Tailwater { get; set; }
+
+    /// <summary>Twelve headwater levels, January first, in place of one.</summary>
+    public List<string?>? HeadwaterByMonth { get; set; }
+
+    /// <summary>Twelve tailwater levels, January first, in place of one.</summary>
+    public List<string?>? TailwaterByMonth { get; set; }
+
+    /// <summary>Headwater level against the flow passing the site, in place of one.</summary>
+    public List<LevelRowDocument>? HeadwaterRating { get; set; }
+
+    /// <summary>Tailwater level against the flow passing the site, in place of one.</summary>
+    public List<LevelRowDocument>? TailwaterRating { get; set; }
+
+    /// <summary>A weir crest that sets the headwater, in place of one level.</summary>
+    public CrestDocument? HeadwaterCrest { get; set; }
+}
+
+/// <summary>A row of a level rating.</summary>
+public sealed class LevelRowDocument
+{
+    /// <summary>Flow passing the site.</summary>
+    public string? Flow { get; set; }
+
+    /// <summary>Level at that flow.</summary>
+    public string? Level { get; set; }
+}
+
+/// <summary>A weir crest.</summary>
+public sealed class CrestDocument
+{
+    /// <summary>Elevation of the crest.</summary>
+    public string? Elevation { get; set; }
+
+    /// <summary>Length of the crest.</summary>
+    public string? Length { get; set; }
+
+    /// <summary>C in Q = C L h^(3/2), SI.</summary>
+    public string? Coefficient { get; set; }
 }
 
 /// <summary>The waterway.</summary>

@@ -64,7 +64,14 @@ internal static class StudyDocumentFields
         Gross = r.Text("gross"),
         Headwater = r.Text("headwater"),
         Tailwater = r.Text("tailwater"),
+        HeadwaterByMonth = r.Texts("headwaterByMonth"),
+        TailwaterByMonth = r.Texts("tailwaterByMonth"),
+        HeadwaterRating = r.Array("headwaterRating", LevelRow),
+        TailwaterRating = r.Array("tailwaterRating", LevelRow),
+        HeadwaterCrest = r.Object("headwaterCrest", c => new CrestDocument { Elevation = c.Text("elevation"), Length = c.Text("length"), Coefficient = c.NumberText("coefficient") }),
     };
+
+    private static LevelRowDocument LevelRow(JsonObjectReader r) => new() { Flow = r.Text("flow"), Level = r.Text("level") };
 
     private static WaterwayDocument Waterway(JsonObjectReader r) => new()
     {
