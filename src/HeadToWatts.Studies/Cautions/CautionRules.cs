@@ -19,6 +19,8 @@ public static class CautionRules
         new NetHeadGone(),
         new LowHead(),
         new TailwaterConstant(),
+        new HighWaterTakesHead(),
+        new LevelOutsideRating(),
         new PressureBelowAir(),
         new PressureNearRating(),
         new SurgeOverRating(),

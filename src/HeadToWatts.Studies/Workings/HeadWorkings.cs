@@ -19,7 +19,10 @@ internal static class HeadWorkings
             "gross-head", StudyStage.Head, "Gross head",
             result.Input.Head.IsFromLevels ? "H_g = z_{head} − z_{tail}" : "H_g",
             result.Input.Head.IsFromLevels ? $"{show.Length(head.HeadwaterM)} − {show.Length(head.TailwaterM)}" : "given by the author",
-            show.Length(head.GrossHeadM), "Levels are held constant over the flows.", []);
+            show.Length(head.GrossHeadM),
+            head.Levels.Count == 0
+                ? "Levels are held constant over the flows."
+                : $"At the design flow. Levels move: " + string.Join("; ", head.Levels.Select(l => $"{show.Length(l.GrossHeadM)} at {show.Flow(l.PassingFlowM3PerS)}")) + ". Every flow has its own gross head in the energy.", []);
 
         var losses = result.Waterway.AtDesign;
         yield return new Working(
