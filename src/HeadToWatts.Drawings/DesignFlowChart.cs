@@ -58,8 +58,8 @@ public static partial class DesignFlowChart
         frame.Labels.TryPlace(frame.Canvas, $"{(same ? "suggested" : "this study")} {Wording.Trimmed(show.Flow(input.Chosen.DesignFlowM3PerS))}", frame.StrongStyle(InkRole.Ink), Beside(input.Chosen));
         if (input.Suggested is { } other && !same)
             frame.Labels.TryPlace(frame.Canvas, $"suggested {show.Flow(other.DesignFlowM3PerS)}", frame.LabelStyle(InkRole.Soft), Beside(other));
-        frame.Labels.TryPlace(frame.Canvas, "energy", frame.StrongStyle(InkRole.Ochre), Spots.AlongCurve(energy, type.Strong, 0.7));
-        frame.Labels.TryPlace(frame.Canvas, "plant factor", frame.LabelStyle(InkRole.Green), Spots.AlongCurve(factor, type.Label, 0.7));
+        frame.Labels.TryPlace(frame.Canvas, "energy", frame.StrongStyle(InkRole.Ochre), Spots.AlongCurve(energy, type.Strong, 0.3, aboveFirst: false));
+        frame.Labels.TryPlace(frame.Canvas, "plant factor", frame.LabelStyle(InkRole.Green), Spots.AlongCurve(factor, type.Label, 0.3));
 
         frame.HoverBands(Hovers(input.Points, show, At));
         return frame.Canvas.Finish("Energy against design flow", Describe(input, show, same), size.Width, size.Height);

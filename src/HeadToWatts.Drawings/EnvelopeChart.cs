@@ -125,8 +125,13 @@ public static partial class EnvelopeChart
             {
                 var at = new Point(left + ((right - left) * i / across), top + ((bottom - top) * k / down));
                 var middle = at.Y - (style.Size * 0.3);
-                if (!ClipPolygon.Contains(outline, new Point(at.X - half, middle)) || !ClipPolygon.Contains(outline, new Point(at.X + half, middle)))
+                var (above, below) = (at.Y - (style.Size * 0.9), at.Y + (style.Size * 0.35));
+                if (!ClipPolygon.Contains(outline, new Point(at.X - half - 2, above)) || !ClipPolygon.Contains(outline, new Point(at.X + half + 2, above))
+                    || !ClipPolygon.Contains(outline, new Point(at.X - half - 2, below)) || !ClipPolygon.Contains(outline, new Point(at.X + half + 2, below)))
+                {
                     continue;
+                }
+
                 var under = others.Count(o => ClipPolygon.Contains(o, new Point(at.X, middle)));
                 found.Add(((under * 10) + (k * 0.3) + (Math.Abs(i - (across / 2.0)) * 0.1), new LabelSpot(at, TextAnchor.Middle)));
             }

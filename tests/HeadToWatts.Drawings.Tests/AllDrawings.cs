@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Drawings.Canvas;
 
@@ -14,7 +15,13 @@ public static class AllDrawings
         ["memo"] = DrawingSize.MemoPage,
     };
 
-    public static IReadOnlyList<(string Name, Drawing Drawing)> Of(string scenario, string size, UnitSystem units)
+    private static readonly ConcurrentDictionary<(string, string, UnitSystem), IReadOnlyList<(string Name, Drawing Drawing)>> Drawn = new();
+
+    /// <summary>Drawn once and kept, since many rules look at the same drawings.</summary>
+    public static IReadOnlyList<(string Name, Drawing Drawing)> Of(string scenario, string size, UnitSystem units) =>
+        Drawn.GetOrAdd((scenario, size, units), k => Draw(k.Item1, k.Item2, k.Item3));
+
+    public static IReadOnlyList<(string Name, Drawing Drawing)> Draw(string scenario, string size, UnitSystem units)
     {
         var result = Scenarios.Get(scenario);
         var show = result.Show(units);

@@ -148,4 +148,18 @@ public sealed class ChartTests
         Assert.Contains("9 others", drawing.Description, StringComparison.Ordinal);
         Assert.Contains("together 21.0 m, 21 % of the gross head", drawing.Description, StringComparison.Ordinal);
     }
+
+    [Fact]
+    public void What_goes_through_the_turbines_is_named_inside_its_area()
+    {
+        foreach (var result in Studies)
+        {
+            foreach (var size in AllDrawings.Sizes.Values)
+            {
+                var drawing = FlowDurationChart.Draw(result, result.Show(), size);
+                var label = Assert.Single(drawing.Operations.OfType<TextOperation>(), t => t.Content == "through the turbine");
+                Assert.Equal(TextAnchor.Middle, label.Style.Anchor);
+            }
+        }
+    }
 }

@@ -1,5 +1,6 @@
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Drawings.Canvas;
+using HeadToWatts.Drawings.Layout;
 using HeadToWatts.Drawings.Scheme;
 
 namespace HeadToWatts.Drawings.Tests;
@@ -86,6 +87,44 @@ public sealed class SchemeSectionTests
             var losses = result.Waterway.Waterway.LossM(input.FlowM3PerS, result.Site);
             Assert.Equal(input.GrossHeadM, input.NetHeadM + losses, 9);
             Assert.Equal(input.EnergyAtMachineM - input.LossBehindMachineM - input.TailwaterM, input.NetHeadM, 9);
+        }
+    }
+
+    [Fact]
+    public void The_section_stays_readable_while_the_flow_runs_from_nothing_to_more_than_full()
+    {
+        foreach (var name in Scenarios.Names)
+        {
+            var result = Scenarios.Get(name);
+            foreach (var size in AllDrawings.Sizes.Values)
+            {
+                for (var step = 0; step <= 16; step++)
+                {
+                    var drawing = SchemeSection.Draw(result, result.Show(), size, result.Flow.DesignFlowM3PerS * step / 12);
+                    var boxes = drawing.Operations.OfType<TextOperation>().Select(t => LabelBox.Of(t.At, t.Content, t.Style)).ToList();
+                    for (var i = 0; i < boxes.Count; i++)
+                    {
+                        Assert.True(boxes[i].LiesWithin(0, 0, drawing.Width, drawing.Height));
+                        for (var k = i + 1; k < boxes.Count; k++)
+                            Assert.False(boxes[i].Touches(boxes[k], 0), $"{name} at step {step}");
+                    }
+                }
+            }
+        }
+    }
+
+    [Fact]
+    public void Gross_and_net_head_are_always_dimensioned()
+    {
+        foreach (var name in Scenarios.Names)
+        {
+            foreach (var size in AllDrawings.Sizes.Values)
+            {
+                var result = Scenarios.Get(name);
+                var texts = SchemeSection.Draw(result, result.Show(), size).Operations.OfType<TextOperation>().Select(t => t.Content).ToList();
+                Assert.Contains("gross head " + result.Show().Length(result.Head.GrossHeadM), texts);
+                Assert.Contains(texts, t => t.StartsWith("net head ", StringComparison.Ordinal));
+            }
         }
     }
 

@@ -96,8 +96,9 @@ internal static class Spots
                 bottom = Math.Min(bottom, HeightAt(lower, x));
             }
 
+            // Not a number where the label would reach beyond the curves' ends.
             var room = bottom - top - height;
-            if (room < 3)
+            if (!(room >= 3))
                 continue;
             var baseline = ((top + bottom) / 2) + (style.Size * (TextMeasure.AscentRatio - TextMeasure.DescentRatio) / 2);
             found.Add((room, new LabelSpot(new Point(centre, baseline), TextAnchor.Middle)));
