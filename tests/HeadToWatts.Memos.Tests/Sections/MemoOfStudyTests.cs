@@ -170,6 +170,18 @@ public partial class MemoOfStudyTests
         Assert.All(figures, f => Assert.True((f.Element.Data["Alt"] is HexToken hex ? hex.Data : ((StringToken)f.Element.Data["Alt"]).Data).Length > 40));
     }
 
+    [Theory]
+    [MemberData(nameof(SitesAndUnits))]
+    public void No_word_of_a_table_is_broken_inside(string site, string units)
+    {
+        var result = Studies.Of(site);
+        var layout = HeadToWatts.Memos.Layout.MemoLayout.Of(Memo.Document(result, Studies.Show(result, units)));
+        var printed = layout.Pages.SelectMany(p => p.Ops).OfType<HeadToWatts.Memos.Layout.TextOp>().SelectMany(t => t.Text.Split(' ')).ToHashSet();
+        Assert.Contains("Units", printed);
+        Assert.Contains("outside", printed);
+        Assert.Contains("Reserved,", printed);
+    }
+
     [Fact]
     public void A_site_without_usable_water_gets_a_memo_that_says_so()
     {
