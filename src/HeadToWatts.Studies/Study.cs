@@ -57,7 +57,7 @@ public static class Study
             site,
             new FlowResult(
                 curve,
-                supply,
+                new FlowSupply(curve, input.Flow.Allocation),
                 middleFlow,
                 annual.Integral.UsableM3PerS,
                 supply.ShareAtLeast(1e-9),
