@@ -26,12 +26,6 @@ internal static class Schema
             saved_at text not null,
             primary key (study_id, number)
         ) strict;
-        create table attachment (
-            study_id text not null references study (id) on delete cascade,
-            file text not null,
-            content blob not null,
-            primary key (study_id, file)
-        ) strict;
         """,
     ];
 

@@ -5,8 +5,8 @@ using Microsoft.Data.Sqlite;
 namespace HeadToWatts.Storage;
 
 /// <summary>
-/// Studies kept in one SQLite file: the edition being worked on, the versions put aside, and the flow files that came with
-/// them. Each call is one transaction that is on the disk when the call returns. Safe to use from several threads.
+/// Studies kept in one SQLite file: the edition being worked on and the versions put aside. A study holds its own flow record.
+/// Each call is one transaction that is on the disk when the call returns. Safe to use from several threads.
 /// </summary>
 public sealed class StudyStore : IDisposable
 {
@@ -40,21 +40,15 @@ public sealed class StudyStore : IDisposable
     /// <summary>Adds a study.</summary>
     /// <param name="name">Name of the study.</param>
     /// <param name="studyJson">The study file's text.</param>
-    /// <param name="attachments">Flow files by the name under which the study refers to them.</param>
-    public StoredStudy Add(string name, string studyJson, IReadOnlyDictionary<string, byte[]>? attachments = null)
+    public StoredStudy Add(string name, string studyJson)
     {
         ArgumentNullException.ThrowIfNull(name);
         ArgumentNullException.ThrowIfNull(studyJson);
         var study = new StoredStudy(Guid.NewGuid(), name, studyJson, 1, Now());
         using var connection = Connect();
-        using var transaction = connection.BeginTransaction(deferred: false);
         connection.Execute(
             "insert into study (id, name, json, edition, changed_at) values (@id, @name, @json, 1, @at)",
-            new { id = Key(study.Id), name, json = studyJson, at = Text(study.ChangedAt) },
-            transaction);
-        foreach (var (file, content) in attachments ?? new Dictionary<string, byte[]>())
-            PutAttachment(connection, transaction, study.Id, file, content);
-        transaction.Commit();
+            new { id = Key(study.Id), name, json = studyJson, at = Text(study.ChangedAt) });
         return study;
     }
 
@@ -107,7 +101,7 @@ public sealed class StudyStore : IDisposable
         ];
     }
 
-    /// <summary>Takes a study away, with its versions and files.</summary>
+    /// <summary>Takes a study away with its versions.</summary>
     /// <param name="id">Identity.</param>
     /// <returns>True when it was there.</returns>
     public bool Remove(Guid id)
@@ -162,37 +156,6 @@ public sealed class StudyStore : IDisposable
         return connection.QuerySingleOrDefault<string>("select json from version where study_id = @id and number = @number", new { id = Key(id), number });
     }
 
-    /// <summary>Keeps a flow file with a study, in place of one of the same name.</summary>
-    /// <param name="id">Identity of the study.</param>
-    /// <param name="file">Name under which the study refers to it.</param>
-    /// <param name="content">The file.</param>
-    public void PutAttachment(Guid id, string file, byte[] content)
-    {
-        ArgumentNullException.ThrowIfNull(content);
-        using var connection = Connect();
-        using var transaction = connection.BeginTransaction(deferred: false);
-        PutAttachment(connection, transaction, id, file, content);
-        transaction.Commit();
-    }
-
-    /// <summary>The flow files kept with a study, by name.</summary>
-    /// <param name="id">Identity of the study.</param>
-    public IReadOnlyList<string> Attachments(Guid id)
-    {
-        using var connection = Connect();
-        return [.. connection.Query<string>("select file from attachment where study_id = @id order by file", new { id = Key(id) })];
-    }
-
-    /// <summary>A flow file kept with a study.</summary>
-    /// <param name="id">Identity of the study.</param>
-    /// <param name="file">Its name.</param>
-    /// <returns>The file, or null when there is none of that name.</returns>
-    public byte[]? Attachment(Guid id, string file)
-    {
-        using var connection = Connect();
-        return connection.QuerySingleOrDefault<byte[]>("select content from attachment where study_id = @id and file = @file", new { id = Key(id), file });
-    }
-
     /// <summary>Writes a whole copy of the store to a new file; copying the database file itself could miss the latest changes.</summary>
     /// <param name="path">The new file; it must not be there yet.</param>
     public void BackUp(string path)
@@ -209,12 +172,6 @@ public sealed class StudyStore : IDisposable
         using var connection = new SqliteConnection(_connectionText);
         SqliteConnection.ClearPool(connection);
     }
-
-    private static void PutAttachment(SqliteConnection connection, SqliteTransaction transaction, Guid id, string file, byte[] content) =>
-        connection.Execute(
-            "insert into attachment (study_id, file, content) values (@id, @file, @content) on conflict (study_id, file) do update set content = excluded.content",
-            new { id = Key(id), file, content },
-            transaction);
 
     private SqliteConnection Connect()
     {

@@ -1,6 +1,7 @@
 using HeadToWatts.Storage;
 using HeadToWatts.Web.Components;
 using HeadToWatts.Web.Hosting;
+using HeadToWatts.Web.Sessions;
 using Microsoft.AspNetCore.DataProtection;
 using Radzen;
 
@@ -19,6 +20,8 @@ LocalHost.Configure(builder);
 var data = DataFolder.From(builder.Configuration);
 builder.Services.AddDataProtection().SetApplicationName("HeadToWatts").PersistKeysToFileSystem(new DirectoryInfo(Path.Combine(data, "keys")));
 builder.Services.AddSingleton(_ => StudyStore.Open(data));
+builder.Services.AddSingleton(TimeProvider.System);
+builder.Services.AddScoped<StudySession>();
 builder.Services.AddRadzenComponents();
 builder.Services.AddRazorComponents().AddInteractiveServerComponents();
 
@@ -29,6 +32,7 @@ app.UseMiddleware<SameOriginOnly>();
 app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
 app.UseAntiforgery();
 app.MapStaticAssets();
+StudyFilesEndpoints.Map(app);
 app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
 app.Run();
 

@@ -19,7 +19,7 @@ public sealed class StudyStoreTests : IDisposable
         Guid id;
         using (var store = StudyStore.Open(_folder))
         {
-            id = store.Add("Drop 7", "{\"a\":1}", new Dictionary<string, byte[]> { ["flow.csv"] = [1, 2, 3] }).Id;
+            id = store.Add("Drop 7", "{\"a\":1}").Id;
             Assert.Equal(SaveEnd.Saved, store.Save(id, 1, "Drop 7, wider pipe", "{\"a\":2}").End);
         }
 
@@ -29,8 +29,6 @@ public sealed class StudyStoreTests : IDisposable
         Assert.Equal("Drop 7, wider pipe", found.Name);
         Assert.Equal("{\"a\":2}", found.StudyJson);
         Assert.Equal(2, found.Edition);
-        Assert.Equal(["flow.csv"], again.Attachments(id));
-        Assert.Equal([1, 2, 3], again.Attachment(id, "flow.csv"));
     }
 
     [Fact]
@@ -97,14 +95,13 @@ public sealed class StudyStoreTests : IDisposable
     }
 
     [Fact]
-    public void Removing_a_study_takes_its_versions_and_files_with_it()
+    public void Removing_a_study_takes_its_versions_with_it()
     {
         using var store = StudyStore.Open(_folder);
-        var study = store.Add("A", "{}", new Dictionary<string, byte[]> { ["f"] = [1] });
+        var study = store.Add("A", "{}");
         store.PutAside(study.Id, "");
         store.Remove(study.Id);
         Assert.Empty(store.Versions(study.Id));
-        Assert.Empty(store.Attachments(study.Id));
     }
 
     [Fact]

@@ -35,7 +35,7 @@ internal static class FieldText
             .Select(unit => (unit, value: unit.FromHeld(held)))
             .Where(x => dimension is Dimension.Temperature || x.value == 0 || Math.Abs(x.value) is >= 0.01 and < 1e6)
             .Take(3)
-            .Select(x => Round(x.value, 4) + " " + x.unit.Symbol));
+            .Select(x => Round(x.value, 4) + " " + Shown(x.unit)));
 
     /// <summary>True when the text may still become a quantity: nothing yet, a sign, or the first letters of a unit.</summary>
     public static bool IsUnfinished(string typed, Dimension dimension)
@@ -55,6 +55,16 @@ internal static class FieldText
             unit.Symbol.StartsWith(begun, StringComparison.OrdinalIgnoreCase)
             || unit.Aliases.Any(alias => alias.StartsWith(begun, StringComparison.OrdinalIgnoreCase)));
     }
+
+    /// <summary>A unit as it stands beside a number on the screen.</summary>
+    public static string Shown(UnitOfMeasure unit) => unit.Symbol switch
+    {
+        "degC" => "°C",
+        "degF" => "°F",
+        "deg" => "°",
+        "m3/s" => "m³/s",
+        _ => unit.Symbol,
+    };
 
     /// <summary>True when something other than a number is written.</summary>
     public static bool HasUnit(string text) => !double.TryParse(text.Replace(" ", "", StringComparison.Ordinal).Replace(",", "", StringComparison.Ordinal).Replace('\u2212', '-'), NumberStyles.Float, CultureInfo.InvariantCulture, out _);

@@ -60,6 +60,18 @@
     receivers: new Map(),
     receivePaste: (id, receiver) => { window.headToWatts.receivers.set(id, receiver); },
     stopReceiving: id => { window.headToWatts.receivers.delete(id); },
-    isNarrow: () => matchMedia("(max-width: 760px)").matches,
+    // Tells the page how wide the window is, now and after it was resized.
+    watchWidth: receiver => {
+      let told = 0, timer = 0;
+      const tell = () => {
+        const width = document.documentElement.clientWidth;
+        if (Math.abs(width - told) < 8) return;
+        told = width;
+        receiver.invokeMethodAsync("WindowWidthAsync", width).catch(() => removeEventListener("resize", later));
+      };
+      const later = () => { clearTimeout(timer); timer = setTimeout(tell, 150); };
+      addEventListener("resize", later);
+      tell();
+    },
   };
 })();

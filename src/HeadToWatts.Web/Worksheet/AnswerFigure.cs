@@ -1,4 +1,4 @@
-namespace HeadToWatts.Web.Study;
+namespace HeadToWatts.Web.Worksheet;
 
 /// <summary>One figure of the answer that is always in view.</summary>
 /// <param name="Key">Identity of the figure.</param>

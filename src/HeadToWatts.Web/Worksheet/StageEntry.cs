@@ -1,4 +1,4 @@
-namespace HeadToWatts.Web.Study;
+namespace HeadToWatts.Web.Worksheet;
 
 /// <summary>One stage at the side.</summary>
 /// <param name="Key">The last part of its address.</param>

@@ -1,0 +1,65 @@
+using System.Text.RegularExpressions;
+using HeadToWatts.Basis.Problems;
+
+namespace HeadToWatts.Web.Sessions;
+
+/// <summary>Turns the place of a problem in a study file into the words that stand beside the field on the screen.</summary>
+public static partial class FieldNames
+{
+    private static readonly Dictionary<string, string> Words = new(StringComparer.Ordinal)
+    {
+        ["name"] = "name", ["units"] = "units", ["alternatives"] = "alternatives", ["study"] = "study",
+        ["site"] = "site", ["latitude"] = "latitude", ["elevation"] = "elevation", ["waterTemperature"] = "water temperature", ["gridFrequency"] = "grid frequency",
+        ["flow"] = "flow", ["curve"] = "row", ["exceeded"] = "percent exceeded", ["rowsAreFor"] = "what the percentages count", ["beyondLastRow"] = "beyond the last row",
+        ["record"] = "daily record", ["file"] = "file", ["unit"] = "unit", ["dateOrder"] = "order of day and month", ["column"] = "column", ["firstDay"] = "first day", ["days"] = "days",
+        ["plottingPosition"] = "plotting position", ["season"] = "season", ["reservedFlow"] = "reserved flow", ["priorDeliveries"] = "prior deliveries", ["designFlow"] = "design flow",
+        ["head"] = "head", ["gross"] = "gross head", ["headwater"] = "headwater level", ["tailwater"] = "tailwater level",
+        ["headwaterByMonth"] = "headwater, month", ["tailwaterByMonth"] = "tailwater, month", ["headwaterRating"] = "headwater, row", ["tailwaterRating"] = "tailwater, row", ["level"] = "level",
+        ["headwaterCrest"] = "headwater crest", ["coefficient"] = "coefficient",
+        ["waterway"] = "waterway", ["friction"] = "friction formula", ["kineticEnergyCoefficient"] = "kinetic energy coefficient", ["elements"] = "pipe",
+        ["length"] = "length", ["insideDiameter"] = "inside diameter", ["material"] = "material", ["roughness"] = "roughness", ["hazenWilliamsC"] = "Hazen-Williams C", ["manningN"] = "Manning n",
+        ["fittings"] = "fitting", ["fitting"] = "kind", ["k"] = "K", ["count"] = "how many", ["wallThickness"] = "wall thickness", ["pressureRating"] = "pressure rating", ["endElevation"] = "elevation at its lower end",
+        ["turbine"] = "turbine", ["type"] = "type", ["efficiencyTable"] = "efficiency row", ["efficiency"] = "efficiency", ["leastFlow"] = "least flow",
+        ["losses"] = "from shaft to meter", ["drive"] = "gear or belt", ["generator"] = "generator", ["transformer"] = "transformer", ["line"] = "line", ["ownUse"] = "own use", ["availability"] = "availability",
+    };
+
+    /// <summary>The place in words, as "waterway, pipe 1, inside diameter". A place that is not a field stays as it is.</summary>
+    /// <param name="where">Place of the problem.</param>
+    public static string Of(string where)
+    {
+        ArgumentNullException.ThrowIfNull(where);
+        var path = AlternativePrefix().Replace(where, "");
+        if (path.Length == 0 || !PathPattern().IsMatch(path))
+            return where;
+        var words = new List<string>();
+        foreach (var part in path.Split('.'))
+        {
+            var open = part.IndexOf('[', StringComparison.Ordinal);
+            var name = open < 0 ? part : part[..open];
+            if (!Words.TryGetValue(name, out var word))
+                return where;
+            words.Add(open < 0 ? word : $"{word} {int.Parse(part[(open + 1)..^1], System.Globalization.CultureInfo.InvariantCulture) + 1}");
+        }
+
+        return string.Join(", ", words);
+    }
+
+    /// <summary>A problem as a sentence: where, what was read, why, what is accepted.</summary>
+    /// <param name="problem">The problem.</param>
+    public static string Sentence(Problem problem)
+    {
+        ArgumentNullException.ThrowIfNull(problem);
+        var read = problem.Read.Length == 0 ? "" : problem.Read[0] is '"' or '{' or '[' ? $" {problem.Read}:" : $" “{problem.Read}”:";
+        var where = Of(problem.Where);
+        if (where != problem.Where)
+            where = char.ToUpperInvariant(where[0]) + where[1..];
+        var accepted = problem.Accepted.Length == 0 ? "" : $" Accepted: {problem.Accepted}.";
+        return $"{where}:{read} {problem.Why}.{accepted}";
+    }
+
+    [GeneratedRegex(@"^alternatives\[\d+\]\.?")]
+    private static partial Regex AlternativePrefix();
+
+    [GeneratedRegex(@"^[A-Za-z]+(\[\d+\])?(\.[A-Za-z]+(\[\d+\])?)*$")]
+    private static partial Regex PathPattern();
+}
