@@ -1,3 +1,4 @@
+using HeadToWatts.Basis;
 using HeadToWatts.FlowRecords;
 
 namespace HeadToWatts.EnergyYield;
@@ -19,7 +20,15 @@ public sealed record YearEnergy(int Year, double EnergyKwh, int Days, bool IsWho
 /// <summary>The plant run on every day of a record: months and years. Days without a flow are left out, not read as zero.</summary>
 /// <param name="Months">Twelve months.</param>
 /// <param name="Years">The record's calendar years in order.</param>
-public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<YearEnergy> Years)
+/// <param name="MeanOfDaysKwh">Mean power of the season's days, over the season's share of 8760 h, kWh a year: the sum over the days that the duration curve must equal.</param>
+/// <param name="LongestStandstillDays">Longest run of successive days inside the season without power, days; a day without a flow ends no run and adds nothing.</param>
+/// <param name="StandstillFrom">First day of that run; null when the plant never stands.</param>
+public sealed record DailyRun(
+    IReadOnlyList<MonthEnergy> Months,
+    IReadOnlyList<YearEnergy> Years,
+    double MeanOfDaysKwh,
+    int LongestStandstillDays,
+    DateOnly? StandstillFrom)
 {
     private static readonly int[] DaysOfMonth = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
 
@@ -32,17 +41,18 @@ public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<Y
     /// <summary>
     /// Energy reached or exceeded in nine years out of ten, kWh, by the Weibull position among the whole years; null with fewer than ten of them.
     /// </summary>
-    public double? DryYearKwh
+    public double? DryYearKwh => WholeYearsKwh.Count < 10 ? null : ReachedIn(0.9);
+
+    /// <summary>Energy reached or exceeded in half of the whole years, kWh; null with fewer than three of them.</summary>
+    public double? MedianYearKwh => WholeYearsKwh.Count < 3 ? null : ReachedIn(0.5);
+
+    // Weibull: the year of rank r among n (lowest first) is reached or exceeded with 1 - r/(n + 1).
+    private double ReachedIn(double shareOfYears)
     {
-        get
-        {
-            var years = WholeYearsKwh;
-            if (years.Count < 10)
-                return null;
-            var rank = (0.1 * (years.Count + 1)) - 1;
-            var low = (int)Math.Floor(rank);
-            return years[low] + ((rank - low) * (years[Math.Min(low + 1, years.Count - 1)] - years[low]));
-        }
+        var years = WholeYearsKwh;
+        var rank = Math.Clamp(((1 - shareOfYears) * (years.Count + 1)) - 1, 0, years.Count - 1);
+        var low = (int)Math.Floor(rank);
+        return years[low] + ((rank - low) * (years[Math.Min(low + 1, years.Count - 1)] - years[low]));
     }
 
     /// <summary>Runs the plant over a record.</summary>
@@ -84,6 +94,10 @@ public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<Y
         var flows = record.Flows;
         var day = record.FirstDay;
         var (year, yearKwh, yearDays) = (day.Year, 0.0, 0);
+        var seasonSum = 0.0;
+        var seasonDays = 0;
+        int run = 0, longest = 0;
+        DateOnly runFrom = day, longestFrom = day;
         for (var i = 0; i < flows.Length; i++, day = day.AddDays(1))
         {
             if (day.Year != year)
@@ -94,12 +108,29 @@ public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<Y
 
             if (double.IsNaN(flows[i]))
                 continue;
-            var arriving = season.Runs(day) ? flows[i] : 0;
+            var runs = season.Runs(day);
+            var arriving = runs ? Math.Max(0, flows[i]) : 0;
             var month = day.Month - 1;
             if (!known[month].TryGetValue(arriving, out var powerKw))
             {
                 powerKw = plants[month].At(allocations[month].Split(arriving).UsableM3PerS).MeterPowerKw * availability;
                 known[month].Add(arriving, powerKw);
+            }
+
+            if (runs)
+            {
+                seasonSum += powerKw;
+                seasonDays++;
+                if (powerKw > 0)
+                    run = 0;
+                else if (++run == 1)
+                    runFrom = day;
+                if (run > longest)
+                    (longest, longestFrom) = (run, runFrom);
+            }
+            else
+            {
+                run = 0;
             }
 
             powerSum[month] += powerKw;
@@ -117,7 +148,8 @@ public sealed record DailyRun(IReadOnlyList<MonthEnergy> Months, IReadOnlyList<Y
             months[m] = new MonthEnergy(m + 1, n == 0 ? 0 : powerSum[m] / n * 24 * DaysOfMonth[m], n == 0 ? 0 : flowSum[m] / n, n);
         }
 
-        return new DailyRun(months, years);
+        var meanOfDaysKwh = seasonDays == 0 ? 0 : seasonSum / seasonDays * season.ShareOfYear * PhysicalConstants.HoursPerYear;
+        return new DailyRun(months, years, meanOfDaysKwh, longest, longest > 0 ? longestFrom : null);
 
         void CloseYear() =>
             years.Add(new YearEnergy(year, yearKwh, yearDays, yearDays >= 0.95 * (DateTime.IsLeapYear(year) ? 366 : 365)));

@@ -79,6 +79,20 @@ public sealed class FlowDurationCurve
         return RecordCurve.Build(record, position, season);
     }
 
+    /// <summary>
+    /// The days of a record in order of size, each with an equal share of the season: steps, not lines. Sums over it equal sums
+    /// over the days themselves; a plotting position, which only places flows on a chart, has no part in it.
+    /// </summary>
+    /// <param name="record">The record.</param>
+    /// <param name="season">Days of operation.</param>
+    /// <exception cref="ArgumentException">The record has no valid day in the season.</exception>
+    public static FlowDurationCurve OfDays(DailyRecord record, OperatingSeason season)
+    {
+        ArgumentNullException.ThrowIfNull(record);
+        ArgumentNullException.ThrowIfNull(season);
+        return RecordCurve.Steps(record, season);
+    }
+
     /// <summary>The flow reached or exceeded in a share of the time, m3/s; at a vertical step the upper flow.</summary>
     /// <param name="exceedance">Share of the time, 0 to 1.</param>
     /// <exception cref="ArgumentOutOfRangeException">Not within 0 to 1.</exception>

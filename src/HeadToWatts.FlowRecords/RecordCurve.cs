@@ -5,22 +5,8 @@ internal static class RecordCurve
 {
     public static FlowDurationCurve Build(DailyRecord record, PlottingPosition position, OperatingSeason season)
     {
-        var flows = record.Flows;
-        var ranked = new double[record.ValidCount];
-        var n = 0;
-        for (var i = 0; i < flows.Length; i++)
-        {
-            if (!double.IsNaN(flows[i]) && season.Runs(record.MonthOf(i), record.DayOfMonthOf(i)))
-                ranked[n++] = Math.Max(0, flows[i]);
-        }
-
-        if (n == 0)
-            throw new ArgumentException("The record has no valid day in the season.", nameof(record));
-
-        Array.Resize(ref ranked, n);
-        Array.Sort(ranked);
-        Array.Reverse(ranked);
-
+        var ranked = Ranked(record, season);
+        var n = ranked.Length;
         var exceedances = new List<double>();
         var kept = new List<double>();
         for (var first = 0; first < n;)
@@ -53,5 +39,50 @@ internal static class RecordCurve
             exceedances.Add(exceedance);
             kept.Add(flowM3PerS);
         }
+    }
+
+    /// <summary>Every day of the season holds an equal share of it: steps in place of lines.</summary>
+    public static FlowDurationCurve Steps(DailyRecord record, OperatingSeason season)
+    {
+        var ranked = Ranked(record, season);
+        var n = ranked.Length;
+        var exceedances = new List<double>();
+        var kept = new List<double>();
+        for (var first = 0; first < n;)
+        {
+            var last = first;
+            while (last + 1 < n && ranked[last + 1] == ranked[first])
+                last++;
+            exceedances.Add((double)first / n);
+            kept.Add(ranked[first]);
+            exceedances.Add((double)(last + 1) / n);
+            kept.Add(ranked[first]);
+            first = last + 1;
+        }
+
+        var rows = new CurvePoint[kept.Count];
+        for (var i = 0; i < rows.Length; i++)
+            rows[i] = new CurvePoint(exceedances[i], kept[i]);
+        return new FlowDurationCurve([.. exceedances], [.. kept], rows, BeyondLastRow.Hold).ForSeasonShare(season.ShareOfYear);
+    }
+
+    // The valid days of the season, largest flow first.
+    private static double[] Ranked(DailyRecord record, OperatingSeason season)
+    {
+        var flows = record.Flows;
+        var ranked = new double[record.ValidCount];
+        var n = 0;
+        for (var i = 0; i < flows.Length; i++)
+        {
+            if (!double.IsNaN(flows[i]) && season.Runs(record.MonthOf(i), record.DayOfMonthOf(i)))
+                ranked[n++] = Math.Max(0, flows[i]);
+        }
+
+        if (n == 0)
+            throw new ArgumentException("The record has no valid day in the season.", nameof(record));
+        Array.Resize(ref ranked, n);
+        Array.Sort(ranked);
+        Array.Reverse(ranked);
+        return ranked;
     }
 }

@@ -16,7 +16,7 @@ internal static class RatedHead
             return input;
         if (input.Flow.DesignFlowM3PerS is { } given)
             return At(input, given);
-        var supply = new FlowSupply(input.Flow.CurveOfYear(), input.Flow.Allocation);
+        var supply = new FlowSupply(input.Flow.EnergyCurve(), input.Flow.Allocation);
         return At(input, supply.UsableAtM3PerS(DesignFlowScan.LeastShareOfLastKw));
     }
 

@@ -33,7 +33,7 @@ public static class Study
         input = RatedHead.Settle(input);
         var site = SiteConditions.At(input.Site.LatitudeRad, input.Site.ElevationM, input.Site.WaterTemperatureDegC);
         var curve = input.Flow.CurveOfYear();
-        var supply = new FlowSupply(curve, input.Flow.Allocation);
+        var supply = new FlowSupply(input.Flow.EnergyCurve(), input.Flow.Allocation);
         var waterway = input.Waterway.Build();
         var choice = PlantChoice.Make(input, site, waterway, supply);
         var designFlow = choice.DesignFlowM3PerS;
@@ -57,7 +57,7 @@ public static class Study
             site,
             new FlowResult(
                 curve,
-                supply,
+                new FlowSupply(curve, input.Flow.Allocation),
                 middleFlow,
                 annual.Integral.UsableM3PerS,
                 supply.ShareAtLeast(1e-9),

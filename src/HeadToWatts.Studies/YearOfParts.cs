@@ -55,6 +55,6 @@ internal sealed record YearOfParts(IReadOnlyList<YearPart> Parts, PlantCurve Rep
         if (spans.Count == 0)
             return null;
         var season = OperatingSeason.Spans(spans);
-        return flow.Record!.ValidDaysIn(season) == 0 ? null : FlowDurationCurve.FromRecord(flow.Record, flow.PlottingPosition, season);
+        return flow.Record!.ValidDaysIn(season) == 0 ? null : FlowDurationCurve.OfDays(flow.Record, season);
     }
 }

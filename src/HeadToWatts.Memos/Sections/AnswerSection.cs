@@ -114,9 +114,13 @@ internal static class AnswerSection
 
     private static string? DryYear(MemoContext memo) => memo.Result.Energy.Days?.DryYearKwh is { } dry ? UnitDisplay.Energy(dry) : null;
 
+    // The first sentence, and the second where the first is too short to say anything.
     private static string FirstSentence(string text)
     {
+        const int enough = 60;
         var end = text.IndexOf(". ", StringComparison.Ordinal);
+        if (end >= 0 && end < enough)
+            end = text.IndexOf(". ", end + 1, StringComparison.Ordinal);
         return end < 0 ? text : text[..(end + 1)];
     }
 

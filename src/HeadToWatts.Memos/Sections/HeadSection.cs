@@ -15,8 +15,11 @@ internal static class HeadSection
         var show = memo.Show;
         body.Section("Head and losses", "head");
         var losses = result.Waterway.AtDesign;
-        body.Say($"Of {show.Length(result.Head.GrossHeadM)} gross head, {show.Length(losses.TotalLossM)} ({MemoContext.Percent(result.Waterway.LossShareOfGrossHead)}) is lost at the design flow. The loss falls with the flow, so every flow has its own net head (" + RichText.See("tab-net-head") + "); that is what the energy is reckoned with. The two water levels are held constant; if the tailwater rises with the flow, head is lost that is not in these figures.");
+        body.Say($"Of {show.Length(result.Head.GrossHeadM)} gross head, {show.Length(losses.TotalLossM)} ({MemoContext.Percent(result.Waterway.LossShareOfGrossHead)}) is lost at the design flow. The loss falls with the flow, so every flow has its own net head (" + RichText.See("tab-net-head") + "); that is what the energy is reckoned with. " + (result.Input.Head.Moves
+            ? "The water levels move, and the energy follows them; " + RichText.See("tab-levels") + " shows how."
+            : "The two water levels are held constant; if the tailwater rises with the flow, head is lost that is not in these figures."));
         NetHeads(memo);
+        Levels(memo);
         if (losses.Elements.Count == 0)
         {
             body.Say("There is no waterway before the machine in this study: intake, rack and draft tube are taken to be part of it, without a loss of their own.");
@@ -41,7 +44,24 @@ internal static class HeadSection
             new(MemoContext.Head("Net head", memo.Show.LengthUnit), ColumnAlign.Right),
             new("Net of gross, %", ColumnAlign.Right),
         ],
-        [.. memo.Result.Head.AtShares.Select(p => new TableRow([MemoContext.WholePercent(p.ShareOfDesignFlow), memo.Flow(p.FlowM3PerS), memo.Length(p.LossM), memo.Length(p.NetHeadM), MemoContext.PercentColumn(p.NetHeadM / memo.Result.Head.GrossHeadM)]))]);
+        [.. memo.Result.Head.AtShares.Select(p => new TableRow([MemoContext.WholePercent(p.ShareOfDesignFlow), memo.Flow(p.FlowM3PerS), memo.Length(p.LossM), memo.Length(p.NetHeadM), Share(p.NetHeadM, p.NetHeadM + p.LossM)]))]);
+
+    private static void Levels(MemoContext memo)
+    {
+        var levels = memo.Result.Head.Levels;
+        if (!memo.Result.Input.Head.Moves)
+            return;
+        var unit = memo.Show.LengthUnit;
+        memo.Body.Table("tab-levels", "Water levels where they move, highest flow first.",
+            [
+                new(MemoContext.Head("Flow passing", memo.Show.FlowUnit), ColumnAlign.Right), new(MemoContext.Head("Headwater", unit), ColumnAlign.Right),
+                new(MemoContext.Head("Tailwater", unit), ColumnAlign.Right), new(MemoContext.Head("Gross head", unit), ColumnAlign.Right), new("Remark", Share: 2),
+            ],
+            [.. levels.Select(l => new TableRow([memo.Flow(l.PassingFlowM3PerS), memo.LevelNumber(l.HeadwaterM), memo.LevelNumber(l.TailwaterM), memo.Length(l.GrossHeadM), l.IsOutsideRating ? "outside the level rating; held at its end" : ""]))],
+            memo.Result.Input.Head.MovesWithMonth ? "Levels that go by the month are those of the middle month of the season." : "");
+    }
+
+    private static string Share(double part, double whole) => whole > 0 ? MemoContext.PercentColumn(part / whole) : "–";
 
     private static void Losses(MemoContext memo, WaterwayLosses losses)
     {

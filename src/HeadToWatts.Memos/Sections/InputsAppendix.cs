@@ -1,5 +1,6 @@
 using HeadToWatts.Basis.Units;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Memos.Content;
 
 namespace HeadToWatts.Memos.Sections;
@@ -25,8 +26,8 @@ internal static class InputsAppendix
         };
         if (input.Head.IsFromLevels)
         {
-            rows.Add(Row("Headwater level", memo.Level(input.Head.HeadwaterM)));
-            rows.Add(Row("Tailwater level", memo.Level(input.Head.TailwaterM)));
+            rows.Add(Row("Headwater level", Level(memo, input.Head.HeadwaterRule, input.Head.HeadwaterM)));
+            rows.Add(Row("Tailwater level", Level(memo, input.Head.TailwaterRule, input.Head.TailwaterM)));
         }
         else
         {
@@ -58,6 +59,12 @@ internal static class InputsAppendix
         rows.Add(Row("Own use", $"{MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}"));
         rows.Add(Row("Availability", MemoContext.Percent(train.Availability)));
         body.Table("tab-inputs", "Inputs.", [new("Input", Share: 1), new("Value", Share: 2)], rows);
+        if (input.Assumptions.Count > 0)
+        {
+            body.Say(RichText.Bold("Assumed where nothing was given"), keepWithNext: true);
+            body.Add(ListBlock.Bullets([.. input.Assumptions.Select(a => RichText.Of(MemoContext.Sentence(a)))]));
+        }
+
         Pipes(memo);
         Curve(memo);
     }
@@ -88,6 +95,15 @@ internal static class InputsAppendix
             [new("Exceeded, %", ColumnAlign.Right, 0), new(MemoContext.Head("Flow", memo.Show.FlowUnit), ColumnAlign.Right, 0)], [.. rows],
             curve.Rows.Count > RowsShown ? $"The first {RowsShown} of {curve.Rows.Count} rows." : "");
     }
+
+    private static string Level(MemoContext memo, LevelRule? rule, double levelM) => rule switch
+    {
+        null => memo.Level(levelM),
+        RatedLevel rated => "by a rating: " + string.Join("; ", rated.Points.Select(p => $"{memo.Level(p.LevelM)} at {memo.Show.Flow(p.FlowM3PerS)}")),
+        { FollowsMonth: true } => "by month, January first: " + string.Join("; ", Enumerable.Range(1, 12).Select(month => memo.Level(rule.LevelM(0, month)))),
+        { FollowsFlow: true } => $"over a weir crest at {memo.Level(rule.LevelM(0, 1))}",
+        _ => memo.Level(levelM),
+    };
 
     private static TableRow Row(string name, string value) => new([name, value]);
 }

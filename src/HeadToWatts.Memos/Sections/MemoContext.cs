@@ -39,12 +39,10 @@ internal sealed class MemoContext(StudyResult result, UnitDisplay show)
     public string Length(double lengthM) => UnitDisplay.In(lengthM, Show.LengthUnit);
 
     /// <summary>A water level with a decimal more than a head needs, so that a small head does not vanish between two high levels.</summary>
-    public string Level(double elevationM)
-    {
-        var value = Show.LengthUnit.FromHeld(elevationM);
-        var text = value.ToString(Show.System == UnitSystem.US ? "0.0" : "0.00", CultureInfo.InvariantCulture).Replace('-', '−');
-        return text + " " + Show.LengthUnit.Symbol;
-    }
+    public string Level(double elevationM) => LevelNumber(elevationM) + " " + Show.LengthUnit.Symbol;
+
+    public string LevelNumber(double elevationM) =>
+        Show.LengthUnit.FromHeld(elevationM).ToString(Show.System == UnitSystem.US ? "0.0" : "0.00", CultureInfo.InvariantCulture).Replace('-', '−');
 
     public string Velocity(double velocityMPerS) => UnitDisplay.In(velocityMPerS, Show.VelocityUnit);
 

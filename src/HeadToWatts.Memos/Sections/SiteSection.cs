@@ -15,7 +15,7 @@ internal static class SiteSection
         body.Section("Site and scheme", "site");
         var pipes = input.Waterway.Elements;
         var fall = input.Head.IsFromLevels
-            ? $"The headwater stands at {memo.Level(result.Head.HeadwaterM)} and the tailwater at {memo.Level(result.Head.TailwaterM)}: a gross head of {show.Length(result.Head.GrossHeadM)}."
+            ? (input.Head.Moves ? "At the design flow the" : "The") + $" headwater stands at {memo.Level(result.Head.HeadwaterM)} and the tailwater at {memo.Level(result.Head.TailwaterM)}: a gross head of {show.Length(result.Head.GrossHeadM)}."
             : $"The gross head, given as such, is {show.Length(result.Head.GrossHeadM)}.";
         var way = pipes.Count == 0
             ? "The machine stands at the drop, without a pipe before it."

@@ -37,4 +37,10 @@ public sealed record FlowInput(
             throw new InvalidOperationException("A study needs a typed curve or a daily record.");
         return RowsAreForSeason && Season.ShareOfYear < 1 ? TypedCurve.ForSeasonShare(Season.ShareOfYear) : TypedCurve;
     }
+
+    /// <summary>
+    /// The curve that energy is summed over: the same as <see cref="CurveOfYear"/> for typed rows; with a record every day counts
+    /// by itself, so that the sum over the curve is the sum over the days (decision 0010).
+    /// </summary>
+    public FlowDurationCurve EnergyCurve() => Record is null ? CurveOfYear() : FlowDurationCurve.OfDays(Record, Season);
 }

@@ -4,8 +4,8 @@ using HeadToWatts.FlowRecords;
 namespace HeadToWatts.Studies.Results;
 
 /// <summary>What the study found of the flow.</summary>
-/// <param name="Curve">Curve of the year, dry outside the season.</param>
-/// <param name="Supply">The curve with its allocation.</param>
+/// <param name="Curve">Curve of the year as it is plotted, dry outside the season.</param>
+/// <param name="Supply">The plotted curve with its allocation; energy is summed over the days where there is a record.</param>
 /// <param name="MeanFlowM3PerS">Mean flow arriving over the year, m3/s.</param>
 /// <param name="MeanUsableFlowM3PerS">Mean flow the plant may use, m3/s.</param>
 /// <param name="WetShareOfYear">Share of the year in which some water may be used.</param>

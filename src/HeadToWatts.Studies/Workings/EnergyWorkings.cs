@@ -38,12 +38,28 @@ internal static class EnergyWorkings
             UnitDisplay.Percent(annual.PlantFactor),
             $"{UnitDisplay.Number(annual.FullLoadHours)} full-load hours; {UnitDisplay.Number(annual.RunningHours)} h running.", [EnergyMethods.PlantFactor]);
 
+        if (result.Energy.Days is { } run)
+        {
+            var months = run.SumOfMonthsKwh;
+            var same = annual.AnnualEnergyKwh == 0 || Math.Abs(run.MeanOfDaysKwh - annual.AnnualEnergyKwh) <= 1e-9 * annual.AnnualEnergyKwh;
+            yield return new Working(
+                "day-by-day", StudyStage.Energy, "Energy day by day", "E = 8760 h s Σ P_i/n",
+                $"mean power of the season's days with a flow, over the season's share of the year, {UnitDisplay.Number(result.Input.Flow.Season.ShareOfYear)}",
+                UnitDisplay.Energy(run.MeanOfDaysKwh),
+                (same
+                    ? $"The same as over the duration curve, {UnitDisplay.Energy(annual.AnnualEnergyKwh)}."
+                    : $"Over the duration curve it is {UnitDisplay.Energy(annual.AnnualEnergyKwh)}: where levels or reserved flow change with the month, the curve counts each month by its length, the days by how many of them have a flow.")
+                    + $" The twelve months add up to {UnitDisplay.Energy(months)}; they differ by what gaps and leap days do to single months."
+                    + (run.LongestStandstillDays > 0 ? $" Longest standstill in the season: {run.LongestStandstillDays} days from {run.StandstillFrom:yyyy-MM-dd}." : " It never stands in the season."),
+                [EnergyMethods.AnnualEnergy]);
+        }
+
         if (result.Energy.Days is { DryYearKwh: { } dry } days)
         {
             yield return new Working(
                 "dry-year", StudyStage.Energy, "Energy in a dry year", "E_{90}",
                 $"the energy reached or exceeded in 90 % of {days.WholeYearsKwh.Count} whole years of the record, each run day by day",
-                UnitDisplay.Energy(dry), $"Lowest of those years: {UnitDisplay.Energy(days.WholeYearsKwh[0])}.", []);
+                UnitDisplay.Energy(dry), $"Half of the years reach {UnitDisplay.Energy(days.MedianYearKwh ?? 0)}; lowest {UnitDisplay.Energy(days.WholeYearsKwh[0])}.", []);
         }
 
         var water = annual.Water;

@@ -17,7 +17,7 @@ internal static class FlowWorkings
                 "duration-curve", StudyStage.Flow, "Flow-duration curve", input.PlottingPosition.Method.Formula,
                 $"n = {record.ValidCount.ToString(CultureInfo.InvariantCulture)} days with a flow, {record.FirstDay:yyyy-MM-dd} to {record.LastDay:yyyy-MM-dd}; {record.MissingCount} days without a flow left out; season {input.Season.Describe()}",
                 $"mean {show.Flow(flow.MeanFlowM3PerS)}",
-                "Days outside the season count as no flow. The largest flow holds up to 0 % and the smallest to 100 % exceeded: nothing is extrapolated.",
+                "Days outside the season count as no flow. The plotting position places flows on the chart; energy is summed over the days themselves, each with an equal share of the season.",
                 [input.PlottingPosition.Method, FlowRecordMethods.DurationCurve]);
         }
         else if (input.TypedCurve is { } typed)

@@ -18,7 +18,7 @@ internal static class HeadWorkings
         yield return new Working(
             "gross-head", StudyStage.Head, "Gross head",
             result.Input.Head.IsFromLevels ? "H_g = z_{head} − z_{tail}" : "H_g",
-            result.Input.Head.IsFromLevels ? $"{show.Length(head.HeadwaterM)} − {show.Length(head.TailwaterM)}" : "given by the author",
+            result.Input.Head.IsFromLevels ? $"{Level(head.HeadwaterM, show)} − {Level(head.TailwaterM, show)}" : "given by the author",
             show.Length(head.GrossHeadM),
             head.Levels.Count == 0
                 ? "Levels are held constant over the flows."
@@ -31,5 +31,13 @@ internal static class HeadWorkings
             show.Length(head.NetHeadAtDesignM),
             $"{UnitDisplay.Percent(result.Waterway.LossShareOfGrossHead)} of the gross head is lost. Every flow has its own net head in the energy.",
             [.. losses.Uses.Select(u => u.Method)]);
+    }
+
+    // Three digits of a high level would hide the fall between two of them: 4310 ft less 4290 ft is not 18.5 ft.
+    private static string Level(double elevationM, UnitDisplay show)
+    {
+        var value = Math.Abs(show.LengthUnit.FromHeld(elevationM));
+        var whole = value < 1 ? 1 : (int)Math.Floor(Math.Log10(value)) + 1;
+        return UnitDisplay.In(elevationM, show.LengthUnit, whole + (show.System == UnitSystem.US ? 1 : 2)) + " " + show.LengthUnit.Symbol;
     }
 }

@@ -38,6 +38,16 @@ public class ExportTests
     }
 
     [Fact]
+    public void The_days_and_the_duration_curve_give_the_same_energy()
+    {
+        var energy = Larkspur[0].Energy;
+        Assert.Equal(1, energy.Days!.MeanOfDaysKwh / energy.Annual.AnnualEnergyKwh, 9);
+        // Twelve whole years; the median lies between the lowest and the highest, the dry year below it.
+        Assert.Equal(12, energy.Days.WholeYearsKwh.Count);
+        Assert.InRange(energy.Days.DryYearKwh!.Value, energy.Days.WholeYearsKwh[0], energy.Days.MedianYearKwh!.Value);
+    }
+
+    [Fact]
     public void Every_field_of_the_results_is_documented()
     {
         using var json = JsonDocument.Parse(ResultsJson.Write(Larkspur));

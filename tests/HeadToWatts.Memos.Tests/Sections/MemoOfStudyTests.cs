@@ -170,6 +170,18 @@ public partial class MemoOfStudyTests
         Assert.All(figures, f => Assert.True((f.Element.Data["Alt"] is HexToken hex ? hex.Data : ((StringToken)f.Element.Data["Alt"]).Data).Length > 40));
     }
 
+    [Theory]
+    [MemberData(nameof(SitesAndUnits))]
+    public void No_word_of_a_table_is_broken_inside(string site, string units)
+    {
+        var result = Studies.Of(site);
+        var layout = HeadToWatts.Memos.Layout.MemoLayout.Of(Memo.Document(result, Studies.Show(result, units)));
+        var printed = layout.Pages.SelectMany(p => p.Ops).OfType<HeadToWatts.Memos.Layout.TextOp>().SelectMany(t => t.Text.Split(' ')).ToHashSet();
+        Assert.Contains("Units", printed);
+        Assert.Contains("outside", printed);
+        Assert.Contains("Reserved,", printed);
+    }
+
     [Fact]
     public void A_site_without_usable_water_gets_a_memo_that_says_so()
     {
@@ -177,6 +189,48 @@ public partial class MemoOfStudyTests
         using var read = new ReadBack(Memo.Make(result, result.Show()));
         Assert.Contains("this site would make no energy", read.PageTexts[0], StringComparison.Ordinal);
         Assert.Contains("Hazards", read.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Levels_that_move_are_shown_with_the_flow_and_are_not_called_constant()
+    {
+        var result = Studies.Changed("larkspur-drop", d =>
+        {
+            d.Alternatives[0].Head.Tailwater = null;
+            d.Alternatives[0].Head.TailwaterRating =
+            [
+                new() { Flow = "20 cfs", Level = "4289.0 ft" },
+                new() { Flow = "250 cfs", Level = "4291.5 ft" },
+            ];
+        });
+        var memo = Memo.Document(result, result.Show());
+        var levels = memo.Blocks.OfType<TableBlock>().Single(t => t.Anchor == "tab-levels");
+        Assert.Equal(result.Head.Levels.Count, levels.Rows.Count);
+        Assert.All(levels.Rows, r => Assert.Equal(Number(r.Cells[1]) - Number(r.Cells[2]), Number(r.Cells[3]), 0.11));
+        var text = string.Join('\n', MemoTexts.Of(memo));
+        Assert.DoesNotContain("held constant", text, StringComparison.Ordinal);
+        Assert.DoesNotContain("hold at every flow", text, StringComparison.Ordinal);
+        Assert.Contains("4289.0 ft at 20.0 cfs", text, StringComparison.Ordinal);
+        Assert.NotEmpty(Memo.Make(result, result.Show()));
+    }
+
+    [Fact]
+    public void What_was_assumed_is_printed_with_the_inputs()
+    {
+        var result = Studies.Changed("larkspur-drop", d => d.Alternatives[0].Site.WaterTemperature = null);
+        Assert.NotEmpty(result.Input.Assumptions);
+        var text = string.Join('\n', MemoTexts.Of(Memo.Document(result, result.Show())));
+        Assert.Contains("Assumed where nothing was given", text, StringComparison.Ordinal);
+        Assert.All(result.Input.Assumptions, a => Assert.Contains(a.TrimEnd('.')[1..], text, StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void The_gross_head_in_the_workings_is_the_difference_of_the_levels_printed()
+    {
+        var result = Studies.Of("larkspur-drop");
+        var working = WorkingsList.Find(result, result.Show(), "gross-head")!;
+        var levels = working.Numbers.Split(" − ").Select(t => double.Parse(t.Split(' ')[0].Replace("\u202f", "", StringComparison.Ordinal), CultureInfo.InvariantCulture)).ToArray();
+        Assert.Equal(result.Show().LengthUnit.FromHeld(result.Head.GrossHeadM), levels[0] - levels[1], 0.051);
     }
 
     [Fact]

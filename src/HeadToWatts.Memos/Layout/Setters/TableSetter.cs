@@ -11,6 +11,7 @@ internal static class TableSetter
     private const double PadXPt = 6;
     private const double PadYPt = 3.2;
     private const int LinesInARow = 36;
+    private const double ShortTextPt = 62;
 
     // A table up to this height is kept in one piece.
     private const double SmallTablePt = 330;
@@ -168,11 +169,20 @@ internal static class TableSetter
         }
     }
 
+    private static double[] Between(double[] narrow, double[] wide, double available)
+    {
+        var from = narrow.Sum();
+        var to = wide.Sum();
+        var ratio = to > from ? (available - from) / (to - from) : 0;
+        return [.. narrow.Select((w, i) => w + (wide[i] - w) * ratio)];
+    }
+
     private static double[] Widths(TableBlock block, double available)
     {
         var count = block.Columns.Count;
         var natural = new double[count];
         var least = new double[count];
+        var wanted = new double[count];
         for (var i = 0; i < count; i++)
         {
             natural[i] = LineBreaker.NaturalWidthPt(block.Columns[i].Head, Look.TablePt, bold: true);
@@ -186,8 +196,7 @@ internal static class TableSetter
                 least[i] = Math.Max(least[i], LineBreaker.WidestWordPt(row.Cells[i], Look.TablePt, bold));
             }
 
-            // Short texts are not broken to make room for long ones.
-            least[i] = Math.Max(least[i], Math.Min(natural[i], 62));
+            wanted[i] = Math.Max(least[i], Math.Min(natural[i], ShortTextPt)) + 2 * PadXPt + 0.01;
             natural[i] += 2 * PadXPt + 0.01;
             least[i] += 2 * PadXPt + 0.01;
         }
@@ -199,10 +208,9 @@ internal static class TableSetter
             return shares <= 0 ? natural : [.. natural.Select((w, i) => w + (available - total) * block.Columns[i].Share / shares)];
         }
 
-        var leastTotal = least.Sum();
-        if (leastTotal >= available)
-            return [.. least.Select(w => w * available / leastTotal)];
-        var ratio = (available - leastTotal) / (total - leastTotal);
-        return [.. natural.Select((w, i) => least[i] + (w - least[i]) * ratio)];
+        // Short texts are broken to make room for long ones only when there is no other way, and words only after that.
+        if (wanted.Sum() <= available)
+            return Between(wanted, natural, available);
+        return least.Sum() <= available ? Between(least, wanted, available) : [.. least.Select(w => w * available / least.Sum())];
     }
 }
