@@ -87,7 +87,7 @@ public static class Study
                 choice.Units.Efficiency,
                 input.Turbine.MakersCurve is not null,
                 choice.Units),
-            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean),
+            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply) },
             StudyMethods.Uses(input, site, losses, surge, choice));
     }
 

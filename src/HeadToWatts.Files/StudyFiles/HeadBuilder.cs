@@ -1,6 +1,7 @@
 using HeadToWatts.Basis.Quantities;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Hydraulics.Levels;
+using HeadToWatts.Hydraulics.Water;
 using HeadToWatts.Studies.Inputs;
 
 namespace HeadToWatts.Files.StudyFiles;
@@ -11,30 +12,37 @@ internal static class HeadBuilder
     private const double LowestLevelM = -430;
     private const double HighestLevelM = 9000;
 
-    internal static HeadInput? Build(HeadDocument d, string path, FieldReader read)
+    internal static HeadInput? Build(HeadDocument d, string path, SiteInput place, FieldReader read)
     {
         var before = read.Problems.Count;
-        var head = Ways(d.Headwater, d.HeadwaterByMonth, d.HeadwaterRating, d.HeadwaterCrest);
-        var tail = Ways(d.Tailwater, d.TailwaterByMonth, d.TailwaterRating, null);
-        if (!string.IsNullOrWhiteSpace(d.Gross))
+        var site = SiteConditions.At(place.LatitudeRad, place.ElevationM, place.WaterTemperatureDegC);
+        var head = Ways(d.Headwater, d.HeadwaterByMonth, d.HeadwaterRating, d.HeadwaterCrest, d.UpstreamPressure);
+        var tail = Ways(d.Tailwater, d.TailwaterByMonth, d.TailwaterRating, null, d.DownstreamPressure);
+        var error = read.Optional(d.Error, Dimension.Length, path + ".error", 0, 100) ?? 0;
+        var direct = (string.IsNullOrWhiteSpace(d.Gross) ? 0 : 1) + (d.Measured is null ? 0 : 1);
+        if (direct + (head + tail > 0 ? 1 : 0) > 1)
         {
-            if (head + tail > 0)
-                read.Refuse(path, d.Gross, "gross head and levels are both given; they could disagree", "either gross, or headwater and tailwater");
-            var gross = read.Quantity(d.Gross, Dimension.Length, path + ".gross", 0.05, 2500);
-            return read.Problems.Count > before ? null : new HeadInput(GrossHead.FromMetres(gross), gross, 0, false);
+            read.Refuse(path, d.Gross, "gross head and levels are both given, or in two ways; they could disagree", "either gross, or measured, or headwater and tailwater");
+            return null;
         }
 
+        if (d.Measured is { } measured)
+            return MeasuredHead.Build(measured, path + ".measured", site, read);
         if (head + tail == 0)
         {
-            read.Quantity(d.Gross, Dimension.Length, path + ".gross", 0.05, 2500);
-            return null;
+            var gross = read.Quantity(d.Gross, Dimension.Length, path + ".gross", 0.05, 2500);
+            return read.Problems.Count > before ? null : new HeadInput(GrossHead.FromMetres(gross), gross, 0, false) { ErrorM = error };
         }
 
-        var headwater = Level(d.Headwater, d.HeadwaterByMonth, d.HeadwaterRating, d.HeadwaterCrest, head, path + ".headwater", read);
-        var tailwater = Level(d.Tailwater, d.TailwaterByMonth, d.TailwaterRating, null, tail, path + ".tailwater", read);
+        var headwater = d.UpstreamPressure is { } up && head == 1
+            ? PressureBuilder.Build(up, path + ".upstreamPressure", site, read)
+            : Level(d.Headwater, d.HeadwaterByMonth, d.HeadwaterRating, d.HeadwaterCrest, head, path + ".headwater", true, read);
+        var tailwater = d.DownstreamPressure is { } down && tail == 1
+            ? PressureBuilder.Build(down, path + ".downstreamPressure", site, read)
+            : Level(d.Tailwater, d.TailwaterByMonth, d.TailwaterRating, null, tail, path + ".tailwater", false, read);
         if (read.Problems.Count > before || headwater is null || tailwater is null)
             return null;
-        return Both(d, path, headwater, tailwater, read);
+        return Both(d, path, headwater, tailwater, read) is { } both ? both with { ErrorM = error } : null;
     }
 
     private static HeadInput? Both(HeadDocument d, string path, LevelRule headwater, LevelRule tailwater, FieldReader read)
@@ -55,14 +63,14 @@ internal static class HeadBuilder
         };
     }
 
-    private static int Ways(string? one, List<string?>? months, List<LevelRowDocument>? rating, CrestDocument? crest) =>
-        (string.IsNullOrWhiteSpace(one) ? 0 : 1) + (months is { Count: > 0 } ? 1 : 0) + (rating is { Count: > 0 } ? 1 : 0) + (crest is null ? 0 : 1);
+    private static int Ways(string? one, List<string?>? months, List<LevelRowDocument>? rating, CrestDocument? crest, PressureDocument? pressure) =>
+        (string.IsNullOrWhiteSpace(one) ? 0 : 1) + (months is { Count: > 0 } ? 1 : 0) + (rating is { Count: > 0 } ? 1 : 0) + (crest is null ? 0 : 1) + (pressure is null ? 0 : 1);
 
-    private static LevelRule? Level(string? one, List<string?>? months, List<LevelRowDocument>? rating, CrestDocument? crest, int ways, string path, FieldReader read)
+    private static LevelRule? Level(string? one, List<string?>? months, List<LevelRowDocument>? rating, CrestDocument? crest, int ways, string path, bool mayFall, FieldReader read)
     {
         if (ways > 1)
         {
-            read.Refuse(path, one, "the level is given in more than one way", "one of: a level, twelve levels by month, a rating, a crest");
+            read.Refuse(path, one, "the level is given in more than one way", "one of: a level, twelve levels by month, a rating, a crest, a pressure");
             return null;
         }
 
@@ -78,7 +86,7 @@ internal static class HeadBuilder
         }
 
         if (rating is { Count: > 0 })
-            return Rating(rating, path + "Rating", read);
+            return Rating(rating, path + "Rating", mayFall, read);
         if (crest is not null)
         {
             var before = read.Problems.Count;
@@ -91,7 +99,7 @@ internal static class HeadBuilder
         return new ConstantLevel(read.Quantity(one, Dimension.Length, path, LowestLevelM, HighestLevelM));
     }
 
-    private static RatedLevel? Rating(List<LevelRowDocument> rows, string path, FieldReader read)
+    private static RatedLevel? Rating(List<LevelRowDocument> rows, string path, bool mayFall, FieldReader read)
     {
         var before = read.Problems.Count;
         var points = rows.Select((r, i) => new LevelPoint(
@@ -105,8 +113,8 @@ internal static class HeadBuilder
         {
             if (points[i].FlowM3PerS <= points[i - 1].FlowM3PerS)
                 read.Refuse($"{path}[{i}].flow", rows[i].Flow, "flows must rise from row to row");
-            if (points[i].LevelM < points[i - 1].LevelM)
-                read.Refuse($"{path}[{i}].level", rows[i].Level, "a level does not fall as the flow rises");
+            if (!mayFall && points[i].LevelM < points[i - 1].LevelM)
+                read.Refuse($"{path}[{i}].level", rows[i].Level, "a tailwater does not fall as the flow rises");
         }
 
         return read.Problems.Count > before ? null : new RatedLevel(points);

@@ -57,7 +57,7 @@ public static class StudyBuilder
             read.Assumed(d.Site.WaterTemperature, Dimension.Temperature, path + ".site.waterTemperature", 0, 40, "10 degC", "The water temperature"),
             read.Assumed(d.Site.GridFrequency, Dimension.Frequency, path + ".site.gridFrequency", 45, 65, "60 Hz", "The grid frequency"));
         var flow = FlowBuilder.Build(d.Flow, path + ".flow", read, files);
-        var head = HeadBuilder.Build(d.Head, path + ".head", read);
+        var head = HeadBuilder.Build(d.Head, path + ".head", site, read);
         var waterway = WaterwayBuilder.Build(d.Waterway, path + ".waterway", read);
         var turbine = TurbineBuilder.Build(d.Turbine, path + ".turbine", read);
         var train = Train(d.Losses, path + ".losses", read);
@@ -71,7 +71,13 @@ public static class StudyBuilder
             waterway,
             turbine,
             train,
-            read.Problems.Count == before ? [.. read.Assumptions] : []);
+            read.Problems.Count == before ? [.. read.Assumptions, .. MonthsWithoutRecord(head, flow)] : []);
+    }
+
+    private static IEnumerable<string> MonthsWithoutRecord(HeadInput? head, FlowInput? flow)
+    {
+        if (head is { MovesWithMonth: true } && flow is { Record: null })
+            yield return "Levels are given by month, but rows of a curve know no months; the level of the season's middle month is used throughout. A daily record would use each month's own.";
     }
 
     private static PowerTrain Train(LossesDocument d, string path, FieldReader read)

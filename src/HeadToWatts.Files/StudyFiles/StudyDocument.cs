@@ -173,6 +173,63 @@ public sealed class HeadDocument
 
     /// <summary>A weir crest that sets the headwater, in place of one level.</summary>
     public CrestDocument? HeadwaterCrest { get; set; }
+
+    /// <summary>Pressure in the pipe above the machine, in place of a headwater level.</summary>
+    public PressureDocument? UpstreamPressure { get; set; }
+
+    /// <summary>Pressure that must remain in the pipe below the machine, in place of a tailwater level.</summary>
+    public PressureDocument? DownstreamPressure { get; set; }
+
+    /// <summary>A head measured on site, in place of the gross head.</summary>
+    public MeasuredHeadDocument? Measured { get; set; }
+
+    /// <summary>Error of the head, a length.</summary>
+    public string? Error { get; set; }
+}
+
+/// <summary>Pressure at a gauge on a pipe.</summary>
+public sealed class PressureDocument
+{
+    /// <summary>Elevation of the gauge.</summary>
+    public string? GaugeElevation { get; set; }
+
+    /// <summary>Pressure.</summary>
+    public string? Pressure { get; set; }
+
+    /// <summary>Twelve pressures, January first, in place of one.</summary>
+    public List<string?>? PressureByMonth { get; set; }
+
+    /// <summary>Pressure against the flow in the pipe, in place of one.</summary>
+    public List<PressureRowDocument>? PressureRating { get; set; }
+
+    /// <summary>Inside diameter of the pipe at the gauge, for the velocity head.</summary>
+    public string? InsideDiameter { get; set; }
+}
+
+/// <summary>A row of pressure against flow.</summary>
+public sealed class PressureRowDocument
+{
+    /// <summary>Flow in the pipe.</summary>
+    public string? Flow { get; set; }
+
+    /// <summary>Pressure at that flow.</summary>
+    public string? Pressure { get; set; }
+}
+
+/// <summary>A head measured on site: a gauge at the foot of a full pipe at rest, or steps of level and staff.</summary>
+public sealed class MeasuredHeadDocument
+{
+    /// <summary>Pressure at the gauge with the pipe full and the water at rest.</summary>
+    public string? Gauge { get; set; }
+
+    /// <summary>Height of the gauge above the tailwater.</summary>
+    public string? GaugeHeight { get; set; }
+
+    /// <summary>Heights read step by step with level and staff.</summary>
+    public List<string?>? Steps { get; set; }
+
+    /// <summary>Error of the gauge (a pressure) or of one step (a length).</summary>
+    public string? Error { get; set; }
 }
 
 /// <summary>A row of a level rating.</summary>

@@ -69,6 +69,19 @@ internal static class StudyDocumentFields
         HeadwaterRating = r.Array("headwaterRating", LevelRow),
         TailwaterRating = r.Array("tailwaterRating", LevelRow),
         HeadwaterCrest = r.Object("headwaterCrest", c => new CrestDocument { Elevation = c.Text("elevation"), Length = c.Text("length"), Coefficient = c.NumberText("coefficient") }),
+        UpstreamPressure = r.Object("upstreamPressure", Pressure),
+        DownstreamPressure = r.Object("downstreamPressure", Pressure),
+        Measured = r.Object("measured", m => new MeasuredHeadDocument { Gauge = m.Text("gauge"), GaugeHeight = m.Text("gaugeHeight"), Steps = m.Texts("steps"), Error = m.Text("error") }),
+        Error = r.Text("error"),
+    };
+
+    private static PressureDocument Pressure(JsonObjectReader r) => new()
+    {
+        GaugeElevation = r.Text("gaugeElevation"),
+        Pressure = r.Text("pressure"),
+        PressureByMonth = r.Texts("pressureByMonth"),
+        PressureRating = r.Array("pressureRating", row => new PressureRowDocument { Flow = row.Text("flow"), Pressure = row.Text("pressure") }),
+        InsideDiameter = r.Text("insideDiameter"),
     };
 
     private static LevelRowDocument LevelRow(JsonObjectReader r) => new() { Flow = r.Text("flow"), Level = r.Text("level") };

@@ -15,7 +15,7 @@ public sealed class RatedLevel : LevelRule
     private readonly double[] _levels;
 
     /// <summary>Makes the rating.</summary>
-    /// <param name="points">At least two points with rising flows and levels that do not fall.</param>
+    /// <param name="points">At least two points with rising flows; a headwater or a pressure may fall with the flow, a tailwater does not.</param>
     public RatedLevel(IReadOnlyList<LevelPoint> points)
     {
         ArgumentNullException.ThrowIfNull(points);
@@ -25,8 +25,8 @@ public sealed class RatedLevel : LevelRule
         {
             if (!double.IsFinite(points[i].FlowM3PerS) || !double.IsFinite(points[i].LevelM) || points[i].FlowM3PerS < 0)
                 throw new ArgumentException("Flows and levels are numbers, flows not below zero.", nameof(points));
-            if (i > 0 && (points[i].FlowM3PerS <= points[i - 1].FlowM3PerS || points[i].LevelM < points[i - 1].LevelM))
-                throw new ArgumentException("Flows rise from point to point and levels do not fall.", nameof(points));
+            if (i > 0 && points[i].FlowM3PerS <= points[i - 1].FlowM3PerS)
+                throw new ArgumentException("Flows rise from point to point.", nameof(points));
         }
 
         _flows = [.. points.Select(p => p.FlowM3PerS)];

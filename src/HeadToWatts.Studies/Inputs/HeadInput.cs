@@ -16,6 +16,12 @@ public sealed record HeadInput(GrossHead Gross, double HeadwaterM, double Tailwa
     /// <summary>Tailwater level by flow or month; null when it stays at <see cref="TailwaterM"/>.</summary>
     public LevelRule? TailwaterRule { get; init; }
 
+    /// <summary>Error of the measured head, m, one standard error or the author's own bound; zero when none is stated.</summary>
+    public double ErrorM { get; init; }
+
+    /// <summary>How the head was measured, in words; empty when it was simply given.</summary>
+    public string Measurement { get; init; } = "";
+
     /// <summary>True when a level moves with the flow or the month.</summary>
     public bool Moves => HeadwaterRule is not null || TailwaterRule is not null;
 

@@ -8,4 +8,13 @@ namespace HeadToWatts.Studies.Results;
 /// <param name="Days">The record run day by day; null without a record.</param>
 /// <param name="Curve">Points of the power curve from zero to the largest usable flow, for drawing.</param>
 /// <param name="PowerAtMeanFlowKwh">What the power at the mean flow times 8760 h would claim, kWh: shown to warn against it.</param>
-public sealed record EnergyResult(PlantCurve Plant, AnnualEnergy Annual, DailyRun? Days, IReadOnlyList<PlantPoint> Curve, double PowerAtMeanFlowKwh);
+public sealed record EnergyResult(PlantCurve Plant, AnnualEnergy Annual, DailyRun? Days, IReadOnlyList<PlantPoint> Curve, double PowerAtMeanFlowKwh)
+{
+    /// <summary>Annual energy with the head lower and higher by its stated error; null when no error is stated.</summary>
+    public EnergyRange? WithHeadError { get; init; }
+}
+
+/// <summary>Annual energy at the two ends of an error.</summary>
+/// <param name="LowKwh">With the head lower by the error, kWh.</param>
+/// <param name="HighKwh">With the head higher by the error, kWh.</param>
+public sealed record EnergyRange(double LowKwh, double HighKwh);

@@ -29,7 +29,8 @@ internal static class EnergyWorkings
             "energy", StudyStage.Energy, "Energy in a mean year", EnergyMethods.AnnualEnergy.Formula,
             $"{UnitDisplay.Number(train.Availability)} × 8760 h × {UnitDisplay.Power(meanKw)}, the mean of the power over the whole curve",
             UnitDisplay.Energy(annual.AnnualEnergyKwh),
-            $"Each flow has its own net head, units and efficiency. Power at the mean flow times 8760 h would claim {UnitDisplay.Energy(result.Energy.PowerAtMeanFlowKwh)}; that is not used.",
+            $"Each flow has its own net head, units and efficiency. Power at the mean flow times 8760 h would claim {UnitDisplay.Energy(result.Energy.PowerAtMeanFlowKwh)}; that is not used."
+                + (result.Energy.WithHeadError is { } range ? $" The error of the head alone, ± {show.Length(result.Input.Head.ErrorM)}, moves it between {UnitDisplay.Energy(range.LowKwh)} and {UnitDisplay.Energy(range.HighKwh)}." : ""),
             [EnergyMethods.AnnualEnergy]);
 
         yield return new Working(

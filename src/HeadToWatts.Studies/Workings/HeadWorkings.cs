@@ -18,8 +18,8 @@ internal static class HeadWorkings
         yield return new Working(
             "gross-head", StudyStage.Head, "Gross head",
             result.Input.Head.IsFromLevels ? "H_g = z_{head} − z_{tail}" : "H_g",
-            result.Input.Head.IsFromLevels ? $"{Level(head.HeadwaterM, show)} − {Level(head.TailwaterM, show)}" : "given by the author",
-            show.Length(head.GrossHeadM),
+            result.Input.Head.IsFromLevels ? $"{Level(head.HeadwaterM, show)} − {Level(head.TailwaterM, show)}" : result.Input.Head.Measurement.Length > 0 ? result.Input.Head.Measurement : "given by the author",
+            show.Length(head.GrossHeadM) + (result.Input.Head.ErrorM > 0 ? " ± " + show.Length(result.Input.Head.ErrorM) : ""),
             head.Levels.Count == 0
                 ? "Levels are held constant over the flows."
                 : $"At the design flow. Levels move: " + string.Join("; ", head.Levels.Select(l => $"{show.Length(l.GrossHeadM)} at {show.Flow(l.PassingFlowM3PerS)}")) + ". Every flow has its own gross head in the energy.", []);

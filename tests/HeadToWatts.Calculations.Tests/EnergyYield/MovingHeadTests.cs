@@ -100,6 +100,16 @@ public class MovingHeadTests
         Assert.True(rating.IsOutside(9));
         Assert.True(rating.IsOutside(0.5));
         Assert.False(rating.IsOutside(2));
-        Assert.Throws<ArgumentException>(() => new RatedLevel([new LevelPoint(1, 10), new LevelPoint(3, 9)]));
+        Assert.Throws<ArgumentException>(() => new RatedLevel([new LevelPoint(1, 10), new LevelPoint(1, 11)]));
+    }
+
+    [Fact]
+    public void A_gauge_on_a_pipe_gives_the_energy_grade()
+    {
+        // Elevation 100 m, 50 m of pressure head, 0.5 m3/s in 0.5 m: V = 2.546 m/s, V^2/2g = 0.3306 m with g = 9.80665 (hand calculation).
+        var level = new PressureLevel(100, new ConstantLevel(50), 0.5, 9.80665);
+        Assert.Equal(150.3306, level.LevelM(0.5, 1), 4);
+        Assert.Equal(150, level.LevelM(0, 1), 12);
+        Assert.True(level.FollowsFlow);
     }
 }
