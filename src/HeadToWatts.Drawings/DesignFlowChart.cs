@@ -80,14 +80,18 @@ public static partial class DesignFlowChart
             frame.Labels.Avoid(LabelBox.Of(new Point(at.X - 6, at.Y - 6), 12, 12));
         }
 
+        // Away from the other line, so that neither label is taken for the other's.
         IEnumerable<LabelSpot> Beside(DesignFlowPoint p)
         {
+            var rightFirst = input.Suggested is not { } suggestion || same || p.DesignFlowM3PerS >= (suggestion.DesignFlowM3PerS + input.Chosen.DesignFlowM3PerS) / 2;
             var x = At(p).X;
             for (var step = 0; step < 10; step++)
             {
                 var y = frame.Bottom - (type.Strong * (0.7 + (1.4 * step)));
-                yield return new LabelSpot(new Point(x + 6, y));
-                yield return new LabelSpot(new Point(x - 6, y), TextAnchor.End);
+                var right = new LabelSpot(new Point(x + 6, y));
+                var left = new LabelSpot(new Point(x - 6, y), TextAnchor.End);
+                yield return rightFirst ? right : left;
+                yield return rightFirst ? left : right;
             }
         }
     }

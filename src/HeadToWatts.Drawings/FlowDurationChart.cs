@@ -86,6 +86,18 @@ public static partial class FlowDurationChart
         if (least)
             LevelLine(leastY, new Stroke(InkRole.Soft, 1, Dash.Dashed));
 
+        if (isCut)
+        {
+            // Beside the place where the curve leaves the picture.
+            var leaves = total.Last(p => p.Y <= frame.Top).X;
+            var line = size.Type.Label;
+            frame.Labels.TryPlace(frame.Canvas, "up to " + Wording.Trimmed(show.Flow(peak)), frame.LabelStyle(InkRole.Soft), [
+                new LabelSpot(new Point(leaves + (line * 0.8), frame.Top + line)),
+                new LabelSpot(new Point(leaves + (line * 2), frame.Top + line)),
+                new LabelSpot(new Point(leaves + (line * 4), frame.Top + line)),
+            ]);
+        }
+
         AreaLabel(turbine, zero, "through the turbine", frame.StrongStyle(InkRole.Water));
         var designText = "design flow " + Wording.Trimmed(show.Flow(input.DesignFlowM3PerS));
         PlaceFirst([designText + ", exceeded " + Wording.Share(input.DesignExceedance), designText], frame.LabelStyle(InkRole.Ochre), designY);
@@ -95,12 +107,6 @@ public static partial class FlowDurationChart
         AreaLabel(total, usable, input.ReservedName, frame.LabelStyle(InkRole.Green));
         AreaLabel(running, turbine, "below least flow", frame.LabelStyle(InkRole.Plum));
         DryLabel();
-        if (isCut)
-        {
-            frame.Labels.TryPlace(frame.Canvas, "up to " + Wording.Trimmed(show.Flow(peak)), frame.LabelStyle(InkRole.Soft),
-                [new LabelSpot(new Point(frame.Left + 14, frame.Top + size.Type.Label)), new LabelSpot(new Point(frame.Left + 34, frame.Top + size.Type.Label)), new LabelSpot(new Point(frame.Left + 70, frame.Top + size.Type.Label))]);
-        }
-
         frame.HoverBands(Hovers(input.Shares, input.ReservedName, show, frame));
         return frame.Canvas.Finish("Flow-duration curve", Describe(input, show), size.Width, size.Height);
 

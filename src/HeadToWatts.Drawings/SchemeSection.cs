@@ -13,7 +13,7 @@ namespace HeadToWatts.Drawings;
 public static partial class SchemeSection
 {
     /// <summary>Draws the section.</summary>
-    /// <exception cref="ArgumentException">There are not two grade points for each pipe, or no gross head.</exception>
+    /// <exception cref="ArgumentException">There are not two grade points for each pipe, or no fall.</exception>
     public static Drawing Draw(SchemeSectionInput input, UnitDisplay show, DrawingSize size)
     {
         ArgumentNullException.ThrowIfNull(input);
@@ -21,7 +21,7 @@ public static partial class SchemeSection
         ArgumentNullException.ThrowIfNull(size);
         if (input.Grades.Count != input.Pipes.Count * 2)
             throw new ArgumentException("Two grade points for each pipe.", nameof(input));
-        if (!(input.GrossHeadM > 0))
+        if (!(input.TopM > input.FootM) || !(input.GrossHeadM >= 0))
             throw new ArgumentException("The headwater lies above the tailwater.", nameof(input));
 
         var at = new SectionLayout(input, show, size);

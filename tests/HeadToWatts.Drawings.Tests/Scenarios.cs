@@ -3,6 +3,7 @@ using HeadToWatts.Basis.Units;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics.Friction;
+using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Hydraulics.LocalLosses;
 using HeadToWatts.Hydraulics.Pipes;
 using HeadToWatts.Hydraulics.Waterways;
@@ -27,6 +28,7 @@ public static class Scenarios
         ["flashy stream"] = FlashyStream(),
         ["overloaded pipe"] = OverloadedPipe(),
         ["steep shaft"] = SteepShaft(),
+        ["rising tailwater"] = RisingTailwater(),
     });
 
     public static IEnumerable<string> Names => Results.Value.Keys;
@@ -96,6 +98,15 @@ public static class Scenarios
         Levels(140, 98),
         [Pipe("shaft", 46, 0.8, "steel-new", "trash-rack", "entrance-bell-mouth", "bend-90", "valve-butterfly")],
         null);
+
+    // Below a river in flood the fall is nearly drowned.
+    private static StudyResult RisingTailwater() => Run(
+        "Cutbank weir",
+        UnitSystem.SI,
+        Typed([(0, 60), (0.05, 30), (0.3, 14), (0.6, 8), (1, 3)], 1, OperatingSeason.WholeYear, Reserve(0.5, 0), 12),
+        Levels(24.0, 20.5) with { TailwaterRule = new RatedLevel([new(0, 20), new(12, 20.5), new(30, 22.4), new(60, 23.7)]) },
+        [Pipe("box culvert", 18, 2.2, "concrete-smooth", "trash-rack", "entrance-rounded")],
+        "kaplan");
 
     private static StudyResult Run(string name, UnitSystem units, FlowInput flow, HeadInput head, IReadOnlyList<PipeElement> pipes, string? type, int? unitCount = null) =>
         Study.Run(

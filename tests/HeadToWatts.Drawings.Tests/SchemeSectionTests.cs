@@ -83,7 +83,7 @@ public sealed class SchemeSectionTests
             var input = SchemeSection.InputOf(result);
             Assert.Equal(result.Energy.Plant.At(result.Flow.DesignFlowM3PerS).NetHeadM, input.NetHeadM, 12);
 
-            // Water energy is accounted for: gross head is net head and every loss, before the machine and behind it.
+            // Energy is accounted for: gross head is net head and every loss, before the machine and behind it.
             var losses = result.Waterway.Waterway.LossM(input.FlowM3PerS, result.Site);
             Assert.Equal(input.GrossHeadM, input.NetHeadM + losses, 9);
             Assert.Equal(input.EnergyAtMachineM - input.LossBehindMachineM - input.TailwaterM, input.NetHeadM, 9);
@@ -111,6 +111,21 @@ public sealed class SchemeSectionTests
                 }
             }
         }
+    }
+
+    [Fact]
+    public void Where_the_tailwater_rises_with_the_flow_the_water_moves_and_the_pipe_and_scale_stay()
+    {
+        var result = Scenarios.Get("rising tailwater");
+        var (low, high) = (SchemeSection.InputOf(result, 6), SchemeSection.InputOf(result, 29.5));
+
+        // 29.5 m3/s for the plant and 0.5 reserved pass: the rating says 22.4 m there, and 20 + 6.5/12 x 0.5 at 6.5.
+        Assert.Equal(22.4, high.TailwaterM, 9);
+        Assert.Equal(20 + (6.5 / 12 * 0.5), low.TailwaterM, 9);
+        Assert.Equal(low.Grades.Select(g => g.CentreLevelM), high.Grades.Select(g => g.CentreLevelM));
+        var (lowDrawn, highDrawn) = (SchemeSection.Draw(low, Si, DrawingSize.Wide), SchemeSection.Draw(high, Si, DrawingSize.Wide));
+        Assert.Equal(PixelsPerMetre(lowDrawn), PixelsPerMetre(highDrawn), 9);
+        Assert.Equal(low.GrossHeadM / high.GrossHeadM, LongestUpright(lowDrawn, 0) / LongestUpright(highDrawn, 0), 6);
     }
 
     [Fact]

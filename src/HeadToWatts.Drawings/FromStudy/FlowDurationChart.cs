@@ -9,6 +9,9 @@ public static partial class FlowDurationChart
     // Enough for any width of paper; a 30-year record would bring ten thousand.
     private const int MostPoints = 600;
 
+    private const int MostParts = 60;
+    private const double PartOfLargest = 0.01;
+
     /// <summary>Draws the chart of a study.</summary>
     public static Drawing Draw(StudyResult result, UnitDisplay show, DrawingSize size) => Draw(InputOf(result), show, size);
 
@@ -34,22 +37,7 @@ public static partial class FlowDurationChart
             if (!isKept)
                 continue;
             if (last >= 0)
-            {
-                var (pHigh, pLow) = (supply.Exceedance[last], supply.Exceedance[i]);
-                var (high, low) = (supply.UsableM3PerS[last], supply.UsableM3PerS[i]);
-                var (arrivingHigh, arrivingLow) = (supply.ArrivingM3PerS[last], supply.ArrivingM3PerS[i]);
-                foreach (var edge in edges)
-                {
-                    if (edge <= low || edge > high)
-                        continue;
-                    var t = (high - edge) / (high - low);
-                    var p = pHigh + (t * (pLow - pHigh));
-                    var arriving = arrivingHigh + (t * (arrivingLow - arrivingHigh));
-                    shares.Add(Share(p, arriving, edge * (1 + 1e-9)));
-                    shares.Add(Share(p, arriving, edge * (1 - 1e-9)));
-                }
-            }
-
+                Between(last, i);
             shares.Add(Share(supply.Exceedance[i], supply.ArrivingM3PerS[i], supply.UsableM3PerS[i]));
             last = i;
         }
@@ -63,6 +51,34 @@ public static partial class FlowDurationChart
             LeastRunning(result),
             season.IsWholeYear ? null : "runs " + season.Describe() + ", else dry",
             prior ? (reserves ? "reserved and delivered first" : "delivered first") : "reserved");
+
+        // Edges stand as steps; between them what is taken may bend where the levels move with the flow.
+        void Between(int from, int to)
+        {
+            var (high, low) = (supply.UsableM3PerS[from], supply.UsableM3PerS[to]);
+            if (!(high > low))
+                return;
+            var places = new List<(double T, double Usable)>();
+            foreach (var edge in edges)
+            {
+                if (edge <= low || edge > high)
+                    continue;
+                var t = (high - edge) / (high - low);
+                places.Add((t, edge * (1 + 1e-9)));
+                places.Add((t, edge * (1 - 1e-9)));
+            }
+
+            var parts = Math.Min(MostParts, (int)((high - low) / (PartOfLargest * supply.UsableM3PerS[0])));
+            for (var part = 1; part < parts; part++)
+                places.Add(((double)part / parts, high + ((low - high) * part / parts)));
+            foreach (var (t, usable) in places.OrderBy(x => x.T).ThenByDescending(x => x.Usable))
+            {
+                shares.Add(Share(
+                    supply.Exceedance[from] + (t * (supply.Exceedance[to] - supply.Exceedance[from])),
+                    supply.ArrivingM3PerS[from] + (t * (supply.ArrivingM3PerS[to] - supply.ArrivingM3PerS[from])),
+                    usable));
+            }
+        }
 
         FlowShare Share(double exceedance, double arrivingM3PerS, double usableM3PerS)
         {

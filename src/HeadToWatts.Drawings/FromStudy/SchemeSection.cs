@@ -21,21 +21,34 @@ public static partial class SchemeSection
     public static SchemeSectionInput InputOf(StudyResult result, double? usableFlowM3PerS = null)
     {
         ArgumentNullException.ThrowIfNull(result);
-        var point = result.Energy.Plant.At(usableFlowM3PerS ?? result.Flow.DesignFlowM3PerS);
+        var usable = usableFlowM3PerS ?? result.Flow.DesignFlowM3PerS;
+        var plant = result.Energy.Plant;
+        var head = result.Head;
+        var point = plant.At(usable);
         var flow = point.TurbineFlowM3PerS;
-        var losses = result.Waterway.Waterway.At(flow, result.Site);
-        var sections = result.Waterway.Waterway.GradeLines(flow, result.Head.HeadwaterM, result.Head.TailwaterM, result.Site);
+        var waterway = result.Waterway.Waterway;
+        var losses = waterway.At(flow, result.Site);
+
+        // Where the levels move with the flow, the water moves and the pipe stays. A drowned fall is drawn as none.
+        var headwaterM = plant.Design.MovingHead?.HeadwaterM(usable) ?? head.HeadwaterM;
+        var tailwaterM = Math.Min(plant.Design.MovingHead?.TailwaterM(usable) ?? head.TailwaterM, headwaterM);
+        var sections = waterway.GradeLines(flow, headwaterM, tailwaterM, result.Site);
 
         // Headwater first, machine and tailwater last; between them a start and an end for each pipe.
         return new SchemeSectionInput(
             flow,
-            result.Head.HeadwaterM,
-            result.Head.TailwaterM,
+            headwaterM,
+            tailwaterM,
             result.Input.Head.IsFromLevels,
-            point.NetHeadM,
+            point.IsRunning ? point.NetHeadM : headwaterM - tailwaterM,
             [.. losses.Elements.Select(e => new SectionPipe(e.Element.Name, e.Element.LengthM, e.Element.InsideDiameterM, e.VelocityMPerS))],
-            [.. sections.Skip(1).SkipLast(2).Select(s => new GradePoint(s.StationM, s.CentreElevationM, s.HydraulicGradeM, s.EnergyGradeM))],
+            [.. sections.Zip(result.Waterway.GradeLines).Skip(1).SkipLast(2).Select(s => new GradePoint(
+                s.First.StationM, s.Second.CentreElevationM, s.First.HydraulicGradeM, s.First.EnergyGradeM))],
             $"{result.Turbine.Chosen.Type.Name} × {result.Turbine.Units.UnitCount}",
-            point.MeterPowerKw);
+            point.MeterPowerKw)
+        {
+            HighestHeadwaterM = head.Levels.Select(l => l.HeadwaterM).Append(head.HeadwaterM).Append(headwaterM).Max(),
+            LowestTailwaterM = head.Levels.Select(l => l.TailwaterM).Append(head.TailwaterM).Append(tailwaterM).Min(),
+        };
     }
 }

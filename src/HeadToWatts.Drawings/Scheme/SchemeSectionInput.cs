@@ -35,6 +35,18 @@ public sealed record SchemeSectionInput(
     string Machine,
     double MeterPowerKw)
 {
+    /// <summary>Highest headwater the picture has to hold, where the levels move with the flow; null where they stay.</summary>
+    public double? HighestHeadwaterM { get; init; }
+
+    /// <summary>Lowest tailwater the picture has to hold, where the levels move with the flow; null where they stay.</summary>
+    public double? LowestTailwaterM { get; init; }
+
+    /// <summary>Highest level of the picture's scale.</summary>
+    public double TopM => HighestHeadwaterM ?? HeadwaterM;
+
+    /// <summary>Lowest water level of the picture's scale.</summary>
+    public double FootM => LowestTailwaterM ?? TailwaterM;
+
     /// <summary>Gross head.</summary>
     public double GrossHeadM => HeadwaterM - TailwaterM;
 

@@ -15,7 +15,7 @@ internal static class SectionFrame
         var tick = new TextStyle(InkRole.Soft, type.Tick, TextAnchor.End);
 
         double Level(double y) => unit.FromHeld(input.HeadwaterM - ((y - at.HeadwaterY) / at.VerticalScale));
-        var (low, high) = (Level(at.Bottom), Level(at.HeadwaterY - (type.Tick * 0.8)));
+        var (low, high) = (Level(at.Bottom), Level(at.Y(input.TopM) - (type.Tick * 0.8)));
         var step = Ticks.Step(high - low, ChartFrame.VerticalIntervals(size));
         foreach (var level in Ticks.Linear(low, high, step))
         {

@@ -20,7 +20,7 @@ internal static class SectionLabels
         Dimensioned(SectionLayout.GrossText(input, show), at.GrossX, at.HeadwaterY, at.TailwaterY, strong);
         if (input.NetHeadM > 0)
             Dimensioned("net head " + show.Length(input.NetHeadM), at.NetX, machineEnergyY, at.TailwaterY, strong);
-        if (input.LossM > 0.0005 * input.GrossHeadM)
+        if (input.GrossHeadM > 0 && input.LossM > 0.0005 * input.GrossHeadM)
             Losses();
 
         Headwater();

@@ -14,6 +14,7 @@ internal sealed class SectionLayout
     private static readonly double[] RoundRatios = [1, 1.2, 1.5, 1.8, 2, 2.5, 3, 3.5, 4, 4.5, 5, 6, 7, 8, 9];
 
     private readonly SchemeSectionInput _input;
+    private readonly double _topY;
     private readonly double[] _stationM;
     private readonly double[] _acrossM;
 
@@ -35,9 +36,9 @@ internal sealed class SectionLayout
         (_stationM, _acrossM) = Across(input);
         var runM = _acrossM[^1];
 
-        var head = Math.Max(input.GrossHeadM, 1e-6);
-        var headwaterY = Top + (type.Label * 2);
-        var highest = (Bottom - headwaterY - Math.Max(type.Label * 3, 34)) / head;
+        var head = Math.Max(input.TopM - input.FootM, 1e-6);
+        var topY = Top + (type.Label * 2);
+        var highest = (Bottom - topY - Math.Max(type.Label * 3, 34)) / head;
         if (runM <= 0)
         {
             HeightRatio = 1;
@@ -59,7 +60,7 @@ internal sealed class SectionLayout
 
         IntakeX = Left + pool;
         MachineX = IntakeX + run;
-        HeadwaterY = headwaterY;
+        _topY = topY;
     }
 
     public bool IsWide { get; }
@@ -76,7 +77,7 @@ internal sealed class SectionLayout
 
     public double MachineX { get; }
 
-    public double HeadwaterY { get; }
+    public double HeadwaterY => Y(_input.HeadwaterM);
 
     public double HouseHalf { get; }
 
@@ -107,7 +108,7 @@ internal sealed class SectionLayout
     public static string HeadwaterText(SchemeSectionInput input, UnitDisplay show) =>
         input.LevelsAreKnown ? "headwater " + SectionLabels.Level(input.HeadwaterM, show) : "headwater";
 
-    public double Y(double levelM) => HeadwaterY + ((_input.HeadwaterM - levelM) * VerticalScale);
+    public double Y(double levelM) => _topY + ((_input.TopM - levelM) * VerticalScale);
 
     public double X(double stationM)
     {

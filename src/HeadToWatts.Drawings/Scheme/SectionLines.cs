@@ -44,7 +44,8 @@ internal static class SectionLines
             Dimension.Draw(canvas, at.NetX, machineY, netBottom, InkRole.Ink);
         Loss(headwaterY, machineY);
         Loss(netBottom, at.TailwaterY);
-        Dimension.Draw(canvas, at.GrossX, headwaterY, at.TailwaterY, InkRole.Ink);
+        if (input.GrossHeadM > 0)
+            Dimension.Draw(canvas, at.GrossX, headwaterY, at.TailwaterY, InkRole.Ink);
         labels.AvoidLines([new(at.NetX, headwaterY), new(at.NetX, at.TailwaterY)], 3);
         labels.AvoidLines([new(at.GrossX, headwaterY), new(at.GrossX, at.TailwaterY)], 3);
         return (energy, hydraulic);
