@@ -10,7 +10,7 @@ internal static class Look
     public const double HeaderBaselinePt = 46;
     public const double HeaderRulePt = 55;
     public const double BodyTopPt = 84;
-    public const double FirstBodyTopPt = 62;
+    public const double FirstBodyTopPt = 52;
     public const double FooterRuleFromBottomPt = 52;
     public const double FooterBaselineFromBottomPt = 38;
     public const double BodyBottomFromBottomPt = 74;

@@ -49,6 +49,7 @@ public partial class MemoOfStudyTests
         Assert.Contains(result.Header.Name, read.PageTexts[0], StringComparison.Ordinal);
         Assert.Contains(result.Turbine.Chosen.Type.Name, read.PageTexts[0], StringComparison.OrdinalIgnoreCase);
         Assert.Contains(StandingCautions.Status, read.PageTexts[0], StringComparison.Ordinal);
+        Assert.Contains(Squeezed(StandingCautions.Statement), Squeezed(read.PageTexts[0]), StringComparison.Ordinal);
         if (result.Energy.Days?.DryYearKwh is { } dry)
             Assert.Contains(Printed(UnitDisplay.Energy(dry)) + " in a dry year", read.PageTexts[0], StringComparison.Ordinal);
     }
