@@ -47,6 +47,8 @@ internal static class EnergySection
                 rows.Add(Row("Lowest and highest whole year", $"{UnitDisplay.Energy(whole[0])}, {UnitDisplay.Energy(whole[^1])}", $"of {MemoContext.Count(whole.Count, "whole calendar year", "whole calendar years")}"));
         }
 
+        if (memo.Result.Energy.WithHeadError is { } range)
+            rows.Add(Row("With the head's error", $"{UnitDisplay.Energy(range.LowKwh)}, {UnitDisplay.Energy(range.HighKwh)}", $"mean year with the head {memo.Show.Length(memo.Result.Input.Head.ErrorM)} lower and higher"));
         rows.Add(Row("Plant factor", UnitDisplay.Percent(annual.PlantFactor), "energy over installed power times 8760 h"));
         rows.Add(Row("Hours running", UnitDisplay.Number(annual.RunningHours) + " h a year", "some water through a turbine"));
         rows.Add(Row("Full-load hours", UnitDisplay.Number(annual.FullLoadHours) + " h a year", "energy over installed power"));

@@ -34,6 +34,11 @@ internal static class InputsAppendix
             rows.Add(Row("Gross head", show.Length(input.Head.Gross.Metres)));
         }
 
+        if (input.Head.Measurement.Length > 0)
+            rows.Add(Row("How the head was measured", MemoContext.Sentence(input.Head.Measurement)));
+        if (input.Head.ErrorM > 0)
+            rows.Add(Row("Error of the head", show.Length(input.Head.ErrorM) + " either way"));
+
         var flow = input.Flow;
         rows.Add(Row("Flow", TitleSection.Period(memo)));
         if (flow.Record is not null)

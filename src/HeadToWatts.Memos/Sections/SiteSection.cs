@@ -16,7 +16,11 @@ internal static class SiteSection
         var pipes = input.Waterway.Elements;
         var fall = input.Head.IsFromLevels
             ? (input.Head.Moves ? "At the design flow the" : "The") + $" headwater stands at {memo.Level(result.Head.HeadwaterM)} and the tailwater at {memo.Level(result.Head.TailwaterM)}: a gross head of {show.Length(result.Head.GrossHeadM)}."
-            : $"The gross head, given as such, is {show.Length(result.Head.GrossHeadM)}.";
+            : $"The gross head{(input.Head.Measurement.Length > 0 ? "" : ", given as such,")} is {show.Length(result.Head.GrossHeadM)}.";
+        if (input.Head.Measurement.Length > 0)
+            fall += " It comes from a measurement: " + MemoContext.Sentence(input.Head.Measurement);
+        if (input.Head.ErrorM > 0)
+            fall += $" Its error is given as {show.Length(input.Head.ErrorM)} either way.";
         var way = pipes.Count == 0
             ? "The machine stands at the drop, without a pipe before it."
             : pipes.Count == 1

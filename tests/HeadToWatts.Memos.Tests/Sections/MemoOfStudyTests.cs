@@ -216,6 +216,18 @@ public partial class MemoOfStudyTests
     }
 
     [Fact]
+    public void A_measured_head_is_printed_with_its_error_and_what_that_does_to_the_energy()
+    {
+        var result = Studies.Changed("sorrel-creek", d => d.Alternatives[0].Head = new() { Measured = new() { Gauge = "82 psi", GaugeHeight = "3 ft", Error = "1 psi" } });
+        var show = result.Show();
+        var range = result.Energy.WithHeadError!;
+        using var read = new ReadBack(Memo.Make(result, show));
+        Assert.Contains("82 psi with the pipe full and at rest", read.Text, StringComparison.Ordinal);
+        Assert.Contains(Printed($"{UnitDisplay.Energy(range.LowKwh)} to {UnitDisplay.Energy(range.HighKwh)}"), read.PageTexts[0], StringComparison.Ordinal);
+        Assert.Contains(Squeezed(Printed(show.Length(result.Input.Head.ErrorM) + " either way")), Squeezed(read.Text), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void What_was_assumed_is_printed_with_the_inputs()
     {
         var result = Studies.Changed("larkspur-drop", d => d.Alternatives[0].Site.WaterTemperature = null);
