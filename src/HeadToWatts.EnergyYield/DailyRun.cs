@@ -7,14 +7,14 @@ namespace HeadToWatts.EnergyYield;
 /// <param name="Month">1 to 12.</param>
 /// <param name="MeanEnergyKwh">Mean power of the month's days times the hours of the month, kWh.</param>
 /// <param name="MeanFlowM3PerS">Mean flow of the month's days, m3/s.</param>
-/// <param name="Days">Days of the record that fall in the month and have a flow.</param>
+/// <param name="Days">Days of the record in the month that have a flow or lie outside the season; with none the month is not known and its energy stands at zero.</param>
 public sealed record MonthEnergy(int Month, double MeanEnergyKwh, double MeanFlowM3PerS, int Days);
 
 /// <summary>Energy of one calendar year of a record.</summary>
 /// <param name="Year">Calendar year.</param>
 /// <param name="EnergyKwh">Energy of the days that have a flow, kWh.</param>
-/// <param name="Days">Days of the year that have a flow.</param>
-/// <param name="IsWhole">True when at least 95 percent of the year's days have a flow.</param>
+/// <param name="Days">Days of the year that have a flow or lie outside the season.</param>
+/// <param name="IsWhole">True when these are at least 95 percent of the year's days.</param>
 public sealed record YearEnergy(int Year, double EnergyKwh, int Days, bool IsWhole);
 
 /// <summary>The plant run on every day of a record: months and years. Days without a flow are left out, not read as zero.</summary>
@@ -106,9 +106,11 @@ public sealed record DailyRun(
                 (year, yearKwh, yearDays) = (day.Year, 0, 0);
             }
 
-            if (double.IsNaN(flows[i]))
-                continue;
+            // Outside the season the plant stands whatever was measured, so such a day is known even where the record has a gap;
+            // computed inflows below zero count as no flow, as in the curve.
             var runs = season.Runs(day);
+            if (runs && double.IsNaN(flows[i]))
+                continue;
             var arriving = runs ? Math.Max(0, flows[i]) : 0;
             var month = day.Month - 1;
             if (!known[month].TryGetValue(arriving, out var powerKw))

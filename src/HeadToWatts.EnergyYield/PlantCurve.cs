@@ -112,7 +112,9 @@ public sealed class PlantCurve
         while (lo < hi)
         {
             var mid = (lo + hi + 1) / 2;
-            if (_from[mid] <= usableFlowM3PerS)
+
+            // A piece begins just above its lower end: at that flow itself the units still run as in the piece below.
+            if (_from[mid] < usableFlowM3PerS)
                 lo = mid;
             else
                 hi = mid - 1;

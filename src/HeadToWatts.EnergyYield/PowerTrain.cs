@@ -19,7 +19,7 @@ public sealed record PowerTrain(
     double OwnUseKw,
     double Availability)
 {
-    /// <summary>Power at the meter from power at the shaft, kW; never below zero, for a plant that uses more than it makes is stopped.</summary>
+    /// <summary>Power at the meter from power at the shaft, kW. Below zero where the plant would use more than it makes; <see cref="PlantCurve"/> then keeps it standing.</summary>
     /// <param name="shaftPowerKw">Power at the turbine shaft, kW.</param>
     public double MeterPowerKw(double shaftPowerKw)
     {

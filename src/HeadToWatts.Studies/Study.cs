@@ -88,8 +88,12 @@ public static class Study
                 input.Turbine.MakersCurve is not null,
                 choice.Units),
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply) },
-            StudyMethods.Uses(input, site, losses, surge, choice));
+            StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply)));
     }
+
+    // The lowest flow the plant runs on: what its units need, or what there is at the dry end of the curve.
+    private static double LowestFlowM3PerS(PlantChoice choice, FlowSupply supply) =>
+        Math.Max(choice.Units.LeastFlowM3PerS, supply.UsableM3PerS[^1]);
 
     private static NetHeadPoint NetHead(PlantCurve plant, double flowM3PerS, double share)
     {

@@ -22,20 +22,21 @@ public static class StudyMethods
         .. EnergyMethods.All,
     ];
 
-    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, WaterwayLosses losses, SurgeResult? surge, PlantChoice choice)
+    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, Waterway waterway, SurgeResult? surge, PlantChoice choice, double lowestFlowM3PerS)
     {
         var uses = new List<MethodUse>(site.Uses);
         if (input.Flow.Record is { } record)
         {
             uses.Add(input.Flow.PlottingPosition.Method.Used(new InputSpan("n", record.ValidCount, record.ValidCount)));
-            uses.Add(FlowRecordMethods.DurationCurve.Used());
         }
 
-        uses.AddRange(losses.Uses);
-        if (losses.Elements.Count > 0)
+        uses.Add(FlowRecordMethods.DurationCurve.Used());
+        uses.AddRange(waterway.UsesBetween(Math.Min(lowestFlowM3PerS, choice.DesignFlowM3PerS), choice.DesignFlowM3PerS, site));
+        if (waterway.Elements.Count > 0)
             uses.Add(VelocityLimits.Method.Used(new InputSpan("H", input.Head.Gross.Metres, input.Head.Gross.Metres)));
         uses.Add(EnergyMethods.WaterPower.Used());
         uses.Add(EnergyMethods.AnnualEnergy.Used());
+        uses.Add(EnergyMethods.PlantFactor.Used());
         if (choice.Chosen.Speed is { } speed)
             uses.AddRange(speed.Uses);
         if (surge is not null)

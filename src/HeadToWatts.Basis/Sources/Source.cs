@@ -37,7 +37,8 @@ public sealed record Source(string Id, SourceKind Kind, string Authors, string Y
     /// <summary>The source on one line, marked when it is memory, practice or our own decision.</summary>
     public override string ToString()
     {
-        var parts = new[] { Authors, Year, Title, Place }.Where(p => p.Length > 0);
+        // Initials bring a full stop of their own.
+        var parts = new[] { Authors, Year, Title, Place }.Where(p => p.Length > 0).Select(p => p.TrimEnd('.'));
         var line = string.Join(". ", parts) + ".";
         return Kind switch
         {

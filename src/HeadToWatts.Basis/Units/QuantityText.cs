@@ -65,6 +65,8 @@ public static partial class QuantityText
             // "-3 ft 6 in" is minus three and a half feet.
             var held = unit.ToHeld(value);
             total = parts > 1 && IsNegative(shown) ? total - held : total + held;
+            if (!double.IsFinite(total))
+                return Refuse(where, shown, $"'{digits}' {unit.Symbol} is not a number that can be held", dimension);
         }
 
         return Checked.Of(total);

@@ -134,8 +134,8 @@ public sealed class UnitDisplay
     }
 
     /// <summary>
-    /// A number to so many significant digits, never fewer than its whole part, with thousands apart: 0.0118, 17.1, 4 060.
-    /// Values from 1e6 in keep their whole part too; only values below 1e-4 use a power of ten.
+    /// A number to so many significant digits, with thousands apart from five digits up: 0.0118, 17.1, 4060, 12 300. Only values
+    /// below 1e-4 use a power of ten.
     /// </summary>
     public static string Number(double value, int digits = 3)
     {
@@ -148,13 +148,14 @@ public sealed class UnitDisplay
         var size = Math.Abs(value);
         if (size < 1e-4)
         {
-            var exponent = (int)Math.Floor(Math.Log10(size));
-            var mantissa = (value / Math.Pow(10, exponent)).ToString("0." + new string('#', digits - 1), CultureInfo.InvariantCulture);
-            return mantissa.Replace('-', '−') + " × 10" + Superscript(exponent);
+            // The exponent form rounds first, so that 9.999e-5 becomes 1 x 10^-4 and not 10 x 10^-5.
+            var parts = size.ToString("E" + (digits - 1).ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture).Split('E');
+            var mantissa = parts[0].Contains('.', StringComparison.Ordinal) ? parts[0].TrimEnd('0').TrimEnd('.') : parts[0];
+            return (value < 0 ? "−" : "") + mantissa + " × 10" + Superscript(int.Parse(parts[1], CultureInfo.InvariantCulture));
         }
 
         var whole = (int)Math.Floor(Math.Log10(size)) + 1;
-        // 999.6 to three digits is 1 000, not 999.6 or 1000.0.
+        // 9.996 to three digits is 10.0, not 10.00.
         var decimals = Math.Max(0, digits - Math.Max(whole, size < 1 ? whole : 1));
         var rounded = Math.Round(size, Math.Min(decimals, 15), MidpointRounding.AwayFromZero);
         if (rounded > 0 && (int)Math.Floor(Math.Log10(rounded)) + 1 > whole)

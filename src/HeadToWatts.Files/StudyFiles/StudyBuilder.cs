@@ -53,7 +53,7 @@ public static class StudyBuilder
         var before = read.Problems.Count;
         var site = new SiteInput(
             read.Assumed(d.Site.Latitude, Dimension.Angle, path + ".site.latitude", -Math.PI / 2, Math.PI / 2, "45 deg", "The latitude"),
-            read.Assumed(d.Site.Elevation, Dimension.Length, path + ".site.elevation", -430, 6000, "0 m", "The elevation"),
+            read.Assumed(d.Site.Elevation, Dimension.Length, path + ".site.elevation", -430, 5000, "0 m", "The elevation"),
             read.Assumed(d.Site.WaterTemperature, Dimension.Temperature, path + ".site.waterTemperature", 0, 40, "10 degC", "The water temperature"),
             read.Assumed(d.Site.GridFrequency, Dimension.Frequency, path + ".site.gridFrequency", 45, 65, "60 Hz", "The grid frequency"));
         var flow = FlowBuilder.Build(d.Flow, path + ".flow", read, files);

@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Hydraulics.Waterways;
 
 namespace HeadToWatts.Studies.Cautions;
 
@@ -9,7 +10,7 @@ internal static class CautionSources
 
     internal static readonly Source Corps1979 = new("usace-tp-61", SourceKind.Published, "US Army Corps of Engineers, Hydrologic Engineering Center", "1979", "Feasibility studies for small scale hydropower additions", "Technical Paper 61");
 
-    internal static readonly Source Usbr = new("usbr-em3", SourceKind.Published, "US Bureau of Reclamation", "1986", "Welded steel penstocks", "Engineering Monograph No. 3");
+    internal static readonly Source Usbr = VelocityLimits.Method.Source;
 
     internal static readonly Source Esha = new("esha-2004", SourceKind.Published, "European Small Hydropower Association", "2004", "Guide on how to develop a small hydropower plant", "Brussels");
 

@@ -1,0 +1,139 @@
+using HeadToWatts.Basis.Units;
+using HeadToWatts.FlowRecords;
+using HeadToWatts.Hydraulics.Friction;
+using HeadToWatts.Studies;
+using HeadToWatts.Studies.Cautions;
+using HeadToWatts.Studies.Inputs;
+
+namespace HeadToWatts.Calculations.Tests.Studies;
+
+/// <summary>Every caution rule: a study in which it bites, with its numbers in both families of units, and one in which it does not.</summary>
+public class CautionRuleTests
+{
+    private static readonly AlternativeInput Quiet = TestStudies.Quiet;
+
+    private static readonly CurvePoint[] Rows = [new(0, 2.8), new(0.5, 2), new(0.8, 1.3)];
+
+    private static readonly OperatingSeason AprilToOctober = OperatingSeason.Months([4, 5, 6, 7, 8, 9, 10]);
+
+    // The figures in the texts are worked by hand: feet, cubic feet, inches and psi from the metric ones (1 ft = 0.3048 m,
+    // 1 cfs = 0.0283168 m3/s, 1 psi = 6.894757 kPa), velocities from Q/(pi D^2/4).
+    private static readonly IReadOnlyList<Case> Cases =
+    [
+        new("no-reserved-flow", Quiet.WithFlow(f => f with { ReservedFlowIsStated = false }), "even if it is zero", "even if it is zero"),
+        new("assumed-inputs", Quiet with { Assumptions = ["The latitude is taken as 45 deg."] }, "The latitude is taken as 45 deg.", "The latitude is taken as 45 deg."),
+        new("record-under-ten-years", Quiet.WithFlow(f => f with { Record = TestStudies.Record(5) }), "5.00 years", "5.00 years"),
+        new("missing-days", Quiet.WithFlow(f => f with { Record = TestStudies.Record(12, (day, flow) => day % 10 == 0 ? double.NaN : flow) }), "439 of 4383 days", "10.0 % of the record"),
+        new("no-record", Quiet.WithCurve(BeyondLastRow.Hold, Rows), "entered as rows", "entered as rows"),
+        new("curve-ends-early", Quiet.WithCurve(BeyondLastRow.Hold, Rows), "80.0 % exceeded with 45.9 cfs", "80.0 % exceeded with 1.30 m3/s")
+            { Spares = Quiet.WithCurve(BeyondLastRow.Hold, [.. Rows, new(0.95, 1.2)]) },
+        new("curve-ends-early", Quiet.WithCurve(BeyondLastRow.Dry, Rows), "counts as dry", "counts as dry"),
+        new("dry-months", Quiet.WithFlow(f => f with { Season = AprilToOctober }), "41.4 % of the year (season Apr to Oct): about 7.0 months", "41.4 % of the year"),
+        new("design-flow-seldom", Quiet.WithFlow(f => f with { DesignFlowM3PerS = 2.38 }), "84.0 cfs", "2.38 m3/s")
+            { Spares = Quiet.WithFlow(f => f with { DesignFlowM3PerS = 2.3 }) },
+        new("net-head-gone", Quiet.WithPipes(TestStudies.Pipe(0.3, 100)), "gross head of 164 ft", "gross head of 50.0 m"),
+        new("low-head", Quiet.WithHead(1.2).WithPipes(), "gross head of 3.94 ft is below the 5.00 ft", "gross head of 1.20 m is below the 1.52 m")
+            { Spares = Quiet.WithHead(1.53).WithPipes() },
+        new("tailwater-constant", Quiet.WithHead(8).WithPipes(), "26.2 ft", "8.00 m") { Spares = Quiet.WithHead(10.5).WithPipes() },
+
+        // The flow exceeded 2 % of the time passes with 2.499 m3/s and a tailwater of 19.98 m; at the design flow 1.9 m3/s pass and it stands at 8 m.
+        new("high-water-takes-head", Quiet.WithTailwater(new(1.5, 0), new(2.5, 20)), "gross head is 98.5 ft against 138 ft at the design flow", "gross head is 30.0 m against 42.0 m at the design flow")
+            { Spares = Quiet.WithTailwater(new(1.5, 0), new(2.5, 10)) },
+        new("high-water-takes-head", Quiet.WithTailwater(new(1.5, 0), new(2.0, 5), new(2.5, 60)), "stands as high as the headwater", "stands as high as the headwater"),
+
+        // Of the flows exceeded 2, 5, 10, 25, 50, 75 and 90 % and the design flow, only the middle one and the last lie within 1.8 to 2.2 m3/s.
+        new("level-outside-rating", Quiet.WithTailwater(new(1.8, 0), new(2.2, 1)), "6 of 8 flows looked at, from 53.8 cfs", "6 of 8 flows looked at, from 1.52 m3/s")
+            { Spares = Quiet.WithTailwater(new(0, 0), new(5, 1)) },
+        new("pressure-below-air", Quiet.WithPipes(TestStudies.Pipe(1, 50) with { EndElevationM = 50.5 }, TestStudies.Pipe(1, 50)), "ft of water at", "m of water at"),
+        new("pressure-near-rating", Quiet.WithPipes(TestStudies.Pipe(1, 100, 5e5)), "rating of 72.5 psi", "rating of 500 kPa"),
+        new("surge-over-rating", Quiet.WithPipes(TestStudies.Pipe(1, 100, 20e5)), "rated 290 psi", "rated 2000 kPa"),
+        new("velocity-high", Quiet.WithPipes(TestStudies.Pipe(0.66, 100)), "17.3 ft/s at the design flow, above the usual 16.4 ft/s", "5.26 m/s at the design flow, above the usual 5.00 m/s"),
+        new("velocity-over-limit", Quiet.WithPipes(TestStudies.Pipe(0.75, 100)), "The highest velocity, 13.4 ft/s", "The highest velocity, 4.07 m/s"),
+        new("velocity-low", Quiet.WithPipes(TestStudies.Pipe(1.4, 100)), "3.84 ft/s", "1.17 m/s"),
+        new("loss-over-ten-percent", Quiet.WithPipes(TestStudies.Pipe(0.8, 700)), "% of the gross head", "% of the gross head") { Spares = Quiet.WithPipes(TestStudies.Pipe(0.8, 400)) },
+        new("pipe-limits-flow", Quiet.WithPipes(TestStudies.Pipe(0.6, 600)), "design flow of 63.6 cfs", "design flow of 1.80 m3/s"),
+        new("transition-flow", Quiet.WithFlow(f => f with { DesignFlowM3PerS = 0.004 }).WithPipes(TestStudies.Pipe(0.5, 100)), "Reynolds number falls to", "Between 2000 and 4000"),
+        new("no-pressure-rating", Quiet.WithPipes(TestStudies.Pipe(1, 100, null)), "psi standing", "kPa standing") { Spares = Quiet.WithHead(9).WithPipes(TestStudies.Pipe(1, 100, null)) },
+        new("method-out-of-range", Quiet.WithPipes(TestStudies.Pipe(0.75, 100)) with { Waterway = new WaterwayInput([TestStudies.Pipe(0.75, 100)], FrictionFormulas.Find("hazen-williams")!, 1) }, "Hazen-Williams is stated for velocity 0 to 3.00 m/s; here it ran", "4.07 m/s")
+            { Spares = Quiet with { Waterway = Quiet.Waterway with { Formula = FrictionFormulas.Find("hazen-williams")! } } },
+        new("outside-envelope", Quiet.WithHead(12).WithType("pelton"), "One Pelton unit at", "usual range of the type"),
+        new("much-below-least", Quiet.WithType("propeller", 1).WithFlow(f => f with { DesignFlowM3PerS = 2.2 }), "less than the 58.3 cfs", "less than the 1.65 m3/s"),
+        new("better-type", Quiet.WithType("crossflow"), "with crossflow", "would make"),
+        new("typical-efficiency", Quiet, "not a guarantee", "not a guarantee") { Spares = Quiet.WithMakersEfficiency(0.88) },
+        new("makers-efficiency", Quiet.WithMakersEfficiency(0.88), "manufacturer's table", "manufacturer's table"),
+        new("no-energy", Quiet.WithFlow(f => f with { Allocation = new WaterAllocation(ReservedFlow.Constant(5), 0) }), "never runs", "never runs"),
+        new("low-plant-factor", Quiet.WithFlow(f => f with { Season = OperatingSeason.Months([6, 7]) }), "The plant factor is 1", "The plant factor is 1"),
+        new("small-plant", Quiet.WithFlow(f => f with { DesignFlowM3PerS = 0.05 }).WithPipes(TestStudies.Pipe(0.2, 100)), "below the 50 kW", "below the 50 kW"),
+        new("high-efficiency", Quiet.WithMakersEfficiency(0.95) with { Train = Quiet.Train with { DriveEfficiency = 1, GeneratorEfficiency = 1, TransformerEfficiency = 1, LineEfficiency = 1 } }, "95.0 % at best", "95.0 % at best"),
+        new("always-available", Quiet with { Train = Quiet.Train with { Availability = 1 } }, "100 %", "100 %") { Spares = Quiet with { Train = Quiet.Train with { Availability = 0.99 } } },
+        new("mean-flow-trap", Quiet.WithCurve(BeyondLastRow.Dry, new(0, 4), new(0.5, 4)), "8760 h would claim", "over the whole curve it is"),
+    ];
+
+    public static TheoryData<string> RuleIds => new(CautionRules.All.Select(r => r.Id));
+
+    [Fact]
+    public void A_study_with_nothing_amiss_is_cautioned_for_its_typical_efficiency_only()
+    {
+        var result = Quiet.Run();
+        Assert.Equal(["typical-efficiency"], CautionRules.For(result, result.Show()).Select(c => c.Id));
+    }
+
+    [Theory]
+    [MemberData(nameof(RuleIds))]
+    public void The_rule_bites_where_it_should_with_the_numbers_in_both_families_of_units(string id)
+    {
+        var cases = Cases.Where(c => c.Id == id).ToList();
+        Assert.True(cases.Count > 0, $"the rule '{id}' has no study in which it bites: add one to the cases");
+        foreach (var one in cases)
+        {
+            var result = one.Bites.Run();
+            var us = Assert.Single(CautionRules.For(result, result.Show(UnitSystem.US)), c => c.Id == id);
+            var si = Assert.Single(CautionRules.For(result, result.Show(UnitSystem.SI)), c => c.Id == id);
+            Assert.Contains(one.Us, us.Text);
+            Assert.Contains(one.Si, si.Text);
+            Assert.Equal((us.Id, us.Stage, us.Severity, us.Title, us.Authority), (si.Id, si.Stage, si.Severity, si.Title, si.Authority));
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(RuleIds))]
+    public void The_rule_keeps_silent_where_nothing_is_amiss(string id)
+    {
+        var spares = Cases.Where(c => c.Id == id).Select(c => c.Spares).ToList();
+        Assert.NotEmpty(spares);
+        foreach (var input in spares)
+        {
+            var result = input.Run();
+            Assert.DoesNotContain(CautionRules.For(result, result.Show()), c => c.Id == id);
+        }
+    }
+
+    [Fact]
+    public void Every_rule_has_an_id_of_its_own_a_title_and_an_authority()
+    {
+        Assert.Equal(CautionRules.All.Count, CautionRules.All.Select(r => r.Id).Distinct(StringComparer.Ordinal).Count());
+        Assert.All(CautionRules.All, r =>
+        {
+            Assert.Matches("^[a-z]+(-[a-z]+)*$", r.Id);
+            Assert.True(r.Title.Length is > 3 and < 60, r.Id);
+            Assert.True(r.Authority.Title.Length > 0, r.Id);
+            Assert.True(Enum.IsDefined(r.Severity) && Enum.IsDefined(r.Stage), r.Id);
+        });
+        Assert.All(Cases, c => Assert.Contains(CautionRules.All, r => r.Id == c.Id));
+    }
+
+    [Fact]
+    public void What_must_be_settled_first_stands_first()
+    {
+        var result = Quiet.WithFlow(f => f with { ReservedFlowIsStated = false }).WithHead(12).WithType("pelton").Run();
+        var cautions = CautionRules.For(result, result.Show());
+        Assert.True(cautions.Count > 3);
+        Assert.Equal(Severity.SettleFirst, cautions[0].Severity);
+        Assert.Equal(cautions.OrderBy(c => c.Severity).Select(c => c.Id), cautions.Select(c => c.Id));
+    }
+
+    private sealed record Case(string Id, AlternativeInput Bites, string Us, string Si)
+    {
+        public AlternativeInput Spares { get; init; } = Id == "typical-efficiency" ? Bites : TestStudies.Quiet;
+    }
+}
