@@ -141,9 +141,12 @@ public sealed class PlantCurve
     private Best Piece(double a, double b, Best best, Action<double, double> add)
     {
         var start = a + (1e-10 * (b - a));
+
+        // A flow within rounding of full units is still passed by those units (UnitSet), so the next piece begins a hair above.
+        var above = a > 0 ? a + (2e-12 * Design.Units.UnitDesignFlowM3PerS) : 0;
         if (PowerKw(start) >= best.PowerKw && PowerKw(b) > PowerKw(b - (1e-6 * (b - a))) && PowerKw(b) > best.PowerKw)
         {
-            add(a, double.NaN);
+            add(above, double.NaN);
             return new Best(b, PowerKw(b));
         }
 
@@ -161,7 +164,7 @@ public sealed class PlantCurve
         }
         else
         {
-            add(a, double.NaN);
+            add(above, double.NaN);
         }
 
         if (top < b)
