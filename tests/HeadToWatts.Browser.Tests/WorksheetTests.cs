@@ -83,7 +83,7 @@ public sealed class WorksheetTests(BrowserRun run)
         var before = await FigureAsync(page, "Energy in a mean year");
         await Upload(page, "curve.csv", "exceeded %,flow cfs\n0,3\n50,1.2\n100,0.4\n");
         await page.WaitForFunctionAsync("before => document.querySelectorAll('.fig .v')[1].textContent !== before", before);
-        await Assertions.Expect(page.GetByLabel("Flow in row 1")).ToBeVisibleAsync();
+        await Assertions.Expect(page.GetByLabel("Flow in row 1", new() { Exact = true })).ToBeVisibleAsync();
         var after = await FigureAsync(page, "Energy in a mean year");
 
         await Upload(page, "wrong.csv", "exceeded %,flow cfs\n0,3\n130,1.2\n");
@@ -97,7 +97,7 @@ public sealed class WorksheetTests(BrowserRun run)
         BrowserRun.NeedsBrowser();
         await using var visit = await OpenDemoAsync("A farm creek");
         var page = visit.Page;
-        await page.GetByLabel("Flow in row 1").ClickAsync();
+        await page.GetByLabel("Flow in row 1", new() { Exact = true }).ClickAsync();
         await page.EvaluateAsync(
             """
             () => {
@@ -106,8 +106,8 @@ public sealed class WorksheetTests(BrowserRun run)
               document.activeElement.dispatchEvent(new ClipboardEvent('paste', { clipboardData: data, bubbles: true, cancelable: true }));
             }
             """);
-        await Assertions.Expect(page.GetByLabel("Flow in row 4")).ToHaveCountAsync(0);
-        await Assertions.Expect(page.GetByLabel("Flow in row 2")).ToHaveValueAsync("500");
+        await Assertions.Expect(page.GetByLabel("Flow in row 4", new() { Exact = true })).ToHaveCountAsync(0);
+        await Assertions.Expect(page.GetByLabel("Flow in row 2", new() { Exact = true })).ToHaveValueAsync("500");
     }
 
     [SkippableFact]
@@ -145,7 +145,7 @@ public sealed class WorksheetTests(BrowserRun run)
         await visit.GoAsync("/");
         await visit.Page.Locator("input[type=file]").SetInputFilesAsync(new FilePayload { Name = "study.json", MimeType = "application/json", Buffer = study });
         await visit.Page.WaitForURLAsync("**/study/**");
-        await visit.InteractiveAsync();
+        await visit.InteractiveAsync("main.stage");
         Assert.Equal("Flow", await visit.Page.Locator("h1").TextContentAsync());
     }
 
@@ -175,7 +175,7 @@ public sealed class WorksheetTests(BrowserRun run)
                 await visit.Page.GetByLabel("Headwater level").FillAsync("4311.5");
                 await Assertions.Expect(visit.Page.Locator(".saved")).ToContainTextAsync("saved");
                 await visit.Page.ReloadAsync();
-                await visit.InteractiveAsync();
+                await visit.InteractiveAsync("main.stage");
                 Assert.Equal("4311.5", await visit.Page.GetByLabel("Headwater level").InputValueAsync());
                 path = new Uri(visit.Page.Url).AbsolutePath;
             }
@@ -197,7 +197,7 @@ public sealed class WorksheetTests(BrowserRun run)
         var visit = await run.VisitAsync("/", scheme, width, height, app);
         await visit.Page.Locator("ul.sites button", new() { HasText = title }).ClickAsync();
         await visit.Page.WaitForURLAsync("**/study/**");
-        await visit.InteractiveAsync();
+        await visit.InteractiveAsync("main.stage");
         return visit;
     }
 

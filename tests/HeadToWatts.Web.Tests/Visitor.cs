@@ -59,6 +59,8 @@ public abstract class Visitor : BunitContext
 
     protected override void Dispose(bool disposing)
     {
+        if (disposing && Session.Keeper is { } keeper)
+            Assert.True(keeper.SavedAsync().Wait(TimeSpan.FromSeconds(10)), "The last change was not stored.");
         base.Dispose(disposing);
         if (!disposing || !Directory.Exists(_folder))
             return;

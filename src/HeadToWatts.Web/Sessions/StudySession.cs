@@ -24,6 +24,9 @@ public sealed partial class StudySession(StudyStore store, TimeProvider clock, I
     /// <summary>Told after every change of what is shown.</summary>
     public event Action? Changed;
 
+    /// <summary>Told when a change has come into the store, or could not.</summary>
+    public event Action? Kept;
+
     /// <summary>Brings the changes into the store; null before a study is loaded.</summary>
     public StudyKeeper? Keeper { get; private set; }
 
@@ -88,7 +91,7 @@ public sealed partial class StudySession(StudyStore store, TimeProvider clock, I
             return false;
         }
 
-        Keeper = new StudyKeeper(store, clock, stored, () => Changed?.Invoke());
+        Keeper = new StudyKeeper(store, clock, stored, () => Kept?.Invoke());
         if (document.Alternatives.Count == 0)
             document.Alternatives.Add(new AlternativeDocument());
         _document = document;
@@ -255,8 +258,9 @@ public sealed partial class StudySession(StudyStore store, TimeProvider clock, I
     private void ChooseDisplay()
     {
         var next = Result is null ? UnitDisplay.For(Units, TypicalFlowM3PerS()) : Result.Show(Units);
-        if (next.System != Show.System || !ReferenceEquals(next.FlowUnit, Show.FlowUnit))
-            _workings = null;
+        if (next.System == Show.System && ReferenceEquals(next.FlowUnit, Show.FlowUnit))
+            return;
+        _workings = null;
         Show = next;
     }
 

@@ -45,7 +45,7 @@ public sealed class Visit : IAsyncDisposable
     }
 
     /// <summary>Waits until the page answers to the user: the marker is set after its first render on the live connection.</summary>
-    public Task InteractiveAsync() => Page.WaitForSelectorAsync("[data-live]", new PageWaitForSelectorOptions { State = WaitForSelectorState.Attached });
+    public Task InteractiveAsync(string main = "main") => Page.WaitForSelectorAsync(main + "[data-live]", new PageWaitForSelectorOptions { State = WaitForSelectorState.Attached });
 
     /// <summary>Accessibility faults of the page as it stands, one a line.</summary>
     public async Task<IReadOnlyList<string>> FaultsAsync()

@@ -2,6 +2,7 @@
 "use strict";
 
 (function () {
+  let opener = null;
   const year = 60 * 60 * 24 * 365;
   const keep = (name, value) => { document.cookie = `${name}=${value};path=/;max-age=${year};samesite=strict`; };
 
@@ -57,6 +58,9 @@
   });
 
   window.headToWatts = {
+    // The panel at the side takes the focus and gives it back to the number it was opened from.
+    rememberFocus: () => { opener = document.activeElement; },
+    returnFocus: () => { if (opener instanceof HTMLElement && opener.isConnected) opener.focus(); },
     receivers: new Map(),
     receivePaste: (id, receiver) => { window.headToWatts.receivers.set(id, receiver); },
     stopReceiving: id => { window.headToWatts.receivers.delete(id); },
