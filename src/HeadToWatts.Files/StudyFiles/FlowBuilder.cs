@@ -34,11 +34,44 @@ internal static class FlowBuilder
             read.Refuse(path + ".season", d.Season, "no day of the record falls into the season with a flow", "a season that the record covers");
         var forSeason = RowsAreForSeason(d, path, season, hasRows, read);
         var (reserved, stated) = Reserved(d.ReservedFlow, path + ".reservedFlow", read);
+        var monthly = ByMonth(d, path, record is not null || !hasRows, read);
         var prior = read.Optional(d.PriorDeliveries, Dimension.Flow, path + ".priorDeliveries", 0, LargestFlowM3PerS) ?? 0;
         double? design = IsSuggest(d.DesignFlow) ? null : read.Optional(d.DesignFlow, Dimension.Flow, path + ".designFlow", 1e-5, LargestFlowM3PerS);
         if (read.Problems.Count > before)
             return null;
-        return new FlowInput(curve, forSeason, record, position, season, new WaterAllocation(reserved, prior), stated || !string.IsNullOrWhiteSpace(d.PriorDeliveries), design, d.Source ?? "");
+        var byMonth = monthly?.Select(r => new WaterAllocation(r, prior)).ToList();
+        var allocation = byMonth is null ? new WaterAllocation(reserved, prior) : byMonth[MiddleMonth(season) - 1];
+        return new FlowInput(curve, forSeason, record, position, season, allocation, stated || monthly is not null || !string.IsNullOrWhiteSpace(d.PriorDeliveries), design, d.Source ?? "") { AllocationByMonth = byMonth };
+    }
+
+    // The middle one of the months in which the plant may run; July for a plant that runs all year.
+    private static int MiddleMonth(OperatingSeason season)
+    {
+        var months = Enumerable.Range(1, 12).Where(season.RunsInMonth).ToList();
+        return months.Count is 0 or 12 ? 7 : months[months.Count / 2];
+    }
+
+    private static List<ReservedFlow>? ByMonth(FlowDocument d, string path, bool hasRecord, FieldReader read)
+    {
+        if (d.ReservedByMonth is not { Count: > 0 } months)
+            return null;
+        if (!string.IsNullOrWhiteSpace(d.ReservedFlow))
+            read.Refuse(path + ".reservedByMonth", d.ReservedFlow, "reserved flow is given for the year and by month", "one of the two");
+        if (!hasRecord)
+            read.Refuse(path + ".reservedByMonth", "", "rows of a curve know no months", "a daily record, or one reserved flow for the year");
+        if (months.Count != 12)
+        {
+            read.Refuse(path + ".reservedByMonth", $"{months.Count} flows", "twelve flows are wanted, January first");
+            return null;
+        }
+
+        return [.. months.Select((text, i) =>
+        {
+            var where = $"{path}.reservedByMonth[{i}]";
+            if (string.IsNullOrWhiteSpace(text))
+                read.Refuse(where, text, "nothing is entered", "a flow, a percent of the flow arriving, or none");
+            return Reserved(text, where, read).Reserved;
+        })];
     }
 
     internal static bool IsSuggest(string? text) =>

@@ -108,6 +108,9 @@ public sealed class FlowDocument
     /// <summary>Reserved flow: a flow, a percent of the flow, or "none".</summary>
     public string? ReservedFlow { get; set; }
 
+    /// <summary>Twelve reserved flows, January first, each as <see cref="ReservedFlow"/>, in place of one.</summary>
+    public List<string?>? ReservedByMonth { get; set; }
+
     /// <summary>Prior deliveries: a flow.</summary>
     public string? PriorDeliveries { get; set; }
 

@@ -45,6 +45,7 @@ internal static class StudyDocumentFields
         PlottingPosition = r.Text("plottingPosition"),
         Season = r.Text("season"),
         ReservedFlow = r.Text("reservedFlow"),
+        ReservedByMonth = r.Texts("reservedByMonth"),
         PriorDeliveries = r.Text("priorDeliveries"),
         DesignFlow = r.Text("designFlow"),
     };

@@ -10,6 +10,7 @@ public static class CautionRules
     [
         new NoReservedFlow(),
         new AssumedInputs(),
+        new ReservedByMonth(),
         new RecordUnderTenYears(),
         new MissingDays(),
         new NoRecord(),

@@ -23,9 +23,12 @@ public sealed record FlowInput(
     double? DesignFlowM3PerS,
     string SourceDescription)
 {
-    /// <summary>The allocation in a month; the same all year here.</summary>
+    /// <summary>Allocations by month, January first, where the reserved flow changes through the year; null where it does not. <see cref="Allocation"/> is then that of the season's middle month.</summary>
+    public IReadOnlyList<WaterAllocation>? AllocationByMonth { get; init; }
+
+    /// <summary>The allocation in a month.</summary>
     /// <param name="month">Month, 1 to 12.</param>
-    public WaterAllocation AllocationIn(int month) => Allocation;
+    public WaterAllocation AllocationIn(int month) => AllocationByMonth?[month - 1] ?? Allocation;
 
     /// <summary>The curve of the year on which the plant is run: dry outside the season.</summary>
     /// <exception cref="InvalidOperationException">There is neither a curve nor a record.</exception>

@@ -32,13 +32,16 @@ internal static class FlowWorkings
 
         var split = input.Allocation.Split(flow.MeanFlowM3PerS);
         var reserved = input.Allocation.Reserved;
+        var byMonth = input.AllocationByMonth is { } months
+            ? $" By month, January first: {string.Join(", ", months.Select(m => Amount(m.Reserved, show)))}. Chart and exceedance table show the season's middle month; the energy counts each month's own."
+            : "";
         yield return new Working(
             "usable-flow", StudyStage.Flow, "Flow the plant may use", "Q_{use} = Q − Q_{prior} − Q_{res}",
             $"at the mean flow: {show.Flow(flow.MeanFlowM3PerS)} − {show.Flow(split.PriorM3PerS)} − {show.Flow(split.ReservedM3PerS)}",
             show.Flow(split.UsableM3PerS),
             reserved.Kind == ReservedFlowKind.PercentOfFlow
-                ? $"Reserved: {UnitDisplay.Percent(reserved.Ratio)} of the flow arriving. Taken off before the turbine's limit."
-                : "Taken off before the turbine's limit, never after.",
+                ? $"Reserved: {UnitDisplay.Percent(reserved.Ratio)} of the flow arriving. Taken off before the turbine's limit." + byMonth
+                : "Taken off before the turbine's limit, never after." + byMonth,
             []);
 
         if (flow.DesignFlowIsSuggested)
@@ -55,4 +58,11 @@ internal static class FlowWorkings
                 show.Flow(flow.DesignFlowM3PerS), $"Reached {UnitDisplay.Percent(flow.DesignFlowExceedance)} of the year. This project would suggest {show.Flow(flow.Scan.SuggestedM3PerS)}.", []);
         }
     }
+
+    private static string Amount(ReservedFlow reserved, UnitDisplay show) => reserved.Kind switch
+    {
+        ReservedFlowKind.PercentOfFlow => UnitDisplay.Percent(reserved.Ratio),
+        ReservedFlowKind.Constant => show.Flow(reserved.FlowM3PerS),
+        _ => "none",
+    };
 }

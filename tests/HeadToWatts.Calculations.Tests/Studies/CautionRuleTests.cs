@@ -22,6 +22,7 @@ public class CautionRuleTests
     [
         new("no-reserved-flow", Quiet.WithFlow(f => f with { ReservedFlowIsStated = false }), "even if it is zero", "even if it is zero"),
         new("assumed-inputs", Quiet with { Assumptions = ["The latitude is taken as 45 deg."] }, "The latitude is taken as 45 deg.", "The latitude is taken as 45 deg."),
+        new("reserved-by-month", Quiet.WithFlow(f => f with { AllocationByMonth = [.. Enumerable.Range(1, 12).Select(m => new WaterAllocation(ReservedFlow.Constant(m == 5 ? 0.5 : 0.1), 0))] }), "up to 17.7 cfs", "up to 0.500 m3/s"),
         new("record-under-ten-years", Quiet.WithFlow(f => f with { Record = TestStudies.Record(5) }), "5.00 years", "5.00 years"),
         new("missing-days", Quiet.WithFlow(f => f with { Record = TestStudies.Record(12, (day, flow) => day % 10 == 0 ? double.NaN : flow) }), "439 of 4383 days", "10.0 % of the record"),
         new("no-record", Quiet.WithCurve(BeyondLastRow.Hold, Rows), "entered as rows", "entered as rows"),

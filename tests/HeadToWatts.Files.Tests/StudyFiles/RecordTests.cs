@@ -40,4 +40,42 @@ public class RecordTests
         foreach (var site in DemoSites.All)
             Assert.Empty(StudyBuilder.Build(site.Load(), NoFlowFiles.Instance).Problems);
     }
+
+    [Fact]
+    public void Reserved_flow_by_month_is_taken_off_month_by_month()
+    {
+        var site = DemoSites.All[0].Load();
+        site.Alternatives[0].Flow.ReservedFlow = null;
+        double Energy(IEnumerable<string> months)
+        {
+            site.Alternatives[0].Flow.ReservedByMonth = [.. months];
+            var result = HeadToWatts.Studies.Study.RunAll(StudyBuilder.Build(site, NoFlowFiles.Instance).Value)[0];
+            Assert.Equal(0, result.Energy.Annual.Water.ClosureError, 9);
+            return result.Energy.Annual.AnnualEnergyKwh;
+        }
+
+        var none = Energy(Enumerable.Repeat("none", 12));
+        var july = Energy(Enumerable.Range(1, 12).Select(m => m == 7 ? "60 cfs" : "none"));
+        var january = Energy(Enumerable.Range(1, 12).Select(m => m == 1 ? "60 cfs" : "none"));
+        var all = Energy(Enumerable.Repeat("60 cfs", 12));
+        // The canal is dry in January, so reserving there costs nothing; July costs some, the whole year more. Months by
+        // themselves weigh by their length, not by their days with a flow: thirteen days are blank, worth 0.2 percent.
+        Assert.InRange(january / none, 0.997, 1.003);
+        Assert.True(july < january * 0.99);
+        Assert.True(all < july);
+        // July's cost is July's alone: the run day by day loses it in that month and no other.
+        site.Alternatives[0].Flow.ReservedByMonth = [.. Enumerable.Range(1, 12).Select(m => m == 7 ? "60 cfs" : "none")];
+        var days = HeadToWatts.Studies.Study.RunAll(StudyBuilder.Build(site, NoFlowFiles.Instance).Value)[0].Energy.Days!;
+        site.Alternatives[0].Flow.ReservedByMonth = [.. Enumerable.Repeat("none", 12)];
+        var free = HeadToWatts.Studies.Study.RunAll(StudyBuilder.Build(site, NoFlowFiles.Instance).Value)[0].Energy.Days!;
+        for (var m = 0; m < 12; m++)
+            Assert.Equal(m == 6, days.Months[m].MeanEnergyKwh < free.Months[m].MeanEnergyKwh * 0.999);
+    }
+
+    [Fact]
+    public void Reserved_flow_by_month_needs_a_record()
+    {
+        var months = string.Join(", ", Enumerable.Repeat("\"1 cfs\"", 12));
+        Assert.Contains(Samples.Problems(Samples.With("\"reservedFlow\": \"2 cfs\"", "\"reservedByMonth\": [" + months + "]")), p => p.Why.Contains("know no months", StringComparison.Ordinal));
+    }
 }
