@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Hydraulics.Canals;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Hydraulics.LocalLosses;
 using HeadToWatts.Hydraulics.Surge;
@@ -34,5 +35,16 @@ public static class HydraulicsMethods
         WaveSpeed.Method,
         Joukowsky.Method,
         Michaud.Method,
+        UniformFlow.Method,
+        SpecificEnergy.Method,
+        SpecificEnergy.Froude,
+        SpecificEnergy.Critical,
+        ConjugateDepth.Rectangular,
+        ConjugateDepth.Momentum,
+        HydraulicJump.EnergyLoss,
+        HydraulicJump.Length,
+        StillingBasin.Entry,
+        FreeOverfall.Method,
+        CanalReach.Method,
     ];
 }
