@@ -1,4 +1,6 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.FlowRecords.Devices;
+using HeadToWatts.FlowRecords.Ratings;
 
 namespace HeadToWatts.FlowRecords;
 
@@ -32,5 +34,10 @@ public static class FlowRecordMethods
     public static readonly Method DurationCurve = new("flow-duration-curve", "Flow-duration curve of the period of record", "Q_{mean} = ∫ Q(p) dp", Searcy, "", []);
 
     /// <summary>Every method.</summary>
-    public static IReadOnlyList<Method> All { get; } = [Weibull, Hazen, Gringorten, Cunnane, California, DurationCurve];
+    public static IReadOnlyList<Method> All { get; } = 
+    [
+        Weibull, Hazen, Gringorten, Cunnane, California, DurationCurve,
+        .. RatingMethods.All,
+        .. PrimaryDevices.All.SelectMany(d => d.Methods),
+    ];
 }
