@@ -6,15 +6,18 @@ namespace HeadToWatts.FlowRecords.Devices;
 /// <summary>Parshall flume of 1 to 8 ft or 10 to 50 ft throat, free flow. Other sizes have tables of their own and are refused.</summary>
 public sealed class ParshallFlume : PrimaryDevice
 {
+    // The greatest head grows with the throat; it must stand before the methods that name it.
+    private static readonly InputRange OfSize = new("h_a/h_{max}", "head over the greatest of its size", "1", 0, 1);
+
     /// <summary>1 to 8 ft. The exponent holds the throat's width: 4 W^1.026 Ha^1.522 is not this rating.</summary>
     internal static readonly Method Medium = new(
         "parshall-1-8-ft", "Parshall flume, throat 1 to 8 ft", "Q = 4 W h_a^{1.522 W^{0.026}} (feet)", DeviceSources.Parshall, "",
-        [new InputRange("W", "throat width", "m", Feet.FootM, 8 * Feet.FootM), new InputRange("h_a", "head", "m", 0.1 * Feet.FootM, 2.5 * Feet.FootM)]);
+        [new InputRange("W", "throat width", "m", Feet.FootM, 8 * Feet.FootM), new InputRange("h_a", "head", "m", 0.1 * Feet.FootM, 2.5 * Feet.FootM), OfSize]);
 
     /// <summary>10 to 50 ft.</summary>
     internal static readonly Method Large = new(
         "parshall-10-50-ft", "Parshall flume, throat 10 to 50 ft", "Q = (3.6875 W + 2.5) h_a^{1.6} (feet)", DeviceSources.LargeFlumes, "",
-        [new InputRange("W", "throat width", "m", 10 * Feet.FootM, 50 * Feet.FootM), new InputRange("h_a", "head", "m", 0.3 * Feet.FootM, 6 * Feet.FootM)]);
+        [new InputRange("W", "throat width", "m", 10 * Feet.FootM, 50 * Feet.FootM), new InputRange("h_a", "head", "m", 0.3 * Feet.FootM, 6 * Feet.FootM), OfSize]);
 
     private readonly double _throatFt;
     private readonly double _exponent;
@@ -74,7 +77,7 @@ public sealed class ParshallFlume : PrimaryDevice
         $"Parshall flume, throat {ThroatWidthM.ToString("0.###", CultureInfo.InvariantCulture)} m ({_throatFt.ToString("0.##", CultureInfo.InvariantCulture)} ft)";
 
     /// <inheritdoc/>
-    public override MethodUse UsedBetween(double lowestM, double highestM) => Method.Used(new InputSpan("W", ThroatWidthM, ThroatWidthM), new InputSpan("h_a", lowestM, highestM));
+    public override MethodUse UsedBetween(double lowestM, double highestM) => Method.Used(new InputSpan("W", ThroatWidthM, ThroatWidthM), new InputSpan("h_a", lowestM, highestM), new InputSpan("h_a/h_{max}", lowestM / HighestHeadM, highestM / HighestHeadM));
 
     /// <inheritdoc/>
     protected override double FreeFlowM3PerS(double headM)
