@@ -33,10 +33,10 @@ public sealed class MovingHead(LevelRule headwater, LevelRule tailwater, WaterAl
     /// <param name="usableFlowM3PerS">Usable flow, m3/s.</param>
     public double PassingM3PerS(double usableFlowM3PerS)
     {
-        var reserved = allocation.Reserved;
-        if (reserved.Kind == ReservedFlowKind.PercentOfFlow && reserved.Ratio < 1)
-            return ((usableFlowM3PerS + allocation.PriorDeliveriesM3PerS) / (1 - reserved.Ratio)) - allocation.PriorDeliveriesM3PerS;
-        return usableFlowM3PerS + reserved.FlowM3PerS;
+        // The greater of what the constant or floor and what the share of the flow leaves in the stream.
+        var (reserved, prior) = (allocation.Reserved, allocation.PriorDeliveriesM3PerS);
+        var byFloor = usableFlowM3PerS + reserved.FlowM3PerS;
+        return reserved.Ratio is > 0 and < 1 ? Math.Max(byFloor, ((usableFlowM3PerS + prior) / (1 - reserved.Ratio)) - prior) : byFloor;
     }
 
     /// <summary>Usable flows at which a rating changes its slope, m3/s.</summary>

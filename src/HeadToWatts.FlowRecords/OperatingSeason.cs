@@ -76,6 +76,15 @@ public sealed class OperatingSeason : IEquatable<OperatingSeason>
         return Spans([.. months.Select(m => (new MonthDay(m, 1), new MonthDay(m, m is >= 1 and <= 12 ? DateTime.DaysInMonth(LeapYear, m) : 1)))]);
     }
 
+    /// <summary>The days that are in both seasons; null when there is none.</summary>
+    /// <param name="other">The other season.</param>
+    public OperatingSeason? Within(OperatingSeason other)
+    {
+        ArgumentNullException.ThrowIfNull(other);
+        var both = new OperatingSeason([.. _runs.Zip(other._runs, (a, b) => a && b)]);
+        return both.DaysPerYear > 0 ? both : null;
+    }
+
     /// <summary>Reads a season: "all year", "15 Apr to 15 Oct", "Apr 15 - Oct 15", "04-15..10-15", "Apr to Oct", "Apr, May, Jun", or several spans with commas.</summary>
     /// <param name="text">The text as written.</param>
     /// <param name="where">Where it stands.</param>

@@ -3,9 +3,20 @@ namespace HeadToWatts.FlowRecords;
 /// <summary>Ranks the days of a record and plots them.</summary>
 internal static class RecordCurve
 {
-    public static FlowDurationCurve Build(DailyRecord record, PlottingPosition position, OperatingSeason season)
+    public static FlowDurationCurve Build(DailyRecord record, PlottingPosition position, OperatingSeason season) =>
+        Plotted(Ranked(record, season), position).ForSeasonShare(season.ShareOfYear);
+
+    /// <summary>The curve of flows in any order, over their own time.</summary>
+    public static FlowDurationCurve OfFlows(double[] flows, PlottingPosition position)
     {
-        var ranked = Ranked(record, season);
+        double[] ranked = [.. flows];
+        Array.Sort(ranked);
+        Array.Reverse(ranked);
+        return Plotted(ranked, position);
+    }
+
+    private static FlowDurationCurve Plotted(double[] ranked, PlottingPosition position)
+    {
         var n = ranked.Length;
         var exceedances = new List<double>();
         var kept = new List<double>();
@@ -32,7 +43,7 @@ internal static class RecordCurve
 
         if (exceedances[^1] < 1)
             Point(1, ranked[^1]);
-        return new FlowDurationCurve([.. exceedances], [.. kept], rows, BeyondLastRow.Hold).ForSeasonShare(season.ShareOfYear);
+        return new FlowDurationCurve([.. exceedances], [.. kept], rows, BeyondLastRow.Hold);
 
         void Point(double exceedance, double flowM3PerS)
         {

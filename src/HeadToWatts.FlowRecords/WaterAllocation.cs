@@ -11,6 +11,9 @@ public enum ReservedFlowKind
 
     /// <summary>A share of the flow that arrives.</summary>
     PercentOfFlow,
+
+    /// <summary>A share of the flow that arrives, and never less than a floor.</summary>
+    PercentWithFloor,
 }
 
 /// <summary>Water that must stay in the stream or canal (instream or compensation flow).</summary>
@@ -29,7 +32,7 @@ public sealed record ReservedFlow
     /// <summary>How it is set.</summary>
     public ReservedFlowKind Kind { get; }
 
-    /// <summary>The constant flow, m3/s; 0 for the other kinds.</summary>
+    /// <summary>The constant flow or the floor, m3/s; 0 for the other kinds.</summary>
     public double FlowM3PerS { get; }
 
     /// <summary>Share of the arriving flow, 0 to 1; 0 for the other kinds.</summary>
@@ -46,16 +49,32 @@ public sealed record ReservedFlow
     public static ReservedFlow PercentOfFlow(double ratio) => ratio is >= 0 and <= 1
         ? new(ReservedFlowKind.PercentOfFlow, 0, ratio)
         : throw new ArgumentOutOfRangeException(nameof(ratio), ratio, "A share of the flow lies within 0 to 1.");
+
+    /// <summary>A share of the flow that arrives, and never less than a floor.</summary>
+    /// <param name="ratio">Share, 0 to 1.</param>
+    /// <param name="floorM3PerS">Floor, m3/s, zero or more.</param>
+    public static ReservedFlow PercentWithFloor(double ratio, double floorM3PerS)
+    {
+        if (!(ratio is >= 0 and <= 1))
+            throw new ArgumentOutOfRangeException(nameof(ratio), ratio, "A share of the flow lies within 0 to 1.");
+        if (!(floorM3PerS >= 0 && double.IsFinite(floorM3PerS)))
+            throw new ArgumentOutOfRangeException(nameof(floorM3PerS), floorM3PerS, "A reserved flow is zero or more.");
+        return new(ReservedFlowKind.PercentWithFloor, floorM3PerS, ratio);
+    }
+
+    /// <summary>What is to stay of an arriving flow, before it is asked how much is there, m3/s.</summary>
+    internal double WantedM3PerS(double flowM3PerS) => Math.Max(FlowM3PerS, Ratio * flowM3PerS);
 }
 
 /// <summary>Where an arriving flow goes. The three parts sum to it.</summary>
 /// <param name="PriorM3PerS">To prior deliveries, m3/s.</param>
-/// <param name="ReservedM3PerS">Reserved, m3/s.</param>
+/// <param name="ReservedM3PerS">Reserved, m3/s; with a water right also what lies beyond its rate, which stays in the stream.</param>
 /// <param name="UsableM3PerS">Left for the plant, m3/s.</param>
 public readonly record struct WaterSplit(double PriorM3PerS, double ReservedM3PerS, double UsableM3PerS);
 
 /// <summary>
-/// What comes off the flow before the turbine limit: prior deliveries first, then the reserved flow out of what is left.
+/// What comes off the flow before the turbine limit: prior deliveries first, then the reserved flow out of what is left. Of the
+/// rest the plant may take no more than the rate of its water right.
 /// </summary>
 public sealed record WaterAllocation
 {
@@ -80,26 +99,44 @@ public sealed record WaterAllocation
     /// <summary>Water others are entitled to first, m3/s.</summary>
     public double PriorDeliveriesM3PerS { get; }
 
+    /// <summary>Rate of the water right, m3/s: the most the plant may take; null when none is given.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">The rate is negative, infinite or not a number.</exception>
+    public double? RightRateM3PerS
+    {
+        get;
+        init => field = value is not { } rate || (rate >= 0 && double.IsFinite(rate))
+            ? value
+            : throw new ArgumentOutOfRangeException(nameof(value), value, "The rate of a water right is zero or more.");
+    }
+
     /// <summary>True when nothing comes off.</summary>
-    public bool IsNone => PriorDeliveriesM3PerS == 0 && Reserved.FlowM3PerS == 0 && Reserved.Ratio == 0;
+    public bool IsNone => PriorDeliveriesM3PerS == 0 && Reserved.FlowM3PerS == 0 && Reserved.Ratio == 0 && RightRateM3PerS is null;
 
     /// <summary>Flows at which the split bends, m3/s, rising; between them every part is a straight line of the flow.</summary>
     public IReadOnlyList<double> FlowBreakpointsM3PerS
     {
         get
         {
-            var bends = new List<double>(2);
-            if (PriorDeliveriesM3PerS > 0)
-                bends.Add(PriorDeliveriesM3PerS);
-            var second = Reserved.Kind switch
+            var (prior, floor, ratio) = (PriorDeliveriesM3PerS, Reserved.FlowM3PerS, Reserved.Ratio);
+            var bends = new SortedSet<double>();
+            foreach (var rate in RightRateM3PerS is { } right ? new[] { 0, right } : [0.0])
             {
-                ReservedFlowKind.Constant => PriorDeliveriesM3PerS + Reserved.FlowM3PerS,
-                ReservedFlowKind.PercentOfFlow when Reserved.Ratio < 1 => PriorDeliveriesM3PerS / (1 - Reserved.Ratio),
-                _ => 0,
-            };
-            if (second > PriorDeliveriesM3PerS)
-                bends.Add(second);
-            return bends;
+                // Where the rest after prior deliveries meets the reserve, and where it meets reserve and right together.
+                Add(prior + rate);
+                Add(prior + floor + rate);
+                if (ratio < 1)
+                    Add((prior + rate) / (1 - ratio));
+            }
+
+            if (ratio > 0)
+                Add(floor / ratio);
+            return [.. bends];
+
+            void Add(double flowM3PerS)
+            {
+                if (flowM3PerS > 0)
+                    bends.Add(flowM3PerS);
+            }
         }
     }
 
@@ -111,12 +148,10 @@ public sealed record WaterAllocation
             throw new ArgumentOutOfRangeException(nameof(flowM3PerS), flowM3PerS, "A flow is zero or more.");
         var prior = Math.Min(PriorDeliveriesM3PerS, flowM3PerS);
         var left = flowM3PerS - prior;
-        var reserved = Reserved.Kind switch
-        {
-            ReservedFlowKind.Constant => Math.Min(Reserved.FlowM3PerS, left),
-            ReservedFlowKind.PercentOfFlow => Math.Min(Reserved.Ratio * flowM3PerS, left),
-            _ => 0,
-        };
-        return new WaterSplit(prior, reserved, left - reserved);
+        var reserved = Math.Min(Reserved.WantedM3PerS(flowM3PerS), left);
+        var usable = left - reserved;
+        if (RightRateM3PerS is { } right && usable > right)
+            (reserved, usable) = (left - right, right);
+        return new WaterSplit(prior, reserved, usable);
     }
 }

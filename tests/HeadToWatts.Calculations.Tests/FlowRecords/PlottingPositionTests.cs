@@ -41,9 +41,9 @@ public sealed class PlottingPositionTests
         double[] negated = [.. flows.Select(q => -q)];
         for (var p = 0.01; p < 0.995; p += 0.01)
         {
-            Close(Statistics.QuantileCustom(flows, 1 - p, QuantileDefinition.Weibull), PlottingPositions.Weibull, p);
-            Close(Statistics.QuantileCustom(flows, 1 - p, QuantileDefinition.Hazen), PlottingPositions.Hazen, p);
-            Close(-Statistics.QuantileCustom(negated, p, QuantileDefinition.California), PlottingPositions.California, p);
+            Close(MathNet.Numerics.Statistics.Statistics.QuantileCustom(flows, 1 - p, QuantileDefinition.Weibull), PlottingPositions.Weibull, p);
+            Close(MathNet.Numerics.Statistics.Statistics.QuantileCustom(flows, 1 - p, QuantileDefinition.Hazen), PlottingPositions.Hazen, p);
+            Close(-MathNet.Numerics.Statistics.Statistics.QuantileCustom(negated, p, QuantileDefinition.California), PlottingPositions.California, p);
         }
 
         void Close(double expected, PlottingPosition position, double p)
