@@ -15,8 +15,8 @@ public readonly record struct Vertical(double StationM, double DepthM, double Ve
 /// <param name="WidthM">Its width, half way to each neighbour, m.</param>
 /// <param name="AreaM2">Its area, m2.</param>
 /// <param name="FlowM3PerS">Its flow, m3/s.</param>
-/// <param name="ShareRatio">Its share of the flow.</param>
-public sealed record VerticalPart(Vertical Vertical, double WidthM, double AreaM2, double FlowM3PerS, double ShareRatio);
+/// <param name="FlowShare">Its share of the flow.</param>
+public sealed record VerticalPart(Vertical Vertical, double WidthM, double AreaM2, double FlowM3PerS, double FlowShare);
 
 /// <summary>A velocity-area measurement.</summary>
 /// <param name="Measurement">Flow and band.</param>
@@ -77,7 +77,7 @@ public static class VelocityArea
         VerticalPart[] parts = [.. verticals.Select((v, i) => new VerticalPart(v, widths[i], v.DepthM * widths[i], v.VelocityMPerS * v.DepthM * widths[i], v.VelocityMPerS * v.DepthM * widths[i] / flow))];
         var wet = verticals.Count(v => v.DepthM > 0);
         var notes = new List<string>();
-        if (parts.Max(p => p.ShareRatio) is var most && most > LargestShare)
+        if (parts.Max(p => p.FlowShare) is var most && most > LargestShare)
             notes.Add($"one vertical carries {(most * 100).ToString("0", CultureInfo.InvariantCulture)} % of the flow; more verticals would read better (10 % or less is usual)");
         if (verticals.Any(v => v.VelocityMPerS < 0))
             notes.Add("water turns back in places");

@@ -18,8 +18,8 @@ public sealed class LogPearsonThree
     {
         Years = years;
         ZeroYears = zeroYears;
-        MeanLogRatio = meanLog;
-        DeviationLogRatio = deviationLog;
+        MeanLog = meanLog;
+        DeviationLog = deviationLog;
         SkewCoefficient = skewCoefficient;
     }
 
@@ -30,16 +30,16 @@ public sealed class LogPearsonThree
     public int ZeroYears { get; }
 
     /// <summary>Mean of the decimal logarithms of the flows in m3/s.</summary>
-    public double MeanLogRatio { get; }
+    public double MeanLog { get; }
 
     /// <summary>Standard deviation of the decimal logarithms.</summary>
-    public double DeviationLogRatio { get; }
+    public double DeviationLog { get; }
 
     /// <summary>Skew of the decimal logarithms, corrected for the number of years.</summary>
     public double SkewCoefficient { get; }
 
     /// <summary>Share of years of zero p_0.</summary>
-    public double ZeroShareRatio => (double)ZeroYears / Years;
+    public double ZeroShare => (double)ZeroYears / Years;
 
     /// <summary>The use of the method, with the years behind it.</summary>
     public IReadOnlyList<MethodUse> Uses =>
@@ -88,9 +88,9 @@ public sealed class LogPearsonThree
     {
         if (!(nonExceedance is > 0 and < 1))
             throw new ArgumentOutOfRangeException(nameof(nonExceedance), nonExceedance, "A probability lies between 0 and 1.");
-        if (nonExceedance <= ZeroShareRatio)
+        if (nonExceedance <= ZeroShare)
             return 0;
-        var conditional = (nonExceedance - ZeroShareRatio) / (1 - ZeroShareRatio);
-        return Math.Pow(10, MeanLogRatio + (PearsonThree.FrequencyFactor(SkewCoefficient, conditional) * DeviationLogRatio));
+        var conditional = (nonExceedance - ZeroShare) / (1 - ZeroShare);
+        return Math.Pow(10, MeanLog + (PearsonThree.FrequencyFactor(SkewCoefficient, conditional) * DeviationLog));
     }
 }

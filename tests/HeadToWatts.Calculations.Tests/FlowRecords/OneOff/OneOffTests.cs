@@ -59,7 +59,7 @@ public sealed class OneOffTests
     {
         var result = VelocityArea.Measure([new(0, 0, 0), new(1, 0.8, 0.5), new(2, 1, 0.6), new(3, 0.7, 0.4), new(4, 0, 0)], "verticals").Value;
         Assert.Equal(result.Measurement.FlowM3PerS, result.Parts.Sum(p => p.FlowM3PerS), 1e-12);
-        Assert.Equal(1, result.Parts.Sum(p => p.ShareRatio), 1e-12);
+        Assert.Equal(1, result.Parts.Sum(p => p.FlowShare), 1e-12);
         Assert.Equal(result.Measurement.FlowM3PerS / result.AreaM2, result.MeanVelocityMPerS, 1e-12);
         Assert.Contains(result.Measurement.Notes, n => n.Contains("one vertical carries", StringComparison.Ordinal));
         Assert.NotEmpty(result.Measurement.Uses[0].OutOfRange());

@@ -39,12 +39,11 @@ public sealed class ReservedTests
     public void Between_the_bends_every_part_is_straight() =>
         Gen.Select(Allocations, Gen.Double[0, 1]).Sample((allocation, t) =>
         {
-            double[] bends = [0, .. allocation.FlowBreakpointsM3PerS, 1e3];
+            // A share near nothing or near everything has a bend far beyond any flow.
+            double[] bends = [0, .. allocation.FlowBreakpointsM3PerS.Where(q => q < 1e3), 1e3];
             Assert.Equal(bends.Order(), bends);
             for (var i = 1; i < bends.Length; i++)
             {
-                if (bends[i] > 1e3)
-                    continue;
                 var flow = bends[i - 1] + (t * (bends[i] - bends[i - 1]));
                 var (a, b, at) = (allocation.Split(bends[i - 1]), allocation.Split(bends[i]), allocation.Split(flow));
                 Assert.Equal(a.UsableM3PerS + (t * (b.UsableM3PerS - a.UsableM3PerS)), at.UsableM3PerS, 1e-8 * Math.Max(1, bends[i]));
