@@ -33,7 +33,7 @@ public sealed record EnvelopeShape(string Name, IReadOnlyList<HeadAndFlow> Corne
 /// <summary>What the envelope chart shows.</summary>
 /// <param name="Shapes">The turbine types.</param>
 /// <param name="Site">Design flow of one unit and net head at it.</param>
-/// <param name="Range">What the site offers a unit through the year, in the order of falling flow.</param>
+/// <param name="Range">What the site offers a unit through the year, from the wettest time to the driest.</param>
 public sealed record EnvelopeInput(IReadOnlyList<EnvelopeShape> Shapes, HeadAndFlow Site, IReadOnlyList<HeadAndFlow> Range);
 
 /// <summary>The ranges of the turbine types over log head and log flow, with the site's point and its range through the year.</summary>

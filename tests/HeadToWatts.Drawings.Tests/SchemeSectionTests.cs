@@ -125,6 +125,7 @@ public sealed class SchemeSectionTests
         Assert.Equal(low.Grades.Select(g => g.CentreLevelM), high.Grades.Select(g => g.CentreLevelM));
         var (lowDrawn, highDrawn) = (SchemeSection.Draw(low, Si, DrawingSize.Wide), SchemeSection.Draw(high, Si, DrawingSize.Wide));
         Assert.Equal(PixelsPerMetre(lowDrawn), PixelsPerMetre(highDrawn), 9);
+        Assert.Equal(PixelsPerMetre(lowDrawn), PixelsPerMetre(SchemeSection.Draw(result, Si, DrawingSize.Wide, 0)), 9);
         Assert.Equal(low.GrossHeadM / high.GrossHeadM, LongestUpright(lowDrawn, 0) / LongestUpright(highDrawn, 0), 6);
     }
 

@@ -31,7 +31,7 @@ public static partial class EnvelopeChart
             [.. result.Turbine.Ranking.Select(c => new EnvelopeShape(
                 c.Type.Name, [.. c.Type.Envelope.Vertices.Select(v => new HeadAndFlow(v.FlowM3PerS, v.HeadM))], Family(c.Type), c.Type.Id == chosen.Id))],
             new HeadAndFlow(result.Flow.DesignFlowM3PerS / units, Math.Max(result.Head.NetHeadAtDesignM, 0)),
-            [.. range.OrderByDescending(p => p.FlowM3PerS)]);
+            range);
     }
 
     private static MachineFamily Family(TurbineType type) => type switch

@@ -1,12 +1,15 @@
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Drawings.Canvas;
 using HeadToWatts.Drawings.Scheme;
+using HeadToWatts.EnergyYield;
 using HeadToWatts.Studies;
 
 namespace HeadToWatts.Drawings;
 
 public static partial class SchemeSection
 {
+    private const int ScaleSteps = 20;
+
     /// <summary>Draws the section of a study.</summary>
     /// <param name="result">The study.</param>
     /// <param name="show">Units in which numbers are shown.</param>
@@ -47,8 +50,17 @@ public static partial class SchemeSection
             $"{result.Turbine.Chosen.Type.Name} × {result.Turbine.Units.UnitCount}",
             point.MeterPowerKw)
         {
-            HighestHeadwaterM = head.Levels.Select(l => l.HeadwaterM).Append(head.HeadwaterM).Append(headwaterM).Max(),
-            LowestTailwaterM = head.Levels.Select(l => l.TailwaterM).Append(head.TailwaterM).Append(tailwaterM).Min(),
+            HighestHeadwaterM = Everywhere(m => m.HeadwaterM, head.HeadwaterM).Append(headwaterM).Max(),
+            LowestTailwaterM = Everywhere(m => m.TailwaterM, head.TailwaterM).Append(tailwaterM).Min(),
         };
+
+        // The scale is that of the whole range of flows, so that it does not move with the one shown.
+        IEnumerable<double> Everywhere(Func<MovingHead, Func<double, double>> level, double atDesignM)
+        {
+            if (plant.Design.MovingHead is not { } moving)
+                return [atDesignM];
+            var largest = Math.Max(result.Flow.Supply.UsableM3PerS[0], result.Flow.DesignFlowM3PerS);
+            return Enumerable.Range(0, ScaleSteps + 1).Select(i => level(moving)(largest * i / ScaleSteps)).Append(atDesignM);
+        }
     }
 }
