@@ -4,7 +4,6 @@ using HeadToWatts.Hydraulics.Friction;
 namespace HeadToWatts.Benchmarks;
 
 /// <summary>One friction loss per metre by each formula, at a flow that changes so that nothing can be foreseen.</summary>
-[ShortRunJob]
 [MemoryDiagnoser]
 public class FrictionBenchmarks
 {

@@ -5,7 +5,6 @@ using HeadToWatts.Studies;
 namespace HeadToWatts.Benchmarks;
 
 /// <summary>A whole memo with its figures.</summary>
-[ShortRunJob]
 [MemoryDiagnoser]
 public class MemoBenchmarks
 {

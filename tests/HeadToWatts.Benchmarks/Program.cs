@@ -1,5 +1,10 @@
+using BenchmarkDotNet.Configs;
+using BenchmarkDotNet.Jobs;
 using BenchmarkDotNet.Running;
+using BenchmarkDotNet.Toolchains.InProcess.Emit;
 using HeadToWatts.Benchmarks;
 
 // dotnet run -c Release --project tests/HeadToWatts.Benchmarks -- --filter '*'
-BenchmarkSwitcher.FromTypes([typeof(FrictionBenchmarks), typeof(StudyBenchmarks), typeof(MemoBenchmarks)]).Run(args);
+// In process: a build of its own would not know this repository's central packages.
+var config = DefaultConfig.Instance.AddJob(Job.ShortRun.WithToolchain(InProcessEmitToolchain.Instance));
+BenchmarkSwitcher.FromTypes([typeof(FrictionBenchmarks), typeof(StudyBenchmarks), typeof(MemoBenchmarks)]).Run(args, config);

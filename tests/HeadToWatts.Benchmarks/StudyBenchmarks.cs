@@ -6,7 +6,6 @@ using HeadToWatts.Studies.Inputs;
 namespace HeadToWatts.Benchmarks;
 
 /// <summary>The year's integral, the run over every day, and a whole study of thirty years of daily flows.</summary>
-[ShortRunJob]
 [MemoryDiagnoser]
 public class StudyBenchmarks
 {
