@@ -16,7 +16,7 @@ public sealed class WaterWheelSpeed : RunnerSpeedRule
 
     private const double DiameterToHead = 0.9;
 
-    private static readonly Source Young = new("young-1807", SourceKind.Published, "T. Young", "1807", "A course of lectures on natural philosophy and the mechanical arts", "London, lecture on the regulation of hydraulic forces, p. 321");
+    private static readonly Source Young = new("young-1807", SourceKind.Published, "T. Young", "1807", "Natural philosophy and the mechanical arts", "London, volume 1, on the regulation of hydraulic forces, p. 321");
 
     /// <summary>The method: n = 60 V / (π D) at a rim speed V of 1.2 m/s.</summary>
     public static Method Speed { get; } = new(
