@@ -22,6 +22,8 @@ builder.Services.AddDataProtection().SetApplicationName("HeadToWatts").PersistKe
 builder.Services.AddSingleton(_ => StudyStore.Open(data));
 builder.Services.AddSingleton(TimeProvider.System);
 builder.Services.AddScoped<StudySession>();
+if (!string.Equals(builder.Configuration["warm-up"], "no", StringComparison.OrdinalIgnoreCase))
+    builder.Services.AddHostedService<WarmUp>();
 builder.Services.AddRadzenComponents();
 builder.Services.AddRazorComponents().AddInteractiveServerComponents();
 

@@ -25,6 +25,7 @@ public sealed class LocalApp : WebApplicationFactory<Program>
     {
         builder.UseEnvironment("Production");
         builder.UseSetting("data", DataFolder);
+        builder.UseSetting("warm-up", "no");
     }
 
     protected override void Dispose(bool disposing)
