@@ -10,9 +10,15 @@ internal static class Finding
     public static IElement FindByLabel<T>(this IRenderedComponent<T> page, string label)
         where T : IComponent
     {
-        var found = page.FindAll("label").Where(l => l.TextContent.Trim() == label).ToList();
+        // A run may be under way from the entry before; its redraw brings the field.
+        page.WaitForState(() => Labels(page, label).Count > 0, TimeSpan.FromSeconds(10));
+        var found = Labels(page, label);
         Assert.True(found.Count == 1, $"{found.Count} labels read '{label}'. There are: {string.Join(" | ", page.FindAll("label").Select(l => l.TextContent.Trim()))}");
         var id = found[0].GetAttribute("for");
         return id is null ? found[0].QuerySelector("input,select,textarea")! : page.Find("#" + id);
     }
+
+    private static List<IElement> Labels<T>(IRenderedComponent<T> page, string label)
+        where T : IComponent =>
+        [.. page.FindAll("label").Where(l => l.TextContent.Trim() == label)];
 }
