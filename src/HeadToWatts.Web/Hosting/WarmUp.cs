@@ -44,7 +44,9 @@ internal sealed class WarmUp : BackgroundService
                     SvgWriter.Write(drawing, "warm-up");
             }
 
-            Thread.Sleep(5);
+            // A short rest for whoever else wants the processor; the end of the program wakes it.
+            if (stopping.WaitHandle.WaitOne(5))
+                return;
         }
     }
 }
