@@ -2,12 +2,13 @@ using System.CommandLine;
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Files.FlowFiles;
+using HeadToWatts.Files.FlowFiles.Recipes;
 using HeadToWatts.Files.StudyFiles;
 using HeadToWatts.FlowRecords;
 
 namespace HeadToWatts.Cli;
 
-/// <summary>record FLOWFILE: say what a flow file holds.</summary>
+/// <summary>record FLOWFILE: say what a flow file holds, or propose how to read it.</summary>
 internal static class RecordCommand
 {
     private static readonly double[] Exceedances = [0.01, 0.05, 0.10, 0.25, 0.30, 0.50, 0.75, 0.90, 0.95, 0.99];
@@ -18,12 +19,87 @@ internal static class RecordCommand
         var unit = new Option<string?>("--unit") { Description = "Unit of the flows, where the file does not say it.", HelpName = "UNIT" };
         var order = new Option<string?>("--dates") { Description = "month-day or day-month, where the file does not decide it.", HelpName = "ORDER" };
         var column = new Option<string?>("--column") { Description = "The column with the flows, where there are several.", HelpName = "NAME" };
-        var command = new Command("record", "Say what is in a flow file.") { file, unit, order, column };
-        command.SetAction(parsed => Run(terminal, parsed.GetValue(file)!, new RecordDocument { File = parsed.GetValue(file), Unit = parsed.GetValue(unit), DateOrder = parsed.GetValue(order), Column = parsed.GetValue(column) }));
+        var recipe = new Option<string?>("--recipe") { Description = "A reading recipe, for a file of no known format.", HelpName = "FILE.json" };
+        var propose = new Option<bool>("--propose") { Description = "Write a proposed recipe to standard output; its evidence and open questions to standard error." };
+        var gaps = new Option<string?>("--gaps") { Description = "left out, interpolated up to N days, or whole years only.", HelpName = "CHOICE" };
+        var years = new Option<string?>("--year-starts") { Description = "Month in which a whole year begins.", HelpName = "MONTH" };
+        var negatives = new Option<string?>("--negatives") { Description = "refused, zeroed, kept out, or kept.", HelpName = "CHOICE" };
+        var estimated = new Option<string?>("--estimated") { Description = "kept or left out.", HelpName = "CHOICE" };
+        var repeats = new Option<string?>("--repeats") { Description = "refused, first or last: two different flows for one day or time.", HelpName = "CHOICE" };
+        var share = new Option<string?>("--day-share") { Description = "Share of a day over which the flow must be known.", HelpName = "PERCENT" };
+        var step = new Option<string?>("--longest-step") { Description = "Longest time between two values that is bridged.", HelpName = "TIME" };
+        var command = new Command("record", "Say what is in a flow file.") { file, unit, order, column, recipe, propose, gaps, years, negatives, estimated, repeats, share, step };
+        command.SetAction((parsed, cancellation) =>
+        {
+            var path = parsed.GetValue(file)!;
+            if (parsed.GetValue(propose))
+                return Task.FromResult(Propose(terminal, path, cancellation));
+            var about = new RecordDocument
+            {
+                File = path,
+                Unit = parsed.GetValue(unit),
+                DateOrder = parsed.GetValue(order),
+                Column = parsed.GetValue(column),
+                Policies = new PolicyDocument
+                {
+                    Gaps = parsed.GetValue(gaps),
+                    YearStarts = parsed.GetValue(years),
+                    Negatives = parsed.GetValue(negatives),
+                    Estimated = parsed.GetValue(estimated),
+                    Repeats = parsed.GetValue(repeats),
+                    DayShare = parsed.GetValue(share),
+                    LongestStep = parsed.GetValue(step),
+                },
+            };
+            if (parsed.GetValue(recipe) is not { } recipePath)
+                return Task.FromResult(Run(terminal, path, about, cancellation));
+            if (Recipe(terminal, recipePath) is not { } document)
+                return Task.FromResult(CommandLine.Refused);
+            about.Recipe = document;
+            return Task.FromResult(Run(terminal, path, about, cancellation));
+        });
         return command;
     }
 
-    private static int Run(Terminal terminal, string path, RecordDocument about)
+    private static RecipeDocument? Recipe(Terminal terminal, string path)
+    {
+        using var stream = terminal.Open(path);
+        if (stream is null)
+            return null;
+        using var reader = new StreamReader(stream);
+        var document = RecipeFile.Parse(Path.GetFileName(path), reader.ReadToEnd());
+        if (document.IsGood)
+            return document.Value;
+        foreach (var problem in document.Problems)
+            terminal.Error.WriteLine(problem);
+        return null;
+    }
+
+    private static int Propose(Terminal terminal, string path, CancellationToken cancellation)
+    {
+        using var stream = terminal.Open(path);
+        if (stream is null)
+            return CommandLine.Refused;
+        var held = FlowFileSource.Hold(Name(path), stream);
+        if (!held.TryGet(out var source))
+        {
+            foreach (var problem in held.Problems)
+                terminal.Error.WriteLine(problem);
+            return CommandLine.Refused;
+        }
+
+        var proposal = RecipeProposer.Propose(source, cancellation);
+        terminal.Output.Write(RecipeFile.Write(RecipeDocument.From(proposal.Recipe)));
+        foreach (var evidence in proposal.Evidence)
+            terminal.Error.WriteLine($"{evidence.Field}: {evidence.Text}");
+        foreach (var question in proposal.Questions)
+            terminal.Error.WriteLine($"{question.Field}: question: {question.Text}{(question.Choices.Count > 0 ? $" ({string.Join(", ", question.Choices)})" : "")}");
+        return proposal.IsDecided ? CommandLine.Done : CommandLine.Refused;
+    }
+
+    private static string Name(string path) => path == "-" ? "(standard input)" : Path.GetFileName(path);
+
+    private static int Run(Terminal terminal, string path, RecordDocument about, CancellationToken cancellation)
     {
         var problems = new List<Problem>();
         if (!FolderFlowFiles.TryOptions(about, "option", problems, out var options))
@@ -35,7 +111,7 @@ internal static class RecordCommand
         using var stream = terminal.Open(path);
         if (stream is null)
             return CommandLine.Refused;
-        var reading = FlowFileReader.Read(path == "-" ? "(standard input)" : Path.GetFileName(path), stream, options);
+        var reading = FlowFileReader.Read(Name(path), stream, options, cancellation);
         if (!reading.IsGood)
         {
             foreach (var problem in reading.Problems)

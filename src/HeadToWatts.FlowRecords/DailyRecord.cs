@@ -1,3 +1,5 @@
+using HeadToWatts.FlowRecords.Quality;
+
 namespace HeadToWatts.FlowRecords;
 
 /// <summary>
@@ -81,6 +83,9 @@ public sealed class DailyRecord
 
     /// <summary>Station, source, kind of record.</summary>
     public string Description { get; }
+
+    /// <summary>What the record is worth, for a record that was read; null where nobody looked.</summary>
+    public RecordQuality? Quality { get; init; }
 
     /// <summary>Flow of each day in m3/s, NaN where it is missing; without a copy.</summary>
     public ReadOnlySpan<double> Flows => _flows;

@@ -1,6 +1,7 @@
 using System.Globalization;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Quality;
 
 namespace HeadToWatts.Files.FlowFiles;
 
@@ -76,6 +77,9 @@ public sealed record FlowFileReport
     /// <summary>What was assumed, each in words with its evidence.</summary>
     public IReadOnlyList<string> Assumptions { get; init; } = [];
 
+    /// <summary>What the record is worth; null for a curve.</summary>
+    public RecordQuality? Quality { get; init; }
+
     /// <summary>The report in plain lines.</summary>
     public IReadOnlyList<string> Lines()
     {
@@ -102,6 +106,8 @@ public sealed record FlowFileReport
         if (Codes.Count > 0)
             lines.Add("Quality codes: " + string.Join(", ", Codes.Select(m => $"{m.Mark} ({Number(m.Count)})")));
         lines.AddRange(Assumptions.Select(a => "Assumed: " + a));
+        if (Quality is not null)
+            lines.AddRange(Quality.Lines());
         return lines;
     }
 

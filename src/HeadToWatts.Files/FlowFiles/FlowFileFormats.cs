@@ -1,5 +1,8 @@
 using HeadToWatts.Files.FlowFiles.CurveCsv;
 using HeadToWatts.Files.FlowFiles.DailyCsv;
+using HeadToWatts.Files.FlowFiles.FranceJson;
+using HeadToWatts.Files.FlowFiles.Grdc;
+using HeadToWatts.Files.FlowFiles.Nrfa;
 using HeadToWatts.Files.FlowFiles.Reclamation;
 using HeadToWatts.Files.FlowFiles.UsgsRdb;
 using HeadToWatts.Files.FlowFiles.WaterSurveyCanada;
@@ -14,6 +17,9 @@ public static class FlowFileFormats
     [
         new UsgsRdbFormat(),
         new WaterSurveyCanadaFormat(),
+        new NrfaFormat(),
+        new GrdcFormat(),
+        new FranceJsonFormat(),
         new ReclamationFormat(),
         new CurveCsvFormat(),
         new DailyCsvFormat(),

@@ -24,6 +24,11 @@ public sealed class FlowFileHead
     public static FlowFileHead Of(FlowFileSource source)
     {
         ArgumentNullException.ThrowIfNull(source);
+        return source.Head;
+    }
+
+    internal static FlowFileHead Find(FlowFileSource source)
+    {
         using var reader = source.OpenText();
         var lines = new List<string>();
         var line = new System.Text.StringBuilder();

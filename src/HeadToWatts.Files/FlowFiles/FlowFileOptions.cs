@@ -1,5 +1,8 @@
 using HeadToWatts.Basis.Units;
+using HeadToWatts.Files.FlowFiles.Recipes;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Quality;
+using HeadToWatts.FlowRecords.SubDaily;
 
 namespace HeadToWatts.Files.FlowFiles;
 
@@ -20,14 +23,30 @@ public enum DateOrder
 /// <param name="Format">Key of the format, to pass over recognition.</param>
 /// <param name="AcceptNegatives">True to keep negative flows, which a flow-duration curve then counts as no flow.</param>
 /// <param name="Beyond">What a flow-duration series does beyond its last row.</param>
+/// <param name="Policies">What is done about gaps, negatives, estimated values and repeats.</param>
+/// <param name="SubDaily">How values within a day become daily means.</param>
+/// <param name="Recipe">How the file is read, in place of a known format.</param>
 public sealed record FlowFileOptions(
     UnitOfMeasure? Unit = null,
     DateOrder? Order = null,
     string? Column = null,
     string? Format = null,
     bool AcceptNegatives = false,
-    BeyondLastRow Beyond = BeyondLastRow.Hold)
+    BeyondLastRow Beyond = BeyondLastRow.Hold,
+    RecordPolicies? Policies = null,
+    SubDailySettings? SubDaily = null,
+    ReadingRecipe? Recipe = null)
 {
     /// <summary>Nothing told.</summary>
     public static FlowFileOptions Default { get; } = new();
+
+    /// <summary>The policies, the usual ones where none are told.</summary>
+    internal RecordPolicies Chosen =>
+        AcceptNegatives ? (Policies ?? RecordPolicies.Default) with { Negatives = NegativePolicy.Kept } : Policies ?? RecordPolicies.Default;
+
+    /// <summary>The time zone whose clock the times are of.</summary>
+    internal TimeZoneInfo? Zone => Recipe?.Clock.Zone;
+
+    /// <summary>Whether the clock is known not to change to daylight-saving time.</summary>
+    internal bool ClockStandsStill => Recipe is { Clock.StandsStill: true };
 }

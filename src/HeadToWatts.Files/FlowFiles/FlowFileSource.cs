@@ -12,11 +12,20 @@ public sealed class FlowFileSource
 
     private const int ChunkBytes = 256 * 1024;
     private readonly List<ArraySegment<byte>> _chunks;
+    private readonly Encoding _encoding;
+    private FlowFileHead? _head;
 
     private FlowFileSource(string name, List<ArraySegment<byte>> chunks)
     {
         Name = name;
         _chunks = chunks;
+        Bytes = chunks.Sum(c => (long)c.Count);
+        Meter = new ReadingMeter(Bytes);
+        var first = FirstBytes;
+        IsWide = first.StartsWith<byte>([0xFF, 0xFE]) || first.StartsWith<byte>([0xFE, 0xFF]);
+        IsWestern = !IsWide && chunks.Count > 0 && !IsUtf8(chunks[0]);
+        _encoding = IsWestern ? Encoding.Latin1 : Encoding.UTF8;
+        EndsInsideRow = chunks.Count > 0 && chunks[^1][chunks[^1].Count - 1] is not ((byte)'\n' or (byte)'\r');
     }
 
     /// <summary>Name of the file, as problems give it.</summary>
@@ -64,11 +73,45 @@ public sealed class FlowFileSource
         }
     }
 
-    /// <summary>Opens the text from its beginning. UTF-8 unless a byte-order mark says otherwise.</summary>
-    public TextReader OpenText() => new StreamReader(new ChunkStream(_chunks), Encoding.UTF8, detectEncodingFromByteOrderMarks: true);
+    /// <summary>How many bytes there are.</summary>
+    public long Bytes { get; }
+
+    /// <summary>Whether the last byte is not a line end, so that the last row may be cut.</summary>
+    public bool EndsInsideRow { get; }
+
+    /// <summary>Whether the text is not UTF-8 and is read as Western European (ISO 8859-1).</summary>
+    public bool IsWestern { get; }
+
+    /// <summary>Opens the text from its beginning: UTF-8, or as a byte-order mark says, or Western European where it is not UTF-8.</summary>
+    public TextReader OpenText() => new StreamReader(new ChunkStream(_chunks, Meter), _encoding, detectEncodingFromByteOrderMarks: true);
+
+    internal ReadingMeter Meter { get; }
+
+    /// <summary>The opening lines, found once.</summary>
+    internal FlowFileHead Head => _head ??= FlowFileHead.Find(this);
+
+    internal bool IsWide { get; }
+
+    /// <summary>The bytes as UTF-8, without decoding; null where the text is written otherwise.</summary>
+    internal Stream? OpenUtf8() => IsWide || IsWestern ? null : new ChunkStream(_chunks, Meter);
+
+    /// <summary>Whether any byte is a given one; fast enough to ask of a whole file.</summary>
+    internal bool Holds(byte wanted) => _chunks.Exists(c => c.AsSpan().Contains(wanted));
 
     /// <summary>The first bytes, for telling text from other files.</summary>
     internal ReadOnlySpan<byte> FirstBytes => _chunks.Count == 0 ? [] : _chunks[0].AsSpan(0, Math.Min(_chunks[0].Count, 4096));
+
+    // A character may be cut at the end of the first piece; it is at most four bytes.
+    private static bool IsUtf8(ReadOnlySpan<byte> bytes)
+    {
+        for (var cut = 0; cut <= Math.Min(3, bytes.Length); cut++)
+        {
+            if (System.Text.Unicode.Utf8.IsValid(bytes[..^cut]))
+                return true;
+        }
+
+        return false;
+    }
 
     private static Checked<FlowFileSource> TooLarge(string name) => Checked.Refused<FlowFileSource>(
         new Problem(name, "a file above 64 MB", "it is too large to be a record of daily flows", "a flow file of up to 64 MB"));

@@ -1,6 +1,7 @@
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Quality;
 using HeadToWatts.Studies.Inputs;
 
 namespace HeadToWatts.Files.StudyFiles;
@@ -130,8 +131,34 @@ internal static class FlowBuilder
             return null;
         }
 
-        var reading = d.Days is not null && string.IsNullOrWhiteSpace(d.File) ? RecordText.Read(d, path) : files.Read(d, path + ".file");
-        return reading.TryGet(read.Problems, out var record) ? record : null;
+        if (!string.IsNullOrWhiteSpace(d.File))
+            return files.Read(d, path + ".file").TryGet(read.Problems, out var fromFile) ? fromFile : null;
+        var count = read.Problems.Count;
+        var policies = PolicyBuilder.Policies(d.Policies, path + ".policies", read.Problems);
+        if (!RecordText.Read(d, path).TryGet(read.Problems, out var record) || read.Problems.Count > count)
+            return null;
+        return policies == RecordPolicies.Default ? record : TextPolicies(record, policies, path, read);
+    }
+
+    // The days of a study carry no marks; only the policy about gaps can touch them.
+    private static DailyRecord? TextPolicies(DailyRecord record, RecordPolicies policies, string path, FieldReader read)
+    {
+        if (!GapPolicies.Apply(record, policies, path + ".policies.gaps").TryGet(read.Problems, out var done))
+            return null;
+        var quality = new RecordQuality
+        {
+            FirstDay = record.FirstDay,
+            LastDay = record.LastDay,
+            Rows = record.DayCount,
+            Days = record.DayCount,
+            MissingDays = record.MissingCount,
+            LongestGapDays = SeriesChecks.LongestGap(record.Flows),
+            ZeroDays = record.ZeroCount,
+            FilledDays = done.FilledDays,
+            Policies = policies,
+            Done = done.Done,
+        };
+        return new DailyRecord(done.Record.FirstDay, done.Record.Flows.ToArray(), record.Description) { Quality = quality };
     }
 
     private static bool RowsAreForSeason(FlowDocument d, string path, OperatingSeason season, bool hasRows, FieldReader read)

@@ -1,6 +1,7 @@
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Files.FlowFiles;
+using HeadToWatts.Files.FlowFiles.Recipes;
 using HeadToWatts.FlowRecords;
 
 namespace HeadToWatts.Files.StudyFiles;
@@ -74,7 +75,13 @@ public sealed class FolderFlowFiles(Func<string, Stream?> open) : IFlowFileSourc
         };
         if (order is null && !string.IsNullOrWhiteSpace(record.DateOrder))
             problems.Add(new Problem(where.Replace(".file", ".dateOrder", StringComparison.Ordinal), record.DateOrder, "this order is not known", "month-day or day-month"));
-        options = new FlowFileOptions(unit, order, string.IsNullOrWhiteSpace(record.Column) ? null : record.Column);
+        var beside = where.Replace(".file", "", StringComparison.Ordinal);
+        var policies = PolicyBuilder.Policies(record.Policies, beside + ".policies", problems);
+        var subDaily = PolicyBuilder.SubDaily(record.Policies, beside + ".policies", problems);
+        ReadingRecipe? recipe = null;
+        if (record.Recipe is not null)
+            RecipeBuilder.Build(record.Recipe, beside + ".recipe").TryGet(problems, out recipe);
+        options = new FlowFileOptions(unit, order, string.IsNullOrWhiteSpace(record.Column) ? null : record.Column, Policies: policies, SubDaily: subDaily, Recipe: recipe);
         return problems.Count == count;
     }
 }

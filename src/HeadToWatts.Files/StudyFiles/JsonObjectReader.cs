@@ -113,6 +113,17 @@ internal sealed class JsonObjectReader
         return [.. value.EnumerateArray().Select(v => v.GetString())];
     }
 
+    /// <summary>A list of texts or pure numbers.</summary>
+    internal List<string>? TextsOrNumbers(string name)
+    {
+        if (!Take(name, out var value))
+            return null;
+        if (value.ValueKind == JsonValueKind.Array && value.EnumerateArray().All(v => v.ValueKind is JsonValueKind.String or JsonValueKind.Number))
+            return [.. value.EnumerateArray().Select(v => v.ValueKind == JsonValueKind.String ? v.GetString()! : v.GetRawText())];
+        _problems.Add(new Problem(At(name), Shorten(value.GetRawText()), "a list of texts in square brackets is wanted here"));
+        return null;
+    }
+
     /// <summary>Refuses every field that was not asked for.</summary>
     internal void Done()
     {

@@ -1,3 +1,5 @@
+using HeadToWatts.Files.FlowFiles.Recipes;
+
 namespace HeadToWatts.Files.StudyFiles;
 
 /// <summary>
@@ -148,6 +150,12 @@ public sealed class RecordDocument
 
     /// <summary>Flows of successive days, apart by spaces, "-" for a day without a flow.</summary>
     public string? Days { get; set; }
+
+    /// <summary>How the file is read, where it is of no known format.</summary>
+    public RecipeDocument? Recipe { get; set; }
+
+    /// <summary>What is done about gaps, negatives, estimated values and repeats.</summary>
+    public PolicyDocument? Policies { get; set; }
 }
 
 /// <summary>The fall: gross head, or the two levels.</summary>

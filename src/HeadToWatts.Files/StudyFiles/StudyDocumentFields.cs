@@ -1,3 +1,5 @@
+using HeadToWatts.Files.FlowFiles.Recipes;
+
 namespace HeadToWatts.Files.StudyFiles;
 
 /// <summary>The fields of a study file by name; docs/study.schema.json says the same to editors.</summary>
@@ -58,6 +60,8 @@ internal static class StudyDocumentFields
         Column = r.Text("column"),
         FirstDay = r.Text("firstDay"),
         Days = r.Text("days"),
+        Recipe = r.Object("recipe", RecipeFile.Fields),
+        Policies = r.Object("policies", PolicyBuilder.Fields),
     };
 
     private static HeadDocument Head(JsonObjectReader r) => new()

@@ -53,7 +53,7 @@ public sealed partial class CurveCsvFormat : IFlowFileFormat
             assumptions.Add("the first column is the percent of time exceeded, since no column is named so");
         }
 
-        if (FlowColumn.Choose(layout, shareColumn, options.Column, problems, out var evidence) is not { } flowColumn)
+        if (FlowColumn.Choose(layout, [shareColumn], options.Column, problems, out var evidence) is not { } flowColumn)
             return problems.Refuse();
         if (evidence.Length > 0)
             assumptions.Add(evidence);
@@ -83,6 +83,8 @@ public sealed partial class CurveCsvFormat : IFlowFileFormat
             }
         }
 
+        if (source.EndsInsideRow && rows.Count > 0)
+            assumptions.Add($"row {rows[^1].FileRow.ToString(CultureInfo.InvariantCulture)}, with which the file ends, is whole, though no line end stands after it: {rows[^1].Share}, {rows[^1].Flow}");
         if (points.Count > 0 || !problems.Any)
         {
             var built = FlowDurationCurve.FromRows(points, options.Beyond, source.Name, origins);
@@ -120,7 +122,7 @@ public sealed partial class CurveCsvFormat : IFlowFileFormat
     private static List<CurveRow> Rows(FlowFileSource source, TableLayout layout, int shareColumn, int flowColumn, ProblemList problems, CancellationToken cancellation)
     {
         var rows = new List<CurveRow>();
-        using var text = new DelimitedText(source.OpenText(), layout.Delimiter, quotes: true);
+        using var text = new DelimitedText(source, layout.Delimiter, quotes: true);
         while (text.Next(out var cells, out var row))
         {
             cancellation.ThrowIfCancellationRequested();

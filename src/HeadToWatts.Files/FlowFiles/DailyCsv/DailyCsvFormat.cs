@@ -1,13 +1,16 @@
+using System.Text.RegularExpressions;
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Files.FlowFiles.Reading;
+using HeadToWatts.FlowRecords.Quality;
 
 namespace HeadToWatts.Files.FlowFiles.DailyCsv;
 
 /// <summary>
-/// A table of dates and daily mean flows, delimited by commas, semicolons or tabs: "date,flow_cfs". Dates are yyyy-mm-dd, or
-/// m/d/yyyy or d/m/yyyy when the file shows which or it is told. Blanks and marks such as -999, NA, Ice are missing; zeros are data.
+/// A table of dates and flows, delimited by commas, semicolons or tabs: "date,flow_cfs". Dates are yyyy-mm-dd, or m/d/yyyy or
+/// d/m/yyyy when the file shows which or it is told; a time of day may stand with the date or in a column of its own, and several
+/// values a day become daily means. Blanks and marks such as -999, NA, Ice are missing; zeros are data.
 /// </summary>
-public sealed class DailyCsvFormat : IFlowFileFormat
+public sealed partial class DailyCsvFormat : IFlowFileFormat
 {
     /// <inheritdoc/>
     public string Id => "daily-csv";
@@ -31,45 +34,86 @@ public sealed class DailyCsvFormat : IFlowFileFormat
         }
 
         var dateColumn = TableLayout.DateColumn(layout.FirstCells);
-        var column = FlowColumn.Choose(layout, dateColumn, options.Column, problems, out var evidence);
+        var timeColumn = TableLayout.TimeColumn(layout.FirstCells, dateColumn);
+        var column = FlowColumn.Choose(layout, [dateColumn, timeColumn], options.Column, problems, out var evidence);
         var unit = column is { } c ? FlowColumn.Unit(layout, c, options.Unit, problems) : null;
         if (column is not { } flowColumn || unit is null)
             return problems.Refuse();
 
-        var rows = new DailyRows(problems);
+        var codeColumn = CodeColumn(layout, flowColumn);
+        var rows = new RecordRows(source, options, problems);
         if (evidence.Length > 0)
             rows.Assume(evidence);
-        var signs = NumberSigns.Point;
-        if (layout.Delimiter != ',' || HasQuotes(source))
-        {
-            signs = WrittenValue.Detect(Rows(source, layout, cancellation).Select(r => flowColumn < r.Cells.Length ? r.Cells[flowColumn] : ""), out var sign);
-            if (sign.Length > 0)
-                rows.Assume(sign);
-        }
+        if (timeColumn >= 0)
+            rows.Assume($"the times of day stand in '{layout.ColumnName(timeColumn)}'");
+        var signs = Signs(source, layout, flowColumn, rows, cancellation);
 
-        foreach (var (row, cells) in Rows(source, layout, cancellation))
-        {
-            if (dateColumn >= cells.Length)
-                problems.Row(row, string.Join(layout.Delimiter, cells), "the row has too few cells", WrittenDate.Accepted + ", and a flow");
-            else if (layout.Delimiter == ',' && cells.Length > Math.Max(layout.ColumnCount, flowColumn + 1) && cells.Skip(layout.ColumnCount).Any(x => x.Length > 0))
-                problems.Row(row, string.Join(',', cells), "the row has more cells than the table has columns; a comma may stand inside a number", "a decimal point, and no comma inside a number");
-            else
-                rows.Add(row, cells[dateColumn], flowColumn < cells.Length ? cells[flowColumn] : "", signs);
-        }
-
-        return rows.Build(this, options, null, unit, layout.ColumnName(flowColumn), "");
-    }
-
-    private static bool HasQuotes(FlowFileSource source) => FlowFileHead.Of(source).Lines.Any(l => l.Contains('"', StringComparison.Ordinal));
-
-    private static IEnumerable<(int Row, string[] Cells)> Rows(FlowFileSource source, TableLayout layout, CancellationToken cancellation)
-    {
-        using var text = new DelimitedText(source.OpenText(), layout.Delimiter, quotes: true);
-        while (text.Next(out var cells, out var row))
+        // Where commas delimit, one more cell than columns may be a comma inside a number.
+        var most = layout.Delimiter == ',' ? Math.Max(layout.ColumnCount, flowColumn + 1) : int.MaxValue;
+        using var text = new DelimitedText(source, layout.Delimiter, quotes: true);
+        while (text.Read())
         {
             cancellation.ThrowIfCancellationRequested();
-            if (row >= layout.FirstRow)
-                yield return (row, cells);
+            if (text.Row < layout.FirstRow)
+                continue;
+            if (dateColumn >= text.Count)
+            {
+                rows.Wrong(text.Row, text.RowText(), "the row has too few cells", WrittenDate.Accepted + ", and a flow");
+                continue;
+            }
+
+            if (text.Count > most && text.HoldsMoreThan(most))
+            {
+                rows.Wrong(text.Row, text.RowText(), "the row has more cells than the table has columns; a comma may stand inside a number", "a decimal point, and no comma inside a number");
+                continue;
+            }
+
+            var date = text.Cell(dateColumn);
+            if (text.Count < layout.ColumnCount && !RecordRows.IsTotal(date))
+                rows.Findings.Add(QualityKind.ShortRow, text.Row, text.RowText(), "read as far as they go; what is not there is missing");
+            var code = text.Cell(codeColumn);
+            if (code.Length is > 0 and < 40)
+                rows.Codes.Add(code);
+            rows.Add(text.Row, date, text.Cell(flowColumn), signs, QualityCodes.Common(code), text.Cell(timeColumn));
+            rows.LastRowIsProven = flowColumn < layout.ColumnCount - 1 && text.Count >= layout.ColumnCount;
+        }
+
+        return rows.Build(new RecordAbout(Id, Name, null, unit, layout.ColumnName(flowColumn), ""));
+    }
+
+    // Only a file that holds a comma can have one in a number, and where commas delimit it must stand in quotes.
+    private static NumberSigns Signs(FlowFileSource source, TableLayout layout, int flowColumn, RecordRows rows, CancellationToken cancellation)
+    {
+        if (layout.Delimiter == ',' ? !FlowFileHead.Of(source).Lines.Any(l => l.Contains('"', StringComparison.Ordinal)) : !source.IsWide && !source.Holds((byte)','))
+            return NumberSigns.Point;
+        var signs = WrittenValue.Detect(Cells(source, layout, flowColumn, cancellation), out var sign);
+        if (sign.Length > 0)
+            rows.Assume(sign);
+        return signs;
+    }
+
+    private static IEnumerable<string> Cells(FlowFileSource source, TableLayout layout, int column, CancellationToken cancellation)
+    {
+        using var text = new DelimitedText(source, layout.Delimiter, quotes: true);
+        while (text.Read())
+        {
+            cancellation.ThrowIfCancellationRequested();
+            if (text.Row >= layout.FirstRow && text.Cell(column).Contains(','))
+                yield return text.Cell(column).ToString();
         }
     }
+
+    private static int CodeColumn(TableLayout layout, int flowColumn)
+    {
+        for (var i = 0; i < layout.ColumnCount; i++)
+        {
+            if (i != flowColumn && CodeName().IsMatch(layout.ColumnName(i)))
+                return i;
+        }
+
+        return -1;
+    }
+
+    [GeneratedRegex(@"^(flag|code|quality|qual|qualifier|grade|sym|symbol|status|qa|qc)s?\b|_(cd|flag|code)$", RegexOptions.IgnoreCase)]
+    private static partial Regex CodeName();
 }

@@ -1,8 +1,9 @@
 namespace HeadToWatts.Files.FlowFiles.Reading;
 
 /// <summary>Reads pieces of memory as one stream, so that a large file is held once and never copied whole.</summary>
-internal sealed class ChunkStream(IReadOnlyList<ArraySegment<byte>> chunks) : Stream
+internal sealed class ChunkStream(IReadOnlyList<ArraySegment<byte>> chunks, ReadingMeter meter) : Stream
 {
+    private long _read;
     private int _chunk;
     private int _offset;
 
@@ -35,6 +36,8 @@ internal sealed class ChunkStream(IReadOnlyList<ArraySegment<byte>> chunks) : St
         var take = Math.Min(buffer.Length, chunks[_chunk].Count - _offset);
         chunks[_chunk].AsSpan(_offset, take).CopyTo(buffer);
         _offset += take;
+        _read += take;
+        meter.Reached(_read);
         return take;
     }
 

@@ -19,15 +19,15 @@ internal static partial class FlowColumn
         return null;
     }
 
-    /// <summary>Chooses among the columns other than one: the one asked for, the only one, or the only one named as a flow.</summary>
-    public static int? Choose(TableLayout layout, int other, string? wanted, ProblemList problems, out string evidence)
+    /// <summary>Chooses among the columns other than those of date and time: the one asked for, the only one, or the only one named as a flow.</summary>
+    public static int? Choose(TableLayout layout, int[] others, string? wanted, ProblemList problems, out string evidence)
     {
         evidence = "";
         var names = Enumerable.Range(0, layout.ColumnCount).Select(layout.ColumnName).ToList();
         if (wanted is not null)
             return Named(names, wanted, problems);
 
-        var columns = Enumerable.Range(0, names.Count).Where(i => i != other).ToList();
+        var columns = Enumerable.Range(0, names.Count).Where(i => Array.IndexOf(others, i) < 0).ToList();
         var flows = columns.Where(i => FlowName().IsMatch(names[i]) || HeaderUnit.Find(layout.NameForUnit(i), out _) is not null).ToList();
         if (flows.Count == 1)
         {
@@ -39,7 +39,10 @@ internal static partial class FlowColumn
         if (columns.Count == 1 && !OtherName().IsMatch(names[columns[0]]))
             return columns[0];
         problems.File(string.Join(", ", columns.Select(i => names[i])),
-            flows.Count > 1 ? "several columns may be the flow" : "no column is named as the flow", "name the column of the flows");
+            flows.Count > 1 ? "several columns may be the flow"
+            : columns.Exists(i => StageName().IsMatch(names[i])) ? "no column is named as the flow; a stage needs a rating to become one"
+            : "no column is named as the flow",
+            "name the column of the flows");
         return null;
     }
 
@@ -82,6 +85,9 @@ internal static partial class FlowColumn
     [GeneratedRegex(@"flow|discharge|^q$|^q[\s_\(\[]|inflow|streamflow", RegexOptions.IgnoreCase)]
     private static partial Regex FlowName();
 
-    [GeneratedRegex(@"level|stage|height|temp|precip|rain|flag|code|quality|sym|elev|depth", RegexOptions.IgnoreCase)]
+    [GeneratedRegex(@"level|stage|height|hgt|depth", RegexOptions.IgnoreCase)]
+    private static partial Regex StageName();
+
+    [GeneratedRegex(@"level|stage|height|hgt|temp|precip|rain|flag|code|quality|sym|elev|depth", RegexOptions.IgnoreCase)]
     private static partial Regex OtherName();
 }

@@ -13,7 +13,10 @@ internal sealed class ProblemList(string file)
     public bool Any => _listed.Count > 0;
 
     public void Row(int row, string read, string why, string accepted = "") =>
-        Add(new Problem($"{file} row {row.ToString(CultureInfo.InvariantCulture)}", Shorten(read), why, accepted));
+        Add(RowProblem(row, read, why, accepted));
+
+    public Problem RowProblem(int row, string read, string why, string accepted) =>
+        new($"{file} row {row.ToString(CultureInfo.InvariantCulture)}", Shorten(read), why, accepted);
 
     public void File(string read, string why, string accepted = "") => Add(new Problem(file, Shorten(read), why, accepted));
 

@@ -29,6 +29,10 @@ internal sealed record TableLayout(char Delimiter, string[] Names, string[] Unit
     /// <summary>The first column that holds a date; -1 when none does.</summary>
     public static int DateColumn(string[] cells) => Array.FindIndex(cells, c => WrittenDate.TryRead(c, out _, out _));
 
+    /// <summary>The first other column that holds a time of day; -1 when none does.</summary>
+    public static int TimeColumn(string[] cells, int dateColumn) =>
+        Array.FindIndex(cells, c => c.Contains(':', StringComparison.Ordinal) && Array.IndexOf(cells, c) != dateColumn && WrittenTime.TryRead(c, compact: false, out _, out _));
+
     public static bool BeginsWithNumber(string cell)
     {
         var text = cell.TrimStart('+', '-');

@@ -7,16 +7,17 @@ internal sealed class Tally
     private readonly Dictionary<string, int> _counts = new(StringComparer.Ordinal);
     private readonly List<string> _order = [];
 
-    public void Add(string mark)
+    public void Add(ReadOnlySpan<char> mark)
     {
-        if (_counts.TryGetValue(mark, out var count))
+        var counts = _counts.GetAlternateLookup<ReadOnlySpan<char>>();
+        if (counts.TryGetValue(mark, out var count))
         {
-            _counts[mark] = count + 1;
+            counts[mark] = count + 1;
         }
         else if (_order.Count < MostKinds)
         {
-            _counts[mark] = 1;
-            _order.Add(mark);
+            counts[mark] = 1;
+            _order.Add(mark.ToString());
         }
     }
 

@@ -26,7 +26,10 @@ internal enum NumberSigns
 /// <summary>Reads value cells. Marks of agencies and loggers for "no value" are missing, never numbers.</summary>
 internal static class WrittenValue
 {
-    private const string Blank = "(blank)";
+    public const string Blank = "(blank)";
+
+    /// <summary>The word for a dry bed, which is no flow and not a missing value.</summary>
+    public const string Dry = "Dry";
 
     private static readonly HashSet<string> Words = new(StringComparer.OrdinalIgnoreCase)
     {
@@ -42,7 +45,7 @@ internal static class WrittenValue
     /// <param name="signs">How numbers are written.</param>
     /// <param name="value">The value; NaN when missing or wrong.</param>
     /// <param name="note">The mark when missing, the reason when wrong, "Dry" for that word, otherwise empty.</param>
-    public static CellKind Read(string cell, NumberSigns signs, out double value, out string note)
+    public static CellKind Read(ReadOnlySpan<char> cell, NumberSigns signs, out double value, out string note)
     {
         value = double.NaN;
         note = Blank;
@@ -50,17 +53,11 @@ internal static class WrittenValue
             return CellKind.Missing;
         note = "";
 
-        var text = cell;
-        if (signs == NumberSigns.PointAndThousands)
-            text = text.Replace(",", "", StringComparison.Ordinal);
-        else if (signs == NumberSigns.Comma)
-            text = text.Replace(".", "", StringComparison.Ordinal).Replace(',', '.');
-        if (double.TryParse(text, NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out var number)
-            && double.IsFinite(number))
+        if (TryNumber(cell, signs, out var number))
         {
-            if (Numbers.Contains(number))
+            if ((number < -998 || number == 998877) && Numbers.Contains(number))
             {
-                note = cell;
+                note = cell.ToString();
                 return CellKind.Missing;
             }
 
@@ -68,24 +65,47 @@ internal static class WrittenValue
             return CellKind.Value;
         }
 
-        if (Words.Contains(cell))
+        var word = cell.ToString();
+        if (Words.Contains(word))
         {
-            note = cell;
+            note = word;
             return CellKind.Missing;
         }
 
-        if (cell.Equals("dry", StringComparison.OrdinalIgnoreCase))
+        if (word.Equals(Dry, StringComparison.OrdinalIgnoreCase))
         {
-            note = "Dry";
+            note = Dry;
             value = 0;
             return CellKind.Value;
         }
 
-        note = cell[0] is '<' or '>'
-            ? "this is a limit, not a value"
-            : text.Contains(',', StringComparison.Ordinal) ? "the comma may be a decimal sign or a thousands sign" : "this is neither a number nor a known mark for a missing value";
+        note = WhyNot(word, signs);
         return CellKind.Wrong;
     }
+
+    /// <summary>Reads a number as it is written in a column.</summary>
+    public static bool TryNumber(ReadOnlySpan<char> cell, NumberSigns signs, out double value)
+    {
+        if (signs != NumberSigns.Point && cell.IndexOfAny('.', ',') >= 0)
+        {
+            var text = signs == NumberSigns.PointAndThousands
+                ? cell.ToString().Replace(",", "", StringComparison.Ordinal)
+                : cell.ToString().Replace(".", "", StringComparison.Ordinal).Replace(',', '.');
+            return TryPlain(text, out value);
+        }
+
+        return TryPlain(cell, out value);
+    }
+
+    /// <summary>Why a cell is neither a number nor a mark.</summary>
+    public static string WhyNot(string cell, NumberSigns signs) =>
+        cell[0] is '<' or '>'
+            ? "this is a limit, not a value"
+            : signs == NumberSigns.Point && cell.Contains(',', StringComparison.Ordinal) ? "the comma may be a decimal sign or a thousands sign" : "this is neither a number nor a known mark for a missing value";
+
+    private static bool TryPlain(ReadOnlySpan<char> text, out double value) =>
+        double.TryParse(text, NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out value)
+        && double.IsFinite(value);
 
     /// <summary>Settles how numbers are written from cells that hold a comma.</summary>
     public static NumberSigns Detect(IEnumerable<string> cells, out string evidence)

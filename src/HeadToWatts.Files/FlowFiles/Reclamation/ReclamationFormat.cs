@@ -2,6 +2,7 @@ using System.Text.RegularExpressions;
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Files.FlowFiles.Reading;
+using HeadToWatts.FlowRecords.Quality;
 
 namespace HeadToWatts.Files.FlowFiles.Reclamation;
 
@@ -31,9 +32,9 @@ public sealed partial class ReclamationFormat : IFlowFileFormat
         ArgumentNullException.ThrowIfNull(source);
         ArgumentNullException.ThrowIfNull(options);
         var problems = new ProblemList(source.Name);
-        var rows = new DailyRows(problems);
+        var rows = new RecordRows(source, options, problems);
         var delimiter = Delimiter(FlowFileHead.Of(source).Content().Select(l => l.Text).FirstOrDefault() ?? "");
-        using var text = new DelimitedText(source.OpenText(), delimiter, quotes: true);
+        using var text = new DelimitedText(source, delimiter, quotes: true);
         if (!text.Next(out var names, out var headerRow) || !IsHeader(names))
         {
             problems.Row(Math.Max(1, headerRow), string.Join(delimiter, names), "the header is not one of this format", "DateTime and columns such as mili_qd");
@@ -47,16 +48,22 @@ public sealed partial class ReclamationFormat : IFlowFileFormat
         if (options.Unit is null)
             rows.Assume("the flows are cfs, as is usual for these codes; the file names no unit");
 
-        while (text.Next(out var cells, out var row))
+        while (text.Read())
         {
             cancellation.ThrowIfCancellationRequested();
-            if (cells.Length > names.Length && cells.Skip(names.Length).Any(c => c.Length > 0))
-                problems.Row(row, string.Join(delimiter, cells), "the row has more cells than the header", "one cell for each column");
-            else
-                rows.Add(row, cells[0], column < cells.Length ? cells[column] : "");
+            if (text.HoldsMoreThan(names.Length))
+            {
+                rows.Wrong(text.Row, text.RowText(), "the row has more cells than the header", "one cell for each column");
+                continue;
+            }
+
+            if (text.Count < names.Length)
+                rows.Findings.Add(QualityKind.ShortRow, text.Row, text.RowText(), "read as far as they go; what is not there is missing");
+            rows.Add(text.Row, text.Cell(0), text.Cell(column));
+            rows.LastRowIsProven = column < names.Length - 1 && text.Count == names.Length;
         }
 
-        return rows.Build(this, options, DateOrder.MonthFirst, unit, names[column], "Reclamation " + names[column]);
+        return rows.Build(new RecordAbout(Id, Name, DateOrder.MonthFirst, unit, names[column], "Reclamation " + names[column]));
     }
 
     private static int? Column(string[] names, string? wanted, ProblemList problems)

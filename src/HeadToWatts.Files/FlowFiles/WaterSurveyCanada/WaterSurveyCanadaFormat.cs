@@ -29,46 +29,55 @@ public sealed class WaterSurveyCanadaFormat : IFlowFileFormat
         ArgumentNullException.ThrowIfNull(source);
         ArgumentNullException.ThrowIfNull(options);
         var problems = new ProblemList(source.Name);
-        var rows = new DailyRows(problems);
+        var rows = new RecordRows(source, options, problems);
         var stations = new List<string>();
         var begun = false;
+        var columns = 5;
         var others = 0;
-        using var text = new DelimitedText(source.OpenText(), ',', quotes: true);
-        while (text.Next(out var cells, out var row))
+        using var text = new DelimitedText(source, ',', quotes: true);
+        while (text.Read())
         {
             cancellation.ThrowIfCancellationRequested();
-            if (IsHeader(cells))
+            if (text.Cell(0).Equals("ID", StringComparison.OrdinalIgnoreCase) && IsHeader(text.Cells()))
             {
                 begun = true;
+                columns = text.Count;
                 continue;
             }
 
             if (!begun)
                 continue;
-            if (cells.Length < 4)
+            if (text.Count < 4 || text.Count < columns)
             {
-                problems.Row(row, string.Join(',', cells), "the row has too few cells", "ID,PARAM,Date,Value,SYM");
+                rows.Wrong(text.Row, text.RowText(), "the row has too few cells, so that its value may be cut short", "ID,PARAM,Date,Value,SYM");
                 continue;
             }
 
-            if (options.Column is { } wanted && !string.Equals(cells[0], wanted, StringComparison.OrdinalIgnoreCase))
+            var station = text.Cell(0);
+            if (options.Column is { } wanted && !station.Equals(wanted, StringComparison.OrdinalIgnoreCase))
                 continue;
-            if (cells[1] != "1")
+            if (text.Cell(1) is not "1")
             {
-                if (cells[1] == "2")
+                if (text.Cell(1) is "2")
                     others++;
                 else
-                    problems.Row(row, cells[1], "this is neither flow (1) nor level (2)", "PARAM 1");
+                    rows.Wrong(text.Row, text.Cell(1).ToString(), "this is neither flow (1) nor level (2)", "PARAM 1");
                 continue;
             }
 
-            if (!stations.Contains(cells[0]) && stations.Count < 20)
-                stations.Add(cells[0]);
+            if (stations.Count == 0 || !station.SequenceEqual(stations[^1]))
+            {
+                if (!stations.Contains(station.ToString()) && stations.Count < 20)
+                    stations.Add(station.ToString());
+            }
+
             if (stations.Count > 1)
                 continue;
-            rows.Add(row, cells[2], cells[3]);
-            if (cells.Length > 4 && cells[4].Length > 0)
-                rows.Codes.Add(cells[4]);
+            var code = text.Cell(4);
+            if (code.Length > 0)
+                rows.Codes.Add(code);
+            rows.Add(text.Row, text.Cell(2), text.Cell(3), marks: QualityCodes.Canada(code));
+            rows.LastRowIsProven = columns > 4;
         }
 
         if (stations.Count > 1)
@@ -80,7 +89,7 @@ public sealed class WaterSurveyCanadaFormat : IFlowFileFormat
         if (FlowColumn.Agreed(UnitTable.CubicMetrePerSecond, options.Unit, "PARAM 1", problems) is not { } unit)
             return problems.Refuse();
         rows.Assume("the flows are cubic metres per second, as PARAM 1 is defined");
-        return rows.Build(this, options, null, unit, "PARAM 1", "Water Survey of Canada " + stations[0]);
+        return rows.Build(new RecordAbout(Id, Name, null, unit, "PARAM 1", "Water Survey of Canada " + stations[0]));
     }
 
     private static bool IsHeader(string[] cells) => cells.Length >= 4
