@@ -1,7 +1,9 @@
 using System.CommandLine;
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Units;
+using HeadToWatts.Files;
 using HeadToWatts.Files.FlowFiles;
+using HeadToWatts.Files.FlowFiles.DailyCsv;
 using HeadToWatts.Files.FlowFiles.Recipes;
 using HeadToWatts.Files.StudyFiles;
 using HeadToWatts.FlowRecords;
@@ -28,7 +30,8 @@ internal static class RecordCommand
         var repeats = new Option<string?>("--repeats") { Description = "refused, first or last: two different flows for one day or time.", HelpName = "CHOICE" };
         var share = new Option<string?>("--day-share") { Description = "Share of a day over which the flow must be known.", HelpName = "PERCENT" };
         var step = new Option<string?>("--longest-step") { Description = "Longest time between two values that is bridged.", HelpName = "TIME" };
-        var command = new Command("record", "Say what is in a flow file.") { file, unit, order, column, recipe, propose, gaps, years, negatives, estimated, repeats, share, step };
+        var write = new Option<string?>("--write") { Description = "Write the daily record, after all choices, as a table of dates and flows.", HelpName = "FILE.csv" };
+        var command = new Command("record", "Say what is in a flow file.") { file, unit, order, column, recipe, propose, gaps, years, negatives, estimated, repeats, share, step, write };
         command.SetAction((parsed, cancellation) =>
         {
             var path = parsed.GetValue(file)!;
@@ -52,11 +55,11 @@ internal static class RecordCommand
                 },
             };
             if (parsed.GetValue(recipe) is not { } recipePath)
-                return Task.FromResult(Run(terminal, path, about, cancellation));
+                return Task.FromResult(Run(terminal, path, about, parsed.GetValue(write), cancellation));
             if (Recipe(terminal, recipePath) is not { } document)
                 return Task.FromResult(CommandLine.Refused);
             about.Recipe = document;
-            return Task.FromResult(Run(terminal, path, about, cancellation));
+            return Task.FromResult(Run(terminal, path, about, parsed.GetValue(write), cancellation));
         });
         return command;
     }
@@ -99,7 +102,7 @@ internal static class RecordCommand
 
     private static string Name(string path) => path == "-" ? "(standard input)" : Path.GetFileName(path);
 
-    private static int Run(Terminal terminal, string path, RecordDocument about, CancellationToken cancellation)
+    private static int Run(Terminal terminal, string path, RecordDocument about, string? writePath, CancellationToken cancellation)
     {
         var problems = new List<Problem>();
         if (!FolderFlowFiles.TryOptions(about, "option", problems, out var options))
@@ -130,6 +133,8 @@ internal static class RecordCommand
                 terminal.Output.WriteLine($"  {UnitDisplay.Number(p * 100, 2),4} %  {UnitDisplay.In(curve.FlowAt(p), flow.Report.Unit),10} {flow.Report.Unit.Symbol}");
         }
 
-        return CommandLine.Done;
+        if (writePath is null || flow.Record is null)
+            return CommandLine.Done;
+        return terminal.Write(writePath, p => WholeFile.Write(p, DailyCsvWriter.Write(flow.Record, flow.Report.Unit))) ? CommandLine.Done : CommandLine.Refused;
     }
 }

@@ -112,6 +112,38 @@ public sealed class CommandLineTests : IDisposable
         Assert.Contains("x.csv", error, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void Record_tells_the_quality_and_obeys_the_choices()
+    {
+        File.WriteAllText(In("q.csv"), "date,flow_m3/s\n2020-01-01,5\n2020-01-02,-1\n2020-01-03,7\nTotal,11\n");
+        Assert.Equal(CommandLine.Refused, Run("record", In("q.csv")).Code);
+        var (code, output, _) = Run("record", In("q.csv"), "--negatives", "kept out", "--gaps", "interpolated up to 2 days", "--write", In("out.csv"));
+        Assert.Equal(CommandLine.Done, code);
+        Assert.Contains("Found: Rows of totals or means: 1 (row 5: Total, 11); left out", output, StringComparison.Ordinal);
+        Assert.Contains("Policy: Gaps of up to 2 days are filled by a straight line", output, StringComparison.Ordinal);
+        Assert.Equal("date,flow (m3/s)\n2020-01-01,5\n2020-01-02,6\n2020-01-03,7\n", File.ReadAllText(In("out.csv")));
+        var (wrong, _, error) = Run("record", In("q.csv"), "--negatives", "eaten");
+        Assert.Equal(CommandLine.Refused, wrong);
+        Assert.Contains("zeroed", error, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Record_proposes_a_recipe_and_reads_by_it()
+    {
+        File.WriteAllText(In("r.txt"), "Canal;;\nFecha;Caudal;Nota\n12/04/2020;1,5;A\n13/04/2020;2,25;A\n");
+        var (asked, proposal, why) = Run("record", In("r.txt"), "--propose");
+        Assert.Equal(CommandLine.Refused, asked);
+        Assert.Contains("'13/04/2020' occurs in row 4, so the day comes first", why, StringComparison.Ordinal);
+        Assert.Contains("unit: question:", why, StringComparison.Ordinal);
+        File.WriteAllText(In("recipe.json"), proposal.Replace("\"valueColumn\"", "\"unit\": \"m3/s\", \"valueColumn\"", StringComparison.Ordinal));
+        var (code, output, error) = Run("record", In("r.txt"), "--recipe", In("recipe.json"));
+        Assert.Equal("", error);
+        Assert.Equal(CommandLine.Done, code);
+        Assert.Contains("Period: 2020-04-12 to 2020-04-13", output, StringComparison.Ordinal);
+        File.WriteAllText(In("recipe.json"), "{ \"seperator\": \"comma\" }");
+        Assert.Equal(CommandLine.Refused, Run("record", In("r.txt"), "--recipe", In("recipe.json")).Code);
+    }
+
     private static string Site(string name)
     {
         for (var at = new DirectoryInfo(AppContext.BaseDirectory); at is not null; at = at.Parent)

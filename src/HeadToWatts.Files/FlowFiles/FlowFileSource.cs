@@ -39,16 +39,19 @@ public sealed class FlowFileSource
             return TooLarge(name);
         var chunks = new List<ArraySegment<byte>>();
         long total = 0;
+
+        // A small file takes no more than it needs; one byte of room shows its end.
+        var size = stream.CanSeek ? (int)Math.Min(ChunkBytes, stream.Length - stream.Position + 1) : ChunkBytes;
         while (true)
         {
-            var chunk = new byte[ChunkBytes];
-            var read = stream.ReadAtLeast(chunk, ChunkBytes, throwOnEndOfStream: false);
+            var chunk = new byte[size];
+            var read = stream.ReadAtLeast(chunk, size, throwOnEndOfStream: false);
             total += read;
             if (total > LargestBytes)
                 return TooLarge(name);
             if (read > 0)
                 chunks.Add(new ArraySegment<byte>(chunk, 0, read));
-            if (read < ChunkBytes)
+            if (read < size)
                 return Checked.Of(new FlowFileSource(name, chunks));
         }
     }

@@ -29,6 +29,9 @@ public enum QualityKind
     /// <summary>A row with fewer cells than the table has columns.</summary>
     ShortRow,
 
+    /// <summary>A row with more cells than the table has columns.</summary>
+    LongRow,
+
     /// <summary>A last row that is cut off.</summary>
     CutRow,
 
@@ -68,6 +71,7 @@ public sealed record QualityFinding(QualityKind Kind, int Count, IReadOnlyList<Q
         QualityKind.FlatRun => "Long runs of one and the same flow",
         QualityKind.TotalsRow => "Rows of totals or means",
         QualityKind.ShortRow => "Rows with fewer cells than the table",
+        QualityKind.LongRow => "Rows with more cells than the table",
         QualityKind.CutRow => "Last row cut off",
         QualityKind.OpenEnd => "File that ends inside its last row",
         QualityKind.OtherExtent => "Extent in the heading that the rows do not meet",

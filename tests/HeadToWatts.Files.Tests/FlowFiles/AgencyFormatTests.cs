@@ -30,7 +30,7 @@ public sealed class AgencyFormatTests
     }
 
     [Theory]
-    [InlineData("agency_cd\tsite_no\tdatetime\ttz_cd\t1_00060\t1_00060_cd\n", "instantaneous")]
+    [InlineData("agency_cd\tsite_no\tdatetime\t1_00060\t1_00060_cd\n", "without their time-zone codes")]
     [InlineData("agency_cd\tsite_no\tdatetime\t1_00065_00003\t1_00065_00003_cd\n", "stage")]
     [InlineData("agency_cd\tsite_no\tdatetime\t1_00060_00003\t1_cd\t2_00060_00003\n", "several columns")]
     [InlineData("agency_cd\tsite_no\twhen\t1_00060_00003\n", "lacks")]

@@ -48,8 +48,8 @@ public sealed partial class DailyCsvFormat : IFlowFileFormat
             rows.Assume($"the times of day stand in '{layout.ColumnName(timeColumn)}'");
         var signs = Signs(source, layout, flowColumn, rows, cancellation);
 
-        // Where commas delimit, one more cell than columns may be a comma inside a number.
-        var most = layout.Delimiter == ',' ? Math.Max(layout.ColumnCount, flowColumn + 1) : int.MaxValue;
+        // One more cell than columns may be a comma inside a number, or a row that lost its end and the next one's beginning.
+        var most = Math.Max(layout.ColumnCount, flowColumn + 1);
         using var text = new DelimitedText(source, layout.Delimiter, quotes: true);
         while (text.Read())
         {
@@ -64,7 +64,8 @@ public sealed partial class DailyCsvFormat : IFlowFileFormat
 
             if (text.Count > most && text.HoldsMoreThan(most))
             {
-                rows.Wrong(text.Row, text.RowText(), "the row has more cells than the table has columns; a comma may stand inside a number", "a decimal point, and no comma inside a number");
+                rows.Wrong(text.Row, text.RowText(), layout.Delimiter == ',' ? "the row has more cells than the table has columns; a comma may stand inside a number" : "the row has more cells than the table has columns",
+                    layout.Delimiter == ',' ? "a decimal point, and no comma inside a number" : "a cell for each column");
                 continue;
             }
 

@@ -23,7 +23,7 @@ public sealed class FranceJsonFormat : IFlowFileFormat
     public bool Recognises(FlowFileHead head)
     {
         ArgumentNullException.ThrowIfNull(head);
-        return head.Content().FirstOrDefault().Text is { } first && first.TrimStart()[0] is '{' or '['
+        return head.Content().FirstOrDefault().Text is { } first && first.TrimStart() is ['{' or '[', ..]
             && head.Lines.Any(l => l.Contains("\"resultat_obs", StringComparison.Ordinal));
     }
 

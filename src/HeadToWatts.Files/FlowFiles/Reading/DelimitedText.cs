@@ -16,6 +16,7 @@ internal sealed class DelimitedText : IDisposable
 
     // A row of flows is short; an endless one is not read into memory.
     private const int LongestRow = 256 * 1024;
+    private const int BufferBytes = 64 * 1024;
 
     private readonly TextReader? _reader;
     private readonly CsvReader? _parser;
@@ -32,7 +33,7 @@ internal sealed class DelimitedText : IDisposable
         _reader = reader;
         _delimiter = delimiter;
         if (delimiter != Blanks)
-            _parser = CsvReader.Create(reader, Options(delimiter, quotes));
+            _parser = CsvReader.Create(reader, Options(delimiter, quotes, BufferBytes));
     }
 
     public DelimitedText(FlowFileSource source, char delimiter, bool quotes)
@@ -40,13 +41,13 @@ internal sealed class DelimitedText : IDisposable
         _delimiter = delimiter;
         if (delimiter != Blanks && source.OpenUtf8() is { } bytes)
         {
-            _parser = CsvReader.Create(bytes, Options(delimiter, quotes));
+            _parser = CsvReader.Create(bytes, Options(delimiter, quotes, (int)Math.Clamp(source.Bytes, 1024, BufferBytes)));
             return;
         }
 
         _reader = source.OpenText();
         if (delimiter != Blanks)
-            _parser = CsvReader.Create(_reader, Options(delimiter, quotes));
+            _parser = CsvReader.Create(_reader, Options(delimiter, quotes, BufferBytes));
     }
 
     /// <summary>Columns of fixed widths.</summary>
@@ -73,6 +74,8 @@ internal sealed class DelimitedText : IDisposable
     /// <summary>Splits one line.</summary>
     public static string[] Split(string line, char delimiter)
     {
+        if (delimiter != Blanks && !line.Contains('"', StringComparison.Ordinal))
+            return line.Trim('\uFEFF').Split(delimiter, StringSplitOptions.TrimEntries);
         using var text = new DelimitedText(new StringReader(line), delimiter, quotes: true);
         return text.Next(out var cells, out _) ? cells : [];
     }
@@ -205,8 +208,9 @@ internal sealed class DelimitedText : IDisposable
         _reader?.Dispose();
     }
 
-    private static CsvReaderOptions Options(char delimiter, bool quotes) => new()
+    private static CsvReaderOptions Options(char delimiter, bool quotes, int bufferBytes) => new()
     {
+        BufferSize = bufferBytes,
         Separator = delimiter,
         Mode = quotes ? CsvMode.Rfc4180 : CsvMode.NoEscape,
         HasHeader = false,

@@ -98,7 +98,7 @@ internal sealed class RecordFinish(RecordRows rows, RecordAbout about)
             rows.Findings.Add(QualityKind.FlatRun, FileRows[run.First], $"{Iso(read.DateOf(run.First))} to {Iso(read.DateOf(run.First + run.Length - 1))}, {Number(run.Length)} days of {Value(read.Flows[run.First])}", "kept; see whether the gauge stood still");
     }
 
-    private string Value(double flowM3PerS) => Basis.Units.UnitDisplay.In(flowM3PerS, about.Unit, 4) + " " + about.Unit.Symbol;
+    private string Value(double flowM3PerS) => about.Unit.FromHeld(flowM3PerS).ToString("0.####", CultureInfo.InvariantCulture) + " " + about.Unit.Symbol;
 
     private static string Iso(DateOnly day) => day.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture);
 

@@ -15,4 +15,5 @@ internal readonly record struct PlacedRow(long At, int FileRow, double Value, Da
 /// <param name="Unit">Unit of the values.</param>
 /// <param name="Column">Column of the values.</param>
 /// <param name="Description">Station or title.</param>
-internal sealed record RecordAbout(string FormatId, string FormatName, DateOrder? UsualOrder, Basis.Units.UnitOfMeasure Unit, string Column, string Description);
+/// <param name="WithinDays">True when the values are known to be instants, however few.</param>
+internal sealed record RecordAbout(string FormatId, string FormatName, DateOrder? UsualOrder, Basis.Units.UnitOfMeasure Unit, string Column, string Description, bool WithinDays = false);

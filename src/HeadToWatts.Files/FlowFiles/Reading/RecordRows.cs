@@ -145,7 +145,7 @@ internal sealed partial class RecordRows(FlowFileSource source, FlowFileOptions 
         var placed = Place(order, out var hasTimes);
         if (placed is null)
             return problems.Refuse();
-        return hasTimes && SeveralADay(placed)
+        return about.WithinDays || (hasTimes && SeveralADay(placed))
             ? new SubDailyBuild(this, about).Build(placed)
             : new DailyBuild(this, about).Build(placed);
     }

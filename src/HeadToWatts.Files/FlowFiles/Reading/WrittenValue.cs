@@ -86,15 +86,32 @@ internal static class WrittenValue
     /// <summary>Reads a number as it is written in a column.</summary>
     public static bool TryNumber(ReadOnlySpan<char> cell, NumberSigns signs, out double value)
     {
-        if (signs != NumberSigns.Point && cell.IndexOfAny('.', ',') >= 0)
+        if (signs == NumberSigns.Point || cell.IndexOfAny('.', ',') < 0)
+            return TryPlain(cell, out value);
+        var (point, thousands) = signs == NumberSigns.PointAndThousands ? ('.', ',') : (',', '.');
+        value = double.NaN;
+        return ThousandsFit(cell, point, thousands)
+            && TryPlain(cell.ToString().Replace(thousands.ToString(), "", StringComparison.Ordinal).Replace(point, '.'), out value);
+    }
+
+    /// <summary>Whether signs between thousands stand where they can: before the decimal sign, with three digits after each.</summary>
+    public static bool ThousandsFit(ReadOnlySpan<char> cell, char point, char thousands)
+    {
+        var at = cell.IndexOf(point);
+        var whole = (at >= 0 ? cell[..at] : cell).TrimStart("+-");
+        if (at >= 0 && cell[at..].Contains(thousands))
+            return false;
+        var first = true;
+        foreach (var range in whole.Split(thousands))
         {
-            var text = signs == NumberSigns.PointAndThousands
-                ? cell.ToString().Replace(",", "", StringComparison.Ordinal)
-                : cell.ToString().Replace(".", "", StringComparison.Ordinal).Replace(',', '.');
-            return TryPlain(text, out value);
+            var length = whole[range].Length;
+            var alone = first && length == whole.Length;
+            if (!alone && (first ? length is < 1 or > 3 : length != 3))
+                return false;
+            first = false;
         }
 
-        return TryPlain(cell, out value);
+        return true;
     }
 
     /// <summary>Why a cell is neither a number nor a mark.</summary>

@@ -72,18 +72,10 @@ internal sealed class RecipeCells(ReadingRecipe recipe)
         if (recipe.DecimalSign == ',' && recipe.ThousandsSign != '.' && cell.Contains('.'))
             return cell.Contains(',') ? "(a point and a comma)" : cell.ToString().Replace('.', '?');
         var text = cell.ToString();
-        if (recipe.ThousandsSign is { } sign && ThousandsFit(text, sign))
-            text = text.Replace(sign.ToString(), "", StringComparison.Ordinal).Replace(sign == ' ' ? "\u00A0" : sign.ToString(), "", StringComparison.Ordinal);
+        if (recipe.ThousandsSign == ' ')
+            text = text.Replace('\u00A0', ' ').Replace('\u202F', ' ');
+        if (recipe.ThousandsSign is { } sign && WrittenValue.ThousandsFit(text, recipe.DecimalSign, sign))
+            text = text.Replace(sign.ToString(), "", StringComparison.Ordinal);
         return recipe.DecimalSign == ',' ? text.Replace(',', '.') : text;
-    }
-
-    private bool ThousandsFit(string text, char sign)
-    {
-        var at = text.IndexOf(recipe.DecimalSign, StringComparison.Ordinal);
-        var whole = at >= 0 ? text[..at] : text;
-        if (at >= 0 && text[at..].Contains(sign, StringComparison.Ordinal))
-            return false;
-        var groups = whole.TrimStart('-', '+').Replace('\u00A0', ' ').Split(sign);
-        return groups.Length == 1 || (groups[0].Length is >= 1 and <= 3 && groups.Skip(1).All(g => g.Length == 3));
     }
 }

@@ -46,7 +46,7 @@ public static class RecipeReader
             if (columns.Only >= 0 && !text.Cell(columns.Only).Equals(recipe.OnlyText, StringComparison.OrdinalIgnoreCase))
                 continue;
             chosen++;
-            Take(text, columns, cells, rows);
+            Take(text, table, columns, cells, rows);
         }
 
         if (columns is null || chosen == 0)
@@ -65,7 +65,7 @@ public static class RecipeReader
     internal static DelimitedText Open(FlowFileSource source, ReadingRecipe recipe) =>
         recipe.Widths.Count > 0 ? new DelimitedText(source, recipe.Widths) : new DelimitedText(source, recipe.Separator, quotes: true);
 
-    private static void Take(DelimitedText text, RecipeColumns columns, RecipeCells cells, RecordRows rows)
+    private static void Take(DelimitedText text, RecipeTable table, RecipeColumns columns, RecipeCells cells, RecordRows rows)
     {
         if (text.Count < columns.Needed)
         {
@@ -75,6 +75,17 @@ public static class RecipeReader
             else
                 rows.Wrong(text.Row, text.RowText(), "the row has too few cells", $"{RecipeWords.Number(columns.Needed)} cells or more");
             return;
+        }
+
+        if (table.IsTooLong(text))
+        {
+            if (table.Names.Count > 0)
+            {
+                rows.Wrong(text.Row, text.RowText(), "the row has more cells than the header", "a cell for each name");
+                return;
+            }
+
+            rows.Findings.Add(QualityKind.LongRow, text.Row, text.RowText(), "read by the columns that the recipe names");
         }
 
         if (!cells.Stamp(text, columns, out var date, out var why))

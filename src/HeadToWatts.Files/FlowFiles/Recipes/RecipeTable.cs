@@ -22,10 +22,19 @@ public enum RecipeRowRole
 internal sealed class RecipeTable(ReadingRecipe recipe)
 {
     private int _above;
+    private int _cells = -1;
 
     public IReadOnlyList<string> Names { get; private set; } = [];
 
     public IReadOnlyList<string> Units { get; private set; } = [];
+
+    /// <summary>Whether a row of data has more cells than the names, or than the first row of data where there are none.</summary>
+    public bool IsTooLong(DelimitedText text)
+    {
+        if (_cells < 0)
+            _cells = recipe.Widths.Count > 0 ? recipe.Widths.Count : Names.Count > 0 ? Names.Count : text.Count;
+        return text.Count > _cells && text.HoldsMoreThan(_cells);
+    }
 
     public bool IsData(DelimitedText text) => Next(text) == RecipeRowRole.Data;
 

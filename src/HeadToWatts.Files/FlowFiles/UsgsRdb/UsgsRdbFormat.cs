@@ -84,7 +84,7 @@ public sealed partial class UsgsRdbFormat : IFlowFileFormat
         if (FlowColumn.Agreed(UnitTable.CubicFootPerSecond, options.Unit, column, problems) is not { } unit)
             return problems.Refuse();
         rows.Assume("the flows are cubic feet per second, as parameter 00060 is defined");
-        return rows.Build(new RecordAbout(Id, Name, DateOrder.MonthFirst, unit, column, Description(source, site)));
+        return rows.Build(new RecordAbout(Id, Name, DateOrder.MonthFirst, unit, column, Description(source, site), header is { Zone: >= 0 }));
     }
 
     private static void Take(DelimitedText text, Header header, RecordRows rows)
