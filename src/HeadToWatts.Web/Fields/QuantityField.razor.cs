@@ -137,6 +137,8 @@ public partial class QuantityField : ComponentBase
 
     private static string Says(Problem problem)
     {
+        if (string.IsNullOrWhiteSpace(problem.Read))
+            return "Nothing is entered yet.";
         var why = problem.Why.Length == 0 ? "this is refused" : char.ToUpperInvariant(problem.Why[0]) + problem.Why[1..];
         return problem.Accepted.Length == 0 ? why + "." : $"{why}. Accepted: {problem.Accepted}.";
     }

@@ -13,7 +13,7 @@ public sealed partial class FlowStage
 {
     private const long LargestFlowFileBytes = 64L * 1024 * 1024;
     private static readonly Choice[] Positions = [.. PlottingPositions.All.Select(p => new Choice(p.Id, p.Name))];
-    private static readonly Choice[] Beyond = [new("hold", "the last flow holds"), new("dry", "no flow")];
+    private static readonly Choice[] Beyond = [new("hold", "last flow holds"), new("dry", "no flow")];
     private static readonly Choice[] RowsFor = [new("", "the year"), new("year", "the whole year"), new("season", "the season only")];
     private static readonly Choice[] ReservedAs = [new("", "not stated"), new("none", "none"), new("flow", "a flow"), new("percent", "% of the flow"), new("month", "by month")];
     private static readonly Choice[] FileUnits = [new("", "as the file says"), .. UnitTable.Of(Dimension.Flow).Select(u => new Choice(u.Symbol, u.Symbol))];
