@@ -1,10 +1,12 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Economics;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics;
 using HeadToWatts.Hydraulics.Surge;
 using HeadToWatts.Hydraulics.Water;
 using HeadToWatts.Hydraulics.Waterways;
+using HeadToWatts.Pumping;
 using HeadToWatts.Studies.Inputs;
 using HeadToWatts.Turbines;
 
@@ -20,6 +22,8 @@ public static class StudyMethods
         .. HydraulicsMethods.All,
         .. TurbineMethods.All,
         .. EnergyMethods.All,
+        .. PumpingMethods.All,
+        .. EconomicsMethods.All,
     ];
 
     internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, Waterway waterway, SurgeResult? surge, PlantChoice choice, double lowestFlowM3PerS)

@@ -1,8 +1,10 @@
 using System.Reflection;
 using HeadToWatts.Basis.Units;
+using HeadToWatts.Economics;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics;
+using HeadToWatts.Pumping;
 using HeadToWatts.Studies;
 using HeadToWatts.Turbines;
 
@@ -15,7 +17,7 @@ internal static class House
     public static readonly IReadOnlyList<Assembly> Calculations =
     [
         typeof(UnitTable).Assembly, typeof(FlowRecordMethods).Assembly, typeof(HydraulicsMethods).Assembly, typeof(TurbineTypes).Assembly,
-        typeof(EnergyMethods).Assembly, typeof(Study).Assembly,
+        typeof(EnergyMethods).Assembly, typeof(PumpingMethods).Assembly, typeof(EconomicsMethods).Assembly, typeof(Study).Assembly,
     ];
 
     /// <summary>Names of the projects that may hold calculations only; those not built yet are named already.</summary>

@@ -1,10 +1,12 @@
 using System.Globalization;
 using System.Text;
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Economics;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics;
 using HeadToWatts.Hydraulics.Pipes;
+using HeadToWatts.Pumping;
 using HeadToWatts.Studies.Cautions;
 using HeadToWatts.Turbines;
 
@@ -31,14 +33,18 @@ internal static class MethodsPage
         Methods(page, "Hydraulics", HydraulicsMethods.All);
         Methods(page, "Turbines", TurbineMethods.All);
         Methods(page, "Energy", EnergyMethods.All);
+        Methods(page, "Pumping", PumpingMethods.All);
+        Methods(page, "Economics", EconomicsMethods.All);
         Types(page);
         Materials(page);
         Cautions(page);
         return page.ToString().TrimEnd('\n') + "\n";
     }
 
-    private static void Methods(StringBuilder page, string stage, IEnumerable<Method> methods)
+    private static void Methods(StringBuilder page, string stage, IReadOnlyList<Method> methods)
     {
+        if (methods.Count == 0)
+            return;
         Line(page, $"## {stage}");
         Line(page);
         foreach (var method in methods)
