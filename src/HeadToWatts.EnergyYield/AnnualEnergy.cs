@@ -39,7 +39,7 @@ public sealed record AnnualEnergy(
         var availability = train.Availability;
         var energyKwh = year.MeterPowerKw * PhysicalConstants.HoursPerYear * availability;
         var top = best.At(best.BestUsableFlowM3PerS);
-        var installedKw = train.GeneratedPowerKw(top.ShaftPowerKw);
+        var installedKw = train.IsConstant ? train.GeneratedPowerKw(top.ShaftPowerKw) : top.IsRunning ? train.At(top.ShaftPowerKw, top.RunningShare, top.LoadSpread).GeneratedKw : 0;
         var fullLoadHours = installedKw > 0 ? energyKwh / installedKw : 0;
         return new AnnualEnergy(
             energyKwh,

@@ -55,7 +55,8 @@ public sealed record DesignFlowScan(IReadOnlyList<DesignFlowPoint> Points, doubl
             var flow = largest * i / Steps;
             var plant = new PlantCurve(new PlantDesign(site, grossHead, waterway, unitsOf(flow), train) { QuickLosses = losses });
             var kwh = TurbineRanking.QuickEnergyKwh(plant, middles);
-            var kw = train.GeneratedPowerKw(plant.At(plant.BestFlowM3PerS).ShaftPowerKw);
+            var best = plant.At(plant.BestFlowM3PerS);
+            var kw = train.IsConstant ? train.GeneratedPowerKw(best.ShaftPowerKw) : best.IsRunning ? plant.Design.Train.At(best.ShaftPowerKw, best.RunningShare, best.LoadSpread).GeneratedKw : 0;
             var grows = kw > lastKw * (1 + 1e-6) && kw > 0;
             var hours = grows ? (kwh - lastKwh) / (kw - lastKw) : double.NaN;
             points.Add(new DesignFlowPoint(flow, supply.ShareAtLeast(flow), kw, kwh, kw > 0 ? kwh / kw / PhysicalConstants.HoursPerYear : 0, hours));

@@ -17,5 +17,5 @@ public static class EnergyMethods
     public static Method PlantFactor { get; } = new("plant-factor", "Plant factor", "CF = E/(P_{installed} 8760 h)", Handbook, "", []);
 
     /// <summary>Every method of this stage.</summary>
-    public static IReadOnlyList<Method> All { get; } = [WaterPower, AnnualEnergy, PlantFactor];
+    public static IReadOnlyList<Method> All { get; } = [WaterPower, AnnualEnergy, PlantFactor, .. Electrical.ElectricalMethods.All];
 }

@@ -1,3 +1,5 @@
+using HeadToWatts.EnergyYield.Electrical;
+
 namespace HeadToWatts.EnergyYield;
 
 /// <summary>One step down from the energy of the falling water to the energy at the meter.</summary>
@@ -23,15 +25,35 @@ public sealed record EnergyStaircase(double GrossKwh, IReadOnlyList<EnergyStep> 
         var left = year.GrossPowerKw * hours;
         Down("waterway", year.HydraulicPowerKw * hours);
         Down("turbine", year.ShaftPowerKw * hours);
-        Down("gear or belt", left * train.DriveEfficiency);
-        Down("generator", left * train.GeneratorEfficiency);
-        // The plant stops itself before its own use exceeds its output, so the meter's energy fixes this step.
-        var behind = train.TransformerEfficiency * train.LineEfficiency;
-        Down("own use", behind > 0 ? year.MeterPowerKw * hours / behind : 0);
-        Down("transformer", left * train.TransformerEfficiency);
-        Down("line", left * train.LineEfficiency);
+        if (year.Train is { } trainMeans)
+            Detailed(trainMeans);
+        else
+            Constant();
         Down("out of service", left * train.Availability);
         return new EnergyStaircase(year.GrossPowerKw * hours, steps);
+
+        // Machines whose losses move with the load: the integral has the mean after each step.
+        void Detailed(TrainMeans means)
+        {
+            Down("gear or belt", means.DrivenKw * hours);
+            Down("generator", means.GeneratedKw * hours);
+            Down("own use", means.SentKw * hours);
+            Down("transformer", means.TransformedKw * hours);
+            Down("line", means.DeliveredKw * hours);
+            if (means.StandingKw > 0)
+                Down("transformer while standing", (means.DeliveredKw - means.StandingKw) * hours);
+        }
+
+        void Constant()
+        {
+            Down("gear or belt", left * train.DriveEfficiency);
+            Down("generator", left * train.GeneratorEfficiency);
+            // The plant stops itself before its own use exceeds its output, so the meter's energy fixes this step.
+            var behind = train.TransformerEfficiency * train.LineEfficiency;
+            Down("own use", behind > 0 ? year.MeterPowerKw * hours / behind : 0);
+            Down("transformer", left * train.TransformerEfficiency);
+            Down("line", left * train.LineEfficiency);
+        }
 
         void Down(string name, double to)
         {

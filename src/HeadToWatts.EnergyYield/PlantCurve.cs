@@ -12,14 +12,16 @@ public sealed class PlantCurve
     private readonly double[] _from;
     private readonly double[] _heldFlow;
     private readonly double _gammaKnPerM3;
+    private readonly bool _isConstant;
 
     /// <summary>Works out where the plant follows the flow and where it holds.</summary>
     /// <param name="design">The plant.</param>
     public PlantCurve(PlantDesign design)
     {
         ArgumentNullException.ThrowIfNull(design);
-        Design = design;
         _gammaKnPerM3 = design.Site.SpecificWeightNPerM3 / 1000;
+        _isConstant = design.Train.IsConstant;
+        Design = _isConstant ? design : design with { Train = design.Train.RatedFor(BestUnitShaftKw(design), design.Units.UnitCount) };
         if (design.MovingHead is not null)
         {
             _from = [0];
@@ -216,8 +218,22 @@ public sealed class PlantCurve
         return b;
     }
 
-    private static PlantPoint Standing(double usableFlowM3PerS, double grossHeadM) =>
-        new(usableFlowM3PerS, 0, 0, grossHeadM, 0, 0, 0) { GrossHeadM = grossHeadM };
+    private PlantPoint Standing(double usableFlowM3PerS, double grossHeadM) =>
+        new(usableFlowM3PerS, 0, 0, grossHeadM, 0, 0, -Design.Train.StandingDrawKw) { GrossHeadM = grossHeadM };
+
+    // Machines are rated for a unit's highest power at the rated head; where the pipe takes more than the flow brings, that is below full flow.
+    private static double BestUnitShaftKw(PlantDesign design)
+    {
+        const int steps = 20;
+        var best = 0.0;
+        for (var i = 1; i <= steps; i++)
+        {
+            var flow = design.Units.DesignFlowM3PerS * i / steps;
+            best = Math.Max(best, flow * design.NetHeadM(flow) * design.Units.LoadAt(flow).Efficiency);
+        }
+
+        return best * design.Site.SpecificWeightNPerM3 / 1000 / design.Units.UnitCount;
+    }
 
     private double PowerKw(double flowM3PerS) => Follow(flowM3PerS, Design.GrossHead.Metres).MeterPowerKw;
 
@@ -229,7 +245,8 @@ public sealed class PlantCurve
             return Standing(flowM3PerS, grossHeadM);
         var netHeadM = grossHeadM - Design.LossM(load.TurbineFlowM3PerS);
         var shaftKw = _gammaKnPerM3 * load.TurbineFlowM3PerS * netHeadM * load.Efficiency;
-        return new PlantPoint(flowM3PerS, load.TurbineFlowM3PerS, load.Running, netHeadM, load.Efficiency, shaftKw, Design.Train.MeterPowerKw(shaftKw)) { GrossHeadM = grossHeadM };
+        var meterKw = _isConstant ? Design.Train.MeterPowerKw(shaftKw) : Design.Train.At(shaftKw, load.RunningShare, load.LoadSpread).MeterKw;
+        return new PlantPoint(flowM3PerS, load.TurbineFlowM3PerS, load.Running, netHeadM, load.Efficiency, shaftKw, meterKw) { GrossHeadM = grossHeadM, RunningShare = load.RunningShare, LoadSpread = load.LoadSpread };
     }
 
     private readonly record struct Best(double FlowM3PerS, double PowerKw);

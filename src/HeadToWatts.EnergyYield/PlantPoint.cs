@@ -7,7 +7,7 @@ namespace HeadToWatts.EnergyYield;
 /// <param name="NetHeadM">Net head, m; the gross head when it stands.</param>
 /// <param name="TurbineEfficiency">Turbine efficiency, 0 to 1.</param>
 /// <param name="ShaftPowerKw">Power at the shaft, kW.</param>
-/// <param name="MeterPowerKw">Power at the meter while it is fit to run, kW.</param>
+/// <param name="MeterPowerKw">Power at the meter while it is fit to run, kW; below zero while it stands and a transformer stays live.</param>
 public readonly record struct PlantPoint(
     double UsableFlowM3PerS,
     double TurbineFlowM3PerS,
@@ -19,6 +19,12 @@ public readonly record struct PlantPoint(
 {
     /// <summary>Gross head at this flow, m.</summary>
     public double GrossHeadM { get; init; }
+
+    /// <summary>Full flow of the running units over that of all units, 0 to 1.</summary>
+    public double RunningShare { get; init; }
+
+    /// <summary>How unevenly the running units are loaded: mean square of their loads over the square of the mean, weighted by size over all units.</summary>
+    public double LoadSpread { get; init; }
 
     /// <summary>True when water goes through a turbine.</summary>
     public bool IsRunning => TurbineFlowM3PerS > 0;

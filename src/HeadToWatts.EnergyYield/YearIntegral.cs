@@ -1,3 +1,5 @@
+using HeadToWatts.EnergyYield.Electrical;
+
 namespace HeadToWatts.EnergyYield;
 
 /// <summary>
@@ -25,6 +27,9 @@ public sealed record YearIntegral(
     double UsableM3PerS,
     int Panels)
 {
+    /// <summary>Means after each step from the shaft to the meter; null where the steps keep constant ratios.</summary>
+    public TrainMeans? Train { get; init; }
+
     private const double Agreement = 1e-9;
 
     private static readonly double[] Nodes2 = [-0.5773502691896257, 0.5773502691896257];
@@ -83,7 +88,7 @@ public sealed record YearIntegral(
             parts.Sum(p => p.RunningShare),
             parts.Sum(p => p.BelowLeastM3PerS),
             parts.Sum(p => p.UsableM3PerS),
-            parts.Sum(p => p.Panels));
+            parts.Sum(p => p.Panels)) { Train = TrainMeans.Sum(parts.Select(p => p.Train)) };
     }
 
     private static int LastBelow(IReadOnlyList<double> edges, double flow)
@@ -115,6 +120,8 @@ public sealed record YearIntegral(
         private double _below;
         private double _usable;
         private int _panels;
+        private TrainPower _train;
+        private double _standing;
 
         public void Constant(double usable, double width) => Add(plant.At(usable), width);
 
@@ -142,7 +149,10 @@ public sealed record YearIntegral(
         }
 
         public YearIntegral Done() =>
-            new(_turbine, _gross, _hydraulic, _shaft, _meter, _running, _below, _usable, _panels);
+            new(_turbine, _gross, _hydraulic, _shaft, _meter, _running, _below, _usable, _panels)
+            {
+                Train = plant.Design.Train.IsConstant ? null : new TrainMeans(_train.DrivenKw, _train.GeneratedKw, _train.SentKw, _train.TransformedKw, _train.MeterKw, _standing),
+            };
 
         private double Mean(double high, double low)
         {
@@ -180,6 +190,8 @@ public sealed record YearIntegral(
             if (!point.IsRunning)
             {
                 _below += width * point.UsableFlowM3PerS;
+                _meter += width * point.MeterPowerKw;
+                _standing -= width * point.MeterPowerKw;
                 return;
             }
 
@@ -189,6 +201,15 @@ public sealed record YearIntegral(
             _hydraulic += width * _gammaKn * point.TurbineFlowM3PerS * point.NetHeadM;
             _shaft += width * point.ShaftPowerKw;
             _meter += width * point.MeterPowerKw;
+            if (plant.Design.Train is not { IsConstant: false } train)
+                return;
+            var power = train.At(point.ShaftPowerKw, point.RunningShare, point.LoadSpread);
+            _train = new TrainPower(
+                _train.DrivenKw + (width * power.DrivenKw),
+                _train.GeneratedKw + (width * power.GeneratedKw),
+                _train.SentKw + (width * power.SentKw),
+                _train.TransformedKw + (width * power.TransformedKw),
+                _train.MeterKw + (width * power.MeterKw));
         }
     }
 }

@@ -87,7 +87,7 @@ public static class Study
                 choice.Units.Efficiency,
                 input.Turbine.MakersCurve is not null,
                 choice.Units),
-            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply) },
+            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant) },
             StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply)));
     }
 

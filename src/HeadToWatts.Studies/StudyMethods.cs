@@ -41,6 +41,7 @@ public static class StudyMethods
         uses.Add(EnergyMethods.WaterPower.Used());
         uses.Add(EnergyMethods.AnnualEnergy.Used());
         uses.Add(EnergyMethods.PlantFactor.Used());
+        uses.AddRange(ElectricalUses.Of(input.Train, choice));
         if (choice.Chosen.Speed is { } speed)
             uses.AddRange(speed.Uses);
         if (surge is not null)

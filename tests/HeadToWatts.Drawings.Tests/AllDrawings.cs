@@ -36,6 +36,7 @@ public static class AllDrawings
             ("power", PowerChart.Draw(result, show, s)),
             ("design flow", DesignFlowChart.Draw(result, show, s)),
             ("months", MonthsChart.Draw(result, s)),
+            ("staircase", EnergyStaircaseChart.Draw(result, s)),
             ("losses", LossShareChart.Draw(result, show, s)),
         };
         return [.. all.Where(d => d.Item2 is not null).Select(d => (d.Item1, d.Item2!))];

@@ -41,4 +41,10 @@ public enum Dimension
 
     /// <summary>Shaft speed; held in revolutions per minute.</summary>
     RotationalSpeed,
+
+    /// <summary>Electrical voltage; SI unit V.</summary>
+    Voltage,
+
+    /// <summary>Electrical apparent power; SI unit VA.</summary>
+    ApparentPower,
 }

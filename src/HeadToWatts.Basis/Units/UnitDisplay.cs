@@ -75,6 +75,8 @@ public sealed class UnitDisplay
         Dimension.Duration => UnitTable.Hour,
         Dimension.Frequency => UnitTable.Hertz,
         Dimension.RotationalSpeed => UnitTable.RevolutionPerMinute,
+        Dimension.Voltage => UnitTable.Kilovolt,
+        Dimension.ApparentPower => UnitTable.KilovoltAmpere,
         _ => throw new ArgumentOutOfRangeException(nameof(dimension)),
     };
 

@@ -84,6 +84,15 @@ public static class UnitTable
     /// <summary>Revolutions per minute.</summary>
     public static readonly UnitOfMeasure RevolutionPerMinute = Unit("rpm", Dimension.RotationalSpeed, 1, "r/min", "rev/min");
 
+    /// <summary>Volts.</summary>
+    public static readonly UnitOfMeasure Volt = Unit("V", Dimension.Voltage, 1, "volt", "volts");
+
+    /// <summary>Kilovolts.</summary>
+    public static readonly UnitOfMeasure Kilovolt = Unit("kV", Dimension.Voltage, 1e3);
+
+    /// <summary>Kilovolt-amperes.</summary>
+    public static readonly UnitOfMeasure KilovoltAmpere = Unit("kVA", Dimension.ApparentPower, 1e3);
+
     /// <summary>Hours.</summary>
     public static readonly UnitOfMeasure Hour = Unit("h", Dimension.Duration, 3600, "hour", "hours", "hr");
 
@@ -142,6 +151,11 @@ public static class UnitTable
         Unit("days", Dimension.Duration, Day, "day"),
         Hertz,
         RevolutionPerMinute,
+        Kilovolt,
+        Volt,
+        KilovoltAmpere,
+        Unit("VA", Dimension.ApparentPower, 1),
+        Unit("MVA", Dimension.ApparentPower, 1e6),
     ];
 
     private static readonly FrozenDictionary<Dimension, UnitOfMeasure[]> ByDimension =

@@ -68,6 +68,7 @@ public static class ResultsJson
         json.WriteNumber("gravityMPerS2", r.Site.GravityMPerS2);
         Water(json, r);
         Steps(json, r);
+        MachineJson.Electrical(json, r);
         Elements(json, r);
         json.WriteStartArray("netHeads");
         foreach (var p in r.Head.AtShares)

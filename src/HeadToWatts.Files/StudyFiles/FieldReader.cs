@@ -69,6 +69,9 @@ internal sealed class FieldReader(List<Problem> problems)
         return null;
     }
 
+    /// <summary>States what was assumed.</summary>
+    internal void Assume(string sentence) => _assumptions.Add(sentence);
+
     internal void Refuse(string where, string? read, string why, string accepted = "") => Problems.Add(new Problem(where, read ?? "", why, accepted));
 
     private double? InRange(Checked<double> read, string? text, Dimension dimension, string where, double lowest, double highest)

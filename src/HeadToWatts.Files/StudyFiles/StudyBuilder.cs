@@ -1,7 +1,6 @@
 using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Quantities;
 using HeadToWatts.Basis.Units;
-using HeadToWatts.EnergyYield;
 using HeadToWatts.Studies.Inputs;
 
 namespace HeadToWatts.Files.StudyFiles;
@@ -60,7 +59,7 @@ public static class StudyBuilder
         var head = HeadBuilder.Build(d.Head, path + ".head", site, read);
         var waterway = WaterwayBuilder.Build(d.Waterway, path + ".waterway", read);
         var turbine = TurbineBuilder.Build(d.Turbine, path + ".turbine", read);
-        var train = Train(d.Losses, path + ".losses", read);
+        var train = TrainBuilder.Build(d.Losses, path + ".losses", read);
 
         // With a problem anywhere the value is thrown away by the caller; the placeholders only keep the types whole.
         return new AlternativeInput(
@@ -78,26 +77,5 @@ public static class StudyBuilder
     {
         if (head is { MovesWithMonth: true } && flow is { Record: null })
             yield return "Levels are given by month, but rows of a curve know no months; the level of the season's middle month is used throughout. A daily record would use each month's own.";
-    }
-
-    private static PowerTrain Train(LossesDocument d, string path, FieldReader read)
-    {
-        double ownRatio = 0, ownKw = 0;
-        if (!string.IsNullOrWhiteSpace(d.OwnUse))
-        {
-            if (d.OwnUse.Contains('%', StringComparison.Ordinal))
-                ownRatio = read.Optional(d.OwnUse, Dimension.Ratio, path + ".ownUse", 0, 0.5) ?? 0;
-            else
-                ownKw = (read.Optional(d.OwnUse, Dimension.Power, path + ".ownUse", 0, 1e7) ?? 0) / 1000;
-        }
-
-        return new PowerTrain(
-            read.Assumed(d.Drive, Dimension.Ratio, path + ".drive", 0.3, 1, "100 %", "The efficiency of gear or belt"),
-            read.Assumed(d.Generator, Dimension.Ratio, path + ".generator", 0.3, 1, "93 %", "The generator efficiency"),
-            read.Assumed(d.Transformer, Dimension.Ratio, path + ".transformer", 0.3, 1, "99 %", "The transformer efficiency"),
-            read.Assumed(d.Line, Dimension.Ratio, path + ".line", 0.3, 1, "99 %", "The line efficiency"),
-            ownRatio,
-            ownKw,
-            read.Assumed(d.Availability, Dimension.Ratio, path + ".availability", 0.1, 1, "95 %", "The availability"));
     }
 }

@@ -370,9 +370,72 @@ public sealed class LossesDocument
     /// <summary>Efficiency of the line.</summary>
     public string? Line { get; set; }
 
+    /// <summary>The generators in detail, in place of <see cref="Generator"/>.</summary>
+    public GeneratorDocument? GeneratorDetail { get; set; }
+
+    /// <summary>The transformer in detail, in place of <see cref="Transformer"/>.</summary>
+    public TransformerDocument? TransformerDetail { get; set; }
+
+    /// <summary>The line in detail, in place of <see cref="Line"/>.</summary>
+    public LineDocument? LineDetail { get; set; }
+
+    /// <summary>Power factor in transformer and line.</summary>
+    public string? PowerFactor { get; set; }
+
     /// <summary>Own use: a percent of the output or a power.</summary>
     public string? OwnUse { get; set; }
 
     /// <summary>Availability.</summary>
     public string? Availability { get; set; }
+}
+
+/// <summary>The generators in detail; each unit has one.</summary>
+public sealed class GeneratorDocument
+{
+    /// <summary>"synchronous" or "induction".</summary>
+    public string? Kind { get; set; }
+
+    /// <summary>Rated output of one generator, a power.</summary>
+    public string? Rating { get; set; }
+
+    /// <summary>Efficiency at rated output.</summary>
+    public string? Efficiency { get; set; }
+}
+
+/// <summary>The transformer in detail.</summary>
+public sealed class TransformerDocument
+{
+    /// <summary>Rating, an apparent power.</summary>
+    public string? Rating { get; set; }
+
+    /// <summary>No-load loss: a power, or a percent of the rating.</summary>
+    public string? NoLoadLoss { get; set; }
+
+    /// <summary>Load loss at the rating: a power, or a percent of the rating.</summary>
+    public string? LoadLoss { get; set; }
+
+    /// <summary>"live" or "off" while the plant stands.</summary>
+    public string? WhenStanding { get; set; }
+}
+
+/// <summary>The line in detail.</summary>
+public sealed class LineDocument
+{
+    /// <summary>Length of the run, one way.</summary>
+    public string? Length { get; set; }
+
+    /// <summary>Voltage at the meter.</summary>
+    public string? Voltage { get; set; }
+
+    /// <summary>3 or 1.</summary>
+    public string? Phases { get; set; }
+
+    /// <summary>Size of a conductor, as in "4/0 AWG" or "95 mm2".</summary>
+    public string? Conductor { get; set; }
+
+    /// <summary>"aluminium" or "copper".</summary>
+    public string? Metal { get; set; }
+
+    /// <summary>Temperature of the conductor in use.</summary>
+    public string? Temperature { get; set; }
 }

@@ -127,6 +127,10 @@ internal static class StudyDocumentFields
         Generator = r.Text("generator"),
         Transformer = r.Text("transformer"),
         Line = r.Text("line"),
+        GeneratorDetail = r.Object("generatorDetail", g => new GeneratorDocument { Kind = g.Text("kind"), Rating = g.Text("rating"), Efficiency = g.Text("efficiency") }),
+        TransformerDetail = r.Object("transformerDetail", t => new TransformerDocument { Rating = t.Text("rating"), NoLoadLoss = t.Text("noLoadLoss"), LoadLoss = t.Text("loadLoss"), WhenStanding = t.Text("whenStanding") }),
+        LineDetail = r.Object("lineDetail", l => new LineDocument { Length = l.Text("length"), Voltage = l.Text("voltage"), Phases = l.NumberText("phases"), Conductor = l.Text("conductor"), Metal = l.Text("metal"), Temperature = l.Text("temperature") }),
+        PowerFactor = r.NumberText("powerFactor"),
         OwnUse = r.Text("ownUse"),
         Availability = r.Text("availability"),
     };

@@ -27,6 +27,7 @@ internal static class EnergySection
         if (energy.Days is { } days)
             Months(memo, days);
         Staircase(memo, annual);
+        ElectricalPart.Write(memo);
         Water(memo);
     }
 
@@ -78,6 +79,8 @@ internal static class EnergySection
     {
         var stairs = annual.Staircase;
         memo.Body.Part("Where the energy is lost", "losses-energy");
+        if (Figures.Staircase(memo) is { } drawing)
+            memo.Body.Figure("fig-staircase", drawing, "From the falling water to the meter, in a mean year.");
         var step = RoundToSum.StepFor(stairs.GrossKwh / 1000, 4);
         var shown = stairs.Steps.Where(s => Math.Abs(s.LossKwh) > stairs.GrossKwh * 1e-9).ToArray();
         var parts = RoundToSum.Of([.. shown.Select(s => s.LossKwh / 1000), annual.AnnualEnergyKwh / 1000], step);

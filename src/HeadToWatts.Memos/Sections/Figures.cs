@@ -20,5 +20,7 @@ internal static class Figures
 
     public static Drawing? Losses(MemoContext memo) => LossShareChart.Draw(memo.Result, memo.Show, Size);
 
+    public static Drawing? Staircase(MemoContext memo) => EnergyStaircaseChart.Draw(memo.Result, Size);
+
     public static Drawing? Months(MemoContext memo) => MonthsChart.Draw(memo.Result, Size with { Height = 190 });
 }

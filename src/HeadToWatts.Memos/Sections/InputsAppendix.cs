@@ -60,7 +60,7 @@ internal static class InputsAppendix
             rows.Add(Row("Least flow of a unit", MemoContext.Percent(least) + " of its full flow"));
         rows.Add(Row("Efficiency", input.Turbine.MakersCurve is null ? "typical of the type" : "manufacturer's table, printed in the section on turbines"));
         var train = input.Train;
-        rows.Add(Row("Gear or belt; generator; transformer; line", $"{MemoContext.Percent(train.DriveEfficiency)}; {MemoContext.Percent(train.GeneratorEfficiency)}; {MemoContext.Percent(train.TransformerEfficiency)}; {MemoContext.Percent(train.LineEfficiency)}"));
+        rows.Add(Row("Gear or belt; generator; transformer; line", ElectricalPart.Given(memo)));
         rows.Add(Row("Own use", $"{MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}"));
         rows.Add(Row("Availability", MemoContext.Percent(train.Availability)));
         body.Table("tab-inputs", "Inputs.", [new("Input", Share: 1), new("Value", Share: 2)], rows);

@@ -21,7 +21,7 @@ internal static class LimitsSection
             result.Input.Head.Moves
                 ? "Water levels follow the flow or the month by the ratings given; outside a rating they are held at its end."
                 : "Headwater and tailwater levels hold at every flow.",
-            $"Constant efficiencies behind the shaft: gear or belt {MemoContext.Percent(train.DriveEfficiency)}, generator {MemoContext.Percent(train.GeneratorEfficiency)}, transformer {MemoContext.Percent(train.TransformerEfficiency)}, line {MemoContext.Percent(train.LineEfficiency)}; own use {MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}.",
+            $"{(train.IsConstant ? "Constant efficiencies behind the shaft" : "Behind the shaft")}: {ElectricalPart.Given(memo)}; own use {MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}.",
             $"The plant is fit to run {MemoContext.Percent(train.Availability)} of the time, evenly over the flows.",
             "Units are equal and come in one after another; the plant follows the flow without storage.",
             "The year has 365 days and 8760 hours.",

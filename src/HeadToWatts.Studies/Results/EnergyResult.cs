@@ -12,6 +12,9 @@ public sealed record EnergyResult(PlantCurve Plant, AnnualEnergy Annual, DailyRu
 {
     /// <summary>Annual energy with the head lower and higher by its stated error; null when no error is stated.</summary>
     public EnergyRange? WithHeadError { get; init; }
+
+    /// <summary>From the shaft to the meter in detail; null where every step keeps a constant ratio.</summary>
+    public ElectricalResult? Electrical { get; init; }
 }
 
 /// <summary>Annual energy at the two ends of an error.</summary>

@@ -18,11 +18,17 @@ internal static class EnergyWorkings
             UnitDisplay.Power(point.ShaftPowerKw),
             show.System == UnitSystem.US ? "Feet and cubic feet are turned into metres first: 1 ft = 0.3048 m exactly." : "", [EnergyMethods.WaterPower]);
 
-        yield return new Working(
-            "power", StudyStage.Energy, "Power at the meter", "P = (P_{shaft} η_d η_g (1 − u) − P_u) η_{tr} η_l",
-            $"({UnitDisplay.Power(point.ShaftPowerKw)} × {UnitDisplay.Number(train.DriveEfficiency)} × {UnitDisplay.Number(train.GeneratorEfficiency)} × (1 − {UnitDisplay.Number(train.OwnUseRatio)}) − {UnitDisplay.Power(train.OwnUseKw)}) × {UnitDisplay.Number(train.TransformerEfficiency)} × {UnitDisplay.Number(train.LineEfficiency)}",
-            UnitDisplay.Power(annual.MeterPowerKw),
-            $"Installed power, at the generator: {UnitDisplay.Power(annual.InstalledPowerKw)}.", [EnergyMethods.WaterPower]);
+        foreach (var working in ElectricalWorkings.Of(result))
+            yield return working;
+
+        if (result.Energy.Electrical is null)
+        {
+            yield return new Working(
+                "power", StudyStage.Energy, "Power at the meter", "P = (P_{shaft} η_d η_g (1 − u) − P_u) η_{tr} η_l",
+                $"({UnitDisplay.Power(point.ShaftPowerKw)} × {UnitDisplay.Number(train.DriveEfficiency)} × {UnitDisplay.Number(train.GeneratorEfficiency)} × (1 − {UnitDisplay.Number(train.OwnUseRatio)}) − {UnitDisplay.Power(train.OwnUseKw)}) × {UnitDisplay.Number(train.TransformerEfficiency)} × {UnitDisplay.Number(train.LineEfficiency)}",
+                UnitDisplay.Power(annual.MeterPowerKw),
+                $"Installed power, at the generator: {UnitDisplay.Power(annual.InstalledPowerKw)}.", [EnergyMethods.WaterPower]);
+        }
 
         var meanKw = annual.Integral.MeterPowerKw;
         yield return new Working(

@@ -5,7 +5,14 @@ namespace HeadToWatts.Turbines.Units;
 /// <param name="FlowPerUnitM3PerS">Flow through each running unit, m3/s.</param>
 /// <param name="TurbineFlowM3PerS">Flow through all units, m3/s.</param>
 /// <param name="Efficiency">Efficiency of each running turbine, 0 to 1; 0 when none runs.</param>
-public readonly record struct UnitLoad(int Running, double FlowPerUnitM3PerS, double TurbineFlowM3PerS, double Efficiency);
+public readonly record struct UnitLoad(int Running, double FlowPerUnitM3PerS, double TurbineFlowM3PerS, double Efficiency)
+{
+    /// <summary>Full flow of the running units over that of all units, 0 to 1.</summary>
+    public double RunningShare { get; init; }
+
+    /// <summary>Mean square of the units' loads over the square of their mean, weighted by size over all units; 1/RunningShare when those that run share alike.</summary>
+    public double LoadSpread { get; init; }
+}
 
 /// <summary>
 /// Equal units brought in one after another as flow rises. As many run as are needed to pass the flow, and they share it equally;
@@ -83,7 +90,11 @@ public sealed class UnitSet
             share = UnitDesignFlowM3PerS;
         }
 
-        return new UnitLoad(running, share, Math.Min(share * running, flow), Efficiency.At(share / UnitDesignFlowM3PerS));
+        return new UnitLoad(running, share, Math.Min(share * running, flow), Efficiency.At(share / UnitDesignFlowM3PerS))
+        {
+            RunningShare = (double)running / UnitCount,
+            LoadSpread = (double)UnitCount / running,
+        };
     }
 
     private List<double> Breakpoints()

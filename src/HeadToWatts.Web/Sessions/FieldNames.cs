@@ -21,7 +21,9 @@ public static partial class FieldNames
         ["length"] = "length", ["insideDiameter"] = "inside diameter", ["material"] = "material", ["roughness"] = "roughness", ["hazenWilliamsC"] = "Hazen-Williams C", ["manningN"] = "Manning n",
         ["fittings"] = "fitting", ["fitting"] = "kind", ["k"] = "K", ["count"] = "how many", ["wallThickness"] = "wall thickness", ["pressureRating"] = "pressure rating", ["endElevation"] = "elevation at its lower end",
         ["turbine"] = "turbine", ["type"] = "type", ["efficiencyTable"] = "efficiency row", ["efficiency"] = "efficiency", ["leastFlow"] = "least flow",
-        ["losses"] = "from shaft to meter", ["drive"] = "gear or belt", ["generator"] = "generator", ["transformer"] = "transformer", ["line"] = "line", ["ownUse"] = "own use", ["availability"] = "availability",
+        ["losses"] = "from shaft to meter", ["drive"] = "gear or belt", ["generator"] = "generator", ["transformer"] = "transformer", ["line"] = "line", ["generatorDetail"] = "generator", ["transformerDetail"] = "transformer", ["lineDetail"] = "line", ["powerFactor"] = "power factor",
+        ["kind"] = "kind", ["rating"] = "rating", ["noLoadLoss"] = "no-load loss", ["loadLoss"] = "load loss", ["whenStanding"] = "while the plant stands",
+        ["voltage"] = "voltage", ["phases"] = "phases", ["conductor"] = "conductor", ["metal"] = "metal", ["temperature"] = "temperature", ["ownUse"] = "own use", ["availability"] = "availability",
     };
 
     /// <summary>The place in words, as "waterway, pipe 1, inside diameter". A place that is not a field stays as it is.</summary>

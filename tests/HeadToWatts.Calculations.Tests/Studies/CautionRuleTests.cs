@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Units;
+using HeadToWatts.EnergyYield.Electrical;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Studies;
@@ -62,6 +63,12 @@ public class CautionRuleTests
         new("better-type", Quiet.WithType("crossflow"), "with crossflow", "would make"),
         new("typical-efficiency", Quiet, "not a guarantee", "not a guarantee") { Spares = Quiet.WithMakersEfficiency(0.88) },
         new("makers-efficiency", Quiet.WithMakersEfficiency(0.88), "manufacturer's table", "manufacturer's table"),
+        new("drive-loss-forgotten", Quiet.WithHead(6).WithType("screw", 2).WithPipes(), "Gears and belts lose 2 to 5 %", "Gears and belts lose 2 to 5 %"),
+        new("generator-overloaded", Quiet with { Train = Quiet.Train with { Generator = new GeneratorMachine(GeneratorKind.Synchronous, 300, null) } }, "on a generator of 300 kW", "on a generator of 300 kW")
+            { Spares = Quiet with { Train = Quiet.Train with { Generator = new GeneratorMachine(GeneratorKind.Synchronous, null, null) } } },
+        new("induction-needs-grid", Quiet with { Train = Quiet.Train with { Generator = new GeneratorMachine(GeneratorKind.Induction, null, null) } }, "excited by the grid", "excited by the grid"),
+        new("line-loss-high", Quiet with { Train = Quiet.Train with { Line = new LineRun(400, 480, 3, Conductors.Find("4/0 AWG")!, Conductors.Aluminium, 50), PowerFactor = 0.95 } }, "over the 480 V at the meter", "over the 480 V at the meter")
+            { Spares = Quiet with { Train = Quiet.Train with { Line = new LineRun(400, 12_470, 3, Conductors.Find("4/0 AWG")!, Conductors.Aluminium, 50), PowerFactor = 0.95 } } },
         new("no-energy", Quiet.WithFlow(f => f with { Allocation = new WaterAllocation(ReservedFlow.Constant(5), 0) }), "never runs", "never runs"),
         new("low-plant-factor", Quiet.WithFlow(f => f with { Season = OperatingSeason.Months([6, 7]) }), "The plant factor is 1", "The plant factor is 1"),
         new("small-plant", Quiet.WithFlow(f => f with { DesignFlowM3PerS = 0.05 }).WithPipes(TestStudies.Pipe(0.2, 100)), "below the 50 kW", "below the 50 kW"),

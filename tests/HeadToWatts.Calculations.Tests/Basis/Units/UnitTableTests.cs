@@ -56,6 +56,11 @@ public class UnitTableTests
         ["s"] = (UnitsNet.Duration.From(1, DurationUnit.Second).Seconds, 1e-12),
         ["days"] = (UnitsNet.Duration.From(1, DurationUnit.Day).Seconds, 1e-12),
         ["Hz"] = (UnitsNet.Frequency.From(1, FrequencyUnit.Hertz).Hertz, 1e-12),
+        ["V"] = (UnitsNet.ElectricPotential.From(1, ElectricPotentialUnit.Volt).Volts, 1e-12),
+        ["kV"] = (UnitsNet.ElectricPotential.From(1, ElectricPotentialUnit.Kilovolt).Volts, 1e-12),
+        ["VA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Voltampere).Voltamperes, 1e-12),
+        ["kVA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Kilovoltampere).Voltamperes, 1e-12),
+        ["MVA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Megavoltampere).Voltamperes, 1e-12),
         ["rpm"] = (UnitsNet.RotationalSpeed.From(1, RotationalSpeedUnit.RevolutionPerMinute).RevolutionsPerMinute, 1e-12),
     };
 

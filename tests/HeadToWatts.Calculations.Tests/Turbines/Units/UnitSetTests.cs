@@ -19,15 +19,15 @@ public class UnitSetTests
         var curve = EfficiencyCurve.FromTable([(0.25, 0.5), (1, 0.8)], "hand").Value;
         var set = new UnitSet(Kaplan, curve, 0.25, 3, 6);
         Assert.Equal(default, set.LoadAt(0.49));
-        Assert.Equal(new UnitLoad(1, 0.5, 0.5, 0.5), set.LoadAt(0.5));
-        Assert.Equal(new UnitLoad(1, 2, 2, 0.8), set.LoadAt(2));
+        Assert.Equal(new UnitLoad(1, 0.5, 0.5, 0.5) { RunningShare = 1.0 / 3, LoadSpread = 3 }, set.LoadAt(0.5));
+        Assert.Equal(new UnitLoad(1, 2, 2, 0.8) { RunningShare = 1.0 / 3, LoadSpread = 3 }, set.LoadAt(2));
         var two = set.LoadAt(3);
         Assert.Equal(2, two.Running);
         Assert.Equal(1.5, two.FlowPerUnitM3PerS, 1e-14);
         Assert.Equal(0.7, two.Efficiency, 1e-14);
         Assert.Equal(2, set.LoadAt(4).Running);
         Assert.Equal(3, set.LoadAt(4.001).Running);
-        Assert.Equal(new UnitLoad(3, 2, 6, 0.8), set.LoadAt(6));
+        Assert.Equal(new UnitLoad(3, 2, 6, 0.8) { RunningShare = 1, LoadSpread = 1 }, set.LoadAt(6));
         Assert.Equal(set.LoadAt(6), set.LoadAt(60));
     }
 

@@ -1,0 +1,45 @@
+using System.Text.Json;
+using HeadToWatts.Studies;
+
+namespace HeadToWatts.Files.Exports;
+
+/// <summary>What the study found of the machines, as JSON.</summary>
+internal static class MachineJson
+{
+    internal static void Electrical(Utf8JsonWriter json, StudyResult r)
+    {
+        if (r.Energy.Electrical is not { } found)
+        {
+            json.WriteNull("electrical");
+            return;
+        }
+
+        json.WriteStartObject("electrical");
+        json.WriteNumber("drivenKw", found.AtBest.DrivenKw);
+        json.WriteNumber("generatedKw", found.AtBest.GeneratedKw);
+        json.WriteNumber("sentKw", found.AtBest.SentKw);
+        json.WriteNumber("transformedKw", found.AtBest.TransformedKw);
+        json.WriteNumber("meterKw", found.AtBest.MeterKw);
+        json.WriteNumber("powerFactor", found.Train.PowerFactor);
+        var rated = found.Train.Rated;
+        Number(json, "generatorRatingKw", rated?.Generator?.RatedPowerKw);
+        Number(json, "generatorEfficiency", rated?.Generator?.FullLoadEfficiency);
+        Number(json, "generatorLoadRatio", found.GeneratorLoadRatio);
+        Number(json, "transformerKva", rated?.Transformer?.RatingKva);
+        Number(json, "noLoadLossKw", rated?.Transformer?.NoLoadLossKw);
+        Number(json, "loadLossKw", rated?.Transformer?.LoadLossKw);
+        Number(json, "lineResistanceOhm", found.Train.Line?.ResistanceOhm);
+        Number(json, "lineCurrentA", found.LineCurrentA);
+        Number(json, "lineLossShare", found.LineLossShare);
+        Number(json, "voltageRiseRatio", found.VoltageRiseRatio);
+        json.WriteEndObject();
+    }
+
+    internal static void Number(Utf8JsonWriter json, string name, double? value)
+    {
+        if (value is { } number && double.IsFinite(number))
+            json.WriteNumber(name, number);
+        else
+            json.WriteNull(name);
+    }
+}
