@@ -86,7 +86,7 @@ public static class Study
                 input.Turbine.UnitCount is null,
                 choice.Units.Efficiency,
                 input.Turbine.MakersCurve is not null,
-                choice.Units),
+                choice.Units) { Sheets = MachineSheets.Of(choice.Ranking, site), Pump = MachineSheets.Pump(choice, input.Turbine) },
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant) },
             StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply)));
     }

@@ -44,6 +44,7 @@ public static class StudyMethods
         uses.AddRange(ElectricalUses.Of(input.Train, choice));
         if (choice.Chosen.Speed is { } speed)
             uses.AddRange(speed.Uses);
+        uses.AddRange(MachineSheets.Uses(choice, input.Turbine, site));
         if (surge is not null)
             uses.AddRange(surge.Uses);
         return MethodUse.Union(uses);

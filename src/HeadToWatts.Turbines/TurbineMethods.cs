@@ -1,5 +1,6 @@
 using HeadToWatts.Basis.Sources;
 using HeadToWatts.Turbines.Screw;
+using HeadToWatts.Turbines.Sizing;
 using HeadToWatts.Turbines.WaterWheel;
 
 namespace HeadToWatts.Turbines;
@@ -48,5 +49,12 @@ public static class TurbineMethods
         SynchronousSpeed,
         ScrewSpeed.Speed,
         WaterWheelSpeed.Speed,
+        JetWheelSizing.Method,
+        CrossflowSizing.Method,
+        ReactionSizing.Method,
+        ScrewSizing.Method,
+        RunnerSetting.CriticalSigma,
+        RunnerSetting.Highest,
+        PumpCorrelations.Method,
     ];
 }

@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Turbines;
 
@@ -35,8 +36,24 @@ public sealed record TurbineType(
     /// </summary>
     public RunnerSpeedRule? OwnSpeedRule { get; init; }
 
+    /// <summary>The rule for the size of its runner; null where this project has none.</summary>
+    public RunnerSizing? Sizing { get; init; }
+
+    /// <summary>Which table of critical cavitation coefficients its runner follows; null where the setting is the maker's matter, or the runner turns in air.</summary>
+    public RunnerFlow? CavitationTable { get; init; }
+
     /// <summary>The name.</summary>
     public override string ToString() => Name;
+}
+
+/// <summary>How water goes through a runner under pressure.</summary>
+public enum RunnerFlow
+{
+    /// <summary>Inward and then along the shaft (Francis).</summary>
+    Mixed,
+
+    /// <summary>Along the shaft (Kaplan, propeller).</summary>
+    Axial,
 }
 
 /// <summary>The figures of a turbine type that need a source.</summary>

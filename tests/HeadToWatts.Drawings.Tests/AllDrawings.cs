@@ -36,6 +36,7 @@ public static class AllDrawings
             ("power", PowerChart.Draw(result, show, s)),
             ("design flow", DesignFlowChart.Draw(result, show, s)),
             ("months", MonthsChart.Draw(result, s)),
+            ("pump band", PumpBandChart.Draw(Scenarios.AsPump(result), show, s)),
             ("staircase", EnergyStaircaseChart.Draw(result, s)),
             ("losses", LossShareChart.Draw(result, show, s)),
         };

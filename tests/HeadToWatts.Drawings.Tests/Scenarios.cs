@@ -33,6 +33,9 @@ public static class Scenarios
 
     public static IEnumerable<string> Names => Results.Value.Keys;
 
+    /// <summary>The same study with a pump as turbine, for the drawing that only such a study has.</summary>
+    public static StudyResult AsPump(StudyResult result) => Study.Run(result.Header, result.Input with { Turbine = new TurbineInput(TurbineTypes.Find("pump-as-turbine"), null, null, null) });
+
     public static StudyResult Get(string name) => Results.Value[name];
 
     private static StudyResult CanalDrop() => Run(

@@ -1,5 +1,6 @@
 using System.Text.Json;
 using HeadToWatts.Studies;
+using HeadToWatts.Studies.Results;
 
 namespace HeadToWatts.Files.Exports;
 
@@ -32,6 +33,47 @@ internal static class MachineJson
         Number(json, "lineCurrentA", found.LineCurrentA);
         Number(json, "lineLossShare", found.LineLossShare);
         Number(json, "voltageRiseRatio", found.VoltageRiseRatio);
+        json.WriteEndObject();
+    }
+
+    internal static void Sheet(Utf8JsonWriter json, MachineSheet? sheet)
+    {
+        Number(json, "speedRpm", sheet?.Candidate.Speed?.RunnerSpeedRpm);
+        Number(json, "runawayRpm", sheet?.Candidate.Speed?.RunawayRpm);
+        if (sheet?.Candidate.Speed is { } speed)
+            json.WriteBoolean("isDirect", speed.IsDirect);
+        Number(json, "meterPowerKw", sheet?.Candidate.MeterPowerKw);
+        Number(json, "runnerDiameterM", sheet?.Geometry?.DiameterM ?? sheet?.Candidate.Speed?.RunnerDiameterM);
+        Number(json, "thomaSigma", sheet?.Setting?.ThomaSigma);
+        Number(json, "highestSettingM", sheet?.Setting?.HighestM);
+        json.WriteStartArray("against");
+        foreach (var sentence in sheet?.Against ?? [])
+            json.WriteStringValue(sentence);
+        json.WriteEndArray();
+    }
+
+    internal static void Pump(Utf8JsonWriter json, StudyResult r)
+    {
+        if (r.Turbine.Pump is not { } band)
+        {
+            json.WriteNull("pumpAsTurbine");
+            return;
+        }
+
+        json.WriteStartObject("pumpAsTurbine");
+        json.WriteBoolean("isPumpToLookFor", band.Pump is null);
+        json.WriteNumber("pumpEfficiency", band.PumpEfficiency);
+        json.WriteStartArray("estimates");
+        foreach (var e in band.Estimates)
+        {
+            json.WriteStartObject();
+            json.WriteString("by", e.Correlation.Name);
+            json.WriteNumber("flowM3PerS", e.FlowM3PerS);
+            json.WriteNumber("headM", e.HeadM);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
         json.WriteEndObject();
     }
 

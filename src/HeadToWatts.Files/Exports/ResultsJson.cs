@@ -69,6 +69,7 @@ public static class ResultsJson
         Water(json, r);
         Steps(json, r);
         MachineJson.Electrical(json, r);
+        MachineJson.Pump(json, r);
         Elements(json, r);
         json.WriteStartArray("netHeads");
         foreach (var p in r.Head.AtShares)
@@ -104,6 +105,7 @@ public static class ResultsJson
             json.WriteNumber("annualEnergyKwh", c.AnnualEnergyKwh);
             json.WriteNumber("leastFlowM3PerS", c.LeastFlowM3PerS);
             Nullable(json, "specificSpeedKwM", c.Speed?.SpecificSpeedKwM);
+            MachineJson.Sheet(json, r.Turbine.Sheets.FirstOrDefault(s => s.Candidate.Type.Id == c.Type.Id));
             json.WriteEndObject();
         }
 

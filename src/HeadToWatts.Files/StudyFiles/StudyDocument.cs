@@ -343,6 +343,28 @@ public sealed class TurbineDocument
 
     /// <summary>Least flow of a unit in percent of its design flow.</summary>
     public string? LeastFlow { get; set; }
+
+    /// <summary>Height of the runner above the lowest tailwater, a length; negative below it.</summary>
+    public string? RunnerHeight { get; set; }
+
+    /// <summary>Best point of the pump that is to run as turbine.</summary>
+    public PumpDocument? Pump { get; set; }
+}
+
+/// <summary>A pump's best point from its catalogue.</summary>
+public sealed class PumpDocument
+{
+    /// <summary>Flow.</summary>
+    public string? Flow { get; set; }
+
+    /// <summary>Head.</summary>
+    public string? Head { get; set; }
+
+    /// <summary>Efficiency there.</summary>
+    public string? Efficiency { get; set; }
+
+    /// <summary>Speed.</summary>
+    public string? Speed { get; set; }
 }
 
 /// <summary>A row of a manufacturer's table.</summary>

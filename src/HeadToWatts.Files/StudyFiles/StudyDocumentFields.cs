@@ -119,6 +119,8 @@ internal static class StudyDocumentFields
         Units = r.NumberText("units"),
         EfficiencyTable = r.Array("efficiencyTable", row => new EfficiencyRowDocument { Flow = row.Text("flow"), Efficiency = row.Text("efficiency") }),
         LeastFlow = r.Text("leastFlow"),
+        RunnerHeight = r.Text("runnerHeight"),
+        Pump = r.Object("pump", p => new PumpDocument { Flow = p.Text("flow"), Head = p.Text("head"), Efficiency = p.Text("efficiency"), Speed = p.Text("speed") }),
     };
 
     private static LossesDocument Losses(JsonObjectReader r) => new()

@@ -1,12 +1,19 @@
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Studies.Inputs;
 using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Files.StudyFiles;
 
 /// <summary>Builds the turbine of an alternative.</summary>
 internal static class TurbineBuilder
 {
+    private static PumpPoint Pump(PumpDocument d, string path, FieldReader read) => new(
+        read.Quantity(d.Flow, Dimension.Flow, path + ".flow", 1e-5, 20),
+        read.Quantity(d.Head, Dimension.Length, path + ".head", 0.5, 2000),
+        read.Quantity(d.Efficiency, Dimension.Ratio, path + ".efficiency", 0.2, 0.95),
+        read.Quantity(d.Speed, Dimension.RotationalSpeed, path + ".speed", 50, 6000));
+
     internal static TurbineInput Build(TurbineDocument d, string path, FieldReader read)
     {
         var type = FlowBuilder.IsSuggest(d.Type) ? null : read.Named(d.Type, path + ".type", TurbineTypes.Find, TurbineTypes.All.Select(t => t.Name).Prepend("suggest"));
@@ -25,6 +32,10 @@ internal static class TurbineBuilder
                 curve = made;
         }
 
-        return new TurbineInput(type, units, curve, least);
+        return new TurbineInput(type, units, curve, least)
+        {
+            RunnerHeightM = read.Optional(d.RunnerHeight, Dimension.Length, path + ".runnerHeight", -30, 30),
+            Pump = d.Pump is { } pump ? Pump(pump, path + ".pump", read) : null,
+        };
     }
 }

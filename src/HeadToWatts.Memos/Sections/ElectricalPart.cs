@@ -26,7 +26,7 @@ internal static class ElectricalPart
                 ? $"{UnitDisplay.Number(t.RatingKva)} kVA; no-load loss {UnitDisplay.Power(t.NoLoadLossKw)}, load loss {UnitDisplay.Power(t.LoadLossKw)}; {(train.Transformer!.StaysLive ? "live" : "off")} while the plant stands"
                 : $"{MemoContext.Percent(train.TransformerEfficiency)} at any load"),
             Row("At the meter", UnitDisplay.Power(found.AtBest.MeterKw), train.Line is { } line
-                ? $"{memo.Show.Length(line.LengthM)} of {line.Size.Name} {line.Metal.Name}, {(line.Phases == 3 ? "three phases" : "one phase")}, {UnitDisplay.Number(line.VoltageV)} V, {UnitDisplay.Number(found.LineCurrentA!.Value)} A; voltage rise by resistance alone {UnitDisplay.Percent(found.VoltageRiseRatio!.Value)}"
+                ? $"{memo.Show.Length(line.LengthM)} of {line.Size.Name} {line.Metal.Name}, {(line.Phases == 3 ? "three phases" : "one phase")}, {UnitDisplay.Number(line.VoltageV, 4)} V, {UnitDisplay.Number(found.LineCurrentA!.Value)} A; voltage rise by resistance alone {UnitDisplay.Percent(found.VoltageRiseRatio!.Value)}"
                 : $"{MemoContext.Percent(train.LineEfficiency)} at any load"),
         };
         body.Table("tab-electrical", "From the shaft to the meter at full power.", [new("Step", Share: 1), new("Power", ColumnAlign.Right, 0), new("By what", Share: 3)], rows,
@@ -44,7 +44,7 @@ internal static class ElectricalPart
             ? $"transformer{(t.RatingKva is { } kva ? $" of {UnitDisplay.Number(kva)} kVA" : " to suit")}, no-load loss {Loss(t.NoLoadLoss)}, load loss {Loss(t.LoadLoss)}, {(t.StaysLive ? "live" : "off")} while the plant stands"
             : "transformer " + MemoContext.Percent(train.TransformerEfficiency);
         var line = train.Line is { } l
-            ? $"line of {memo.Show.Length(l.LengthM)}, {UnitDisplay.Number(l.VoltageV)} V, {(l.Phases == 3 ? "three phases" : "one phase")}, {l.Size.Name} {l.Metal.Name} at {memo.Show.Temperature(l.TemperatureDegC)}"
+            ? $"line of {memo.Show.Length(l.LengthM)}, {UnitDisplay.Number(l.VoltageV, 4)} V, {(l.Phases == 3 ? "three phases" : "one phase")}, {l.Size.Name} {l.Metal.Name} at {memo.Show.Temperature(l.TemperatureDegC)}"
             : "line " + MemoContext.Percent(train.LineEfficiency);
         var factor = train.Transformer is null && train.Line is null ? "" : $"; power factor {UnitDisplay.Number(train.PowerFactor)}";
         return $"gear or belt {MemoContext.Percent(train.DriveEfficiency)}; {generator}; {transformer}; {line}{factor}";

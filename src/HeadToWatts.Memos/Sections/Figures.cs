@@ -22,5 +22,7 @@ internal static class Figures
 
     public static Drawing? Staircase(MemoContext memo) => EnergyStaircaseChart.Draw(memo.Result, Size);
 
+    public static Drawing? PumpBand(MemoContext memo) => PumpBandChart.Draw(memo.Result, memo.Show, Size with { Height = 240 });
+
     public static Drawing? Months(MemoContext memo) => MonthsChart.Draw(memo.Result, Size with { Height = 190 });
 }

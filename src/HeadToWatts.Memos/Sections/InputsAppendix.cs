@@ -58,6 +58,10 @@ internal static class InputsAppendix
         rows.Add(Row("Number of units", input.Turbine.UnitCount is { } units ? MemoContext.Count(units) : "to be suggested"));
         if (input.Turbine.LeastFlowRatio is { } least)
             rows.Add(Row("Least flow of a unit", MemoContext.Percent(least) + " of its full flow"));
+        if (input.Turbine.RunnerHeightM is { } runner)
+            rows.Add(Row("Runner above the lowest tailwater", memo.Show.Length(runner)));
+        if (input.Turbine.Pump is { } pump)
+            rows.Add(Row("Pump to run as turbine", $"{show.Flow(pump.FlowM3PerS)}, {show.Length(pump.HeadM)}, {MemoContext.Percent(pump.Efficiency)}, {UnitDisplay.Number(pump.SpeedRpm, 4)} rpm"));
         rows.Add(Row("Efficiency", input.Turbine.MakersCurve is null ? "typical of the type" : "manufacturer's table, printed in the section on turbines"));
         var train = input.Train;
         rows.Add(Row("Gear or belt; generator; transformer; line", ElectricalPart.Given(memo)));

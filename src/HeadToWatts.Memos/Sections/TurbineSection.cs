@@ -38,6 +38,7 @@ internal static class TurbineSection
             explained.Add(chosen);
         foreach (var candidate in explained)
             body.Say(RichText.Bold(MemoContext.Capital(candidate.Type.Name) + ". ") + string.Join(" ", TurbineWords.Reasons(candidate, show)) + " " + RichText.Italic("Against it: ") + candidate.Type.Limits);
+        MachinesPart.Write(memo);
         Efficiency(memo, chosen.Type);
     }
 

@@ -1,5 +1,6 @@
 using HeadToWatts.EnergyYield;
 using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Sizing;
 using HeadToWatts.Turbines.Units;
 
 namespace HeadToWatts.Studies.Results;
@@ -19,4 +20,14 @@ public sealed record TurbineResult(
     bool UnitCountIsSuggested,
     EfficiencyCurve Efficiency,
     bool EfficiencyIsMakers,
-    UnitSet Units);
+    UnitSet Units)
+{
+    /// <summary>Size, speed and setting of every type, in the order of the ranking.</summary>
+    public IReadOnlyList<MachineSheet> Sheets { get; init; } = [];
+
+    /// <summary>The sheet of the type the study runs on.</summary>
+    public MachineSheet? ChosenSheet => Sheets.FirstOrDefault(s => s.Candidate.Type.Id == Chosen.Type.Id);
+
+    /// <summary>What the correlations say of a pump as turbine; null where the fall gives no head.</summary>
+    public PumpBand? Pump { get; init; }
+}

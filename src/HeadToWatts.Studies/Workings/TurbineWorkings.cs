@@ -5,6 +5,8 @@ namespace HeadToWatts.Studies.Workings;
 
 internal static class TurbineWorkings
 {
+    private static string MemoSentence(string text) => text.Length == 0 ? "" : char.ToUpperInvariant(text[0]) + text[1..] + ".";
+
     internal static IEnumerable<Working> Of(StudyResult result, UnitDisplay show)
     {
         var turbine = result.Turbine;
@@ -27,6 +29,27 @@ internal static class TurbineWorkings
                 UnitDisplay.Number(speed.SpecificSpeedKwM),
                 speed.IsDirect ? $"Synchronous at {UnitDisplay.Number(result.Input.Site.FrequencyHz)} Hz with {speed.Poles} poles." : "Not a synchronous speed: geared or belted.",
                 [TurbineMethods.SpecificSpeedKwM]);
+        }
+
+        if (turbine.ChosenSheet is not { } sheet)
+            yield break;
+        if (sheet.Geometry is { } geometry)
+        {
+            yield return new Working(
+                "runner-size", StudyStage.Turbine, "Size of the runner", geometry.Use.Method.Formula,
+                $"{show.Flow(chosen.UnitFlowM3PerS)} and {show.Length(chosen.NetHeadM)} at {UnitDisplay.Number(chosen.Speed!.RunnerSpeedRpm)} rpm",
+                show.Diameter(geometry.DiameterM),
+                MemoSentence(MachineWords.Size(sheet, show)) + string.Concat(geometry.Doubts.Select(d => " " + d)), [geometry.Use.Method]);
+        }
+
+        if (sheet.Setting is { } setting)
+        {
+            yield return new Working(
+                "runner-setting", StudyStage.Turbine, "Highest setting of the runner", Turbines.Sizing.RunnerSetting.Highest.Formula,
+                $"{show.Length(setting.AirHeadM)} − {show.Length(setting.VapourHeadM)} − {UnitDisplay.Number(setting.ThomaSigma)} × {show.Length(chosen.NetHeadM)}",
+                show.Length(setting.HighestM),
+                $"Above the lowest tailwater; negative is below it. The coefficient is read at a specific speed of {UnitDisplay.Number(sheet.SpecificSpeedUsHpFt!.Value)} (rpm, hp, ft).",
+                [Turbines.Sizing.RunnerSetting.Highest, Turbines.Sizing.RunnerSetting.CriticalSigma]);
         }
     }
 }

@@ -1,3 +1,5 @@
+using HeadToWatts.Turbines.Sizing;
+
 namespace HeadToWatts.Turbines.Crossflow;
 
 /// <summary>Crossflow: a sheet of water that crosses a drum of blades twice; simple, forgiving, of moderate efficiency.</summary>
@@ -26,5 +28,8 @@ public static class CrossflowTurbine
             new(TurbineFigure.SpecificSpeed, TurbineReferences.TypicalSpecificSpeed, "20 to 200"),
             new(TurbineFigure.Runaway, TurbineReferences.TypicalRunaway, "1.8 to 2.0"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
-        ]);
+        ])
+    {
+        Sizing = new CrossflowSizing(),
+    };
 }

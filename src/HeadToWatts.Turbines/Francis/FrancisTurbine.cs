@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Turbines.Francis;
 
@@ -32,5 +33,9 @@ public static class FrancisTurbine
             new(TurbineFigure.SpecificSpeed, TurbineReferences.Britannica, "10 to 90 in hp and ft"),
             new(TurbineFigure.Runaway, TurbineReferences.RunawaySpeeds, "2.0 to 2.2"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
-        ]);
+        ])
+    {
+        Sizing = ReactionSizing.Francis,
+        CavitationTable = RunnerFlow.Mixed,
+    };
 }

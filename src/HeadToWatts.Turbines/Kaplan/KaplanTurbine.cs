@@ -1,3 +1,5 @@
+using HeadToWatts.Turbines.Sizing;
+
 namespace HeadToWatts.Turbines.Kaplan;
 
 /// <summary>Kaplan: axial flow with guide vanes and runner blades that both turn; low head, flow that varies.</summary>
@@ -26,5 +28,9 @@ public static class KaplanTurbine
             new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "300 to 1100 in metric hp"),
             new(TurbineFigure.Runaway, TurbineReferences.RunawaySpeeds, "2.5 to 3.0"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
-        ]);
+        ])
+    {
+        Sizing = ReactionSizing.Kaplan,
+        CavitationTable = RunnerFlow.Axial,
+    };
 }

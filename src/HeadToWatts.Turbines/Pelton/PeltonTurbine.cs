@@ -1,3 +1,5 @@
+using HeadToWatts.Turbines.Sizing;
+
 namespace HeadToWatts.Turbines.Pelton;
 
 /// <summary>Pelton: jets on the buckets of a wheel in air; high head, little flow.</summary>
@@ -27,5 +29,8 @@ public static class PeltonTurbine
             new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "4 to 70 in metric hp for the wheel, whatever its jets"),
             new(TurbineFigure.Runaway, TurbineReferences.RunawaySpeeds, "1.8 to 1.9"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
-        ]);
+        ])
+    {
+        Sizing = new JetWheelSizing(0.451, 9),
+    };
 }

@@ -1,3 +1,5 @@
+using HeadToWatts.Turbines.Sizing;
+
 namespace HeadToWatts.Turbines.Propeller;
 
 /// <summary>Propeller: axial flow through fixed blades; low head, steady flow.</summary>
@@ -26,5 +28,9 @@ public static class PropellerTurbine
             new(TurbineFigure.SpecificSpeed, TurbineReferences.SpecificSpeedRanges, "300 to 1100 in metric hp, that of the Kaplan"),
             new(TurbineFigure.Runaway, TurbineReferences.TypicalRunaway, "1.8 to 2.6"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
-        ]);
+        ])
+    {
+        Sizing = ReactionSizing.Kaplan,
+        CavitationTable = RunnerFlow.Axial,
+    };
 }

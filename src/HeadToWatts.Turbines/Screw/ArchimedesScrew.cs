@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Turbines.Screw;
 
@@ -37,6 +38,7 @@ public static class ArchimedesScrew
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
         ])
     {
+        Sizing = new ScrewSizing(),
         OwnSpeedRule = new ScrewSpeed(),
     };
 }

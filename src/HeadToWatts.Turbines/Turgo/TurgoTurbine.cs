@@ -1,4 +1,5 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Turbines.Turgo;
 
@@ -31,5 +32,8 @@ public static class TurgoTurbine
             new(TurbineFigure.SpecificSpeed, TurbineReferences.TypicalSpecificSpeed, "20 to 70 per jet, up to three jets"),
             new(TurbineFigure.Runaway, TurbineReferences.TypicalRunaway, "1.8 to 1.9"),
             new(TurbineFigure.Uses, TurbineReferences.TypicalUses, ""),
-        ]);
+        ])
+    {
+        Sizing = new JetWheelSizing(0.451, 4),
+    };
 }

@@ -21,6 +21,7 @@ public static partial class FieldNames
         ["length"] = "length", ["insideDiameter"] = "inside diameter", ["material"] = "material", ["roughness"] = "roughness", ["hazenWilliamsC"] = "Hazen-Williams C", ["manningN"] = "Manning n",
         ["fittings"] = "fitting", ["fitting"] = "kind", ["k"] = "K", ["count"] = "how many", ["wallThickness"] = "wall thickness", ["pressureRating"] = "pressure rating", ["endElevation"] = "elevation at its lower end",
         ["turbine"] = "turbine", ["type"] = "type", ["efficiencyTable"] = "efficiency row", ["efficiency"] = "efficiency", ["leastFlow"] = "least flow",
+        ["runnerHeight"] = "runner above the tailwater", ["pump"] = "pump", ["speed"] = "speed",
         ["losses"] = "from shaft to meter", ["drive"] = "gear or belt", ["generator"] = "generator", ["transformer"] = "transformer", ["line"] = "line", ["generatorDetail"] = "generator", ["transformerDetail"] = "transformer", ["lineDetail"] = "line", ["powerFactor"] = "power factor",
         ["kind"] = "kind", ["rating"] = "rating", ["noLoadLoss"] = "no-load loss", ["loadLoss"] = "load loss", ["whenStanding"] = "while the plant stands",
         ["voltage"] = "voltage", ["phases"] = "phases", ["conductor"] = "conductor", ["metal"] = "metal", ["temperature"] = "temperature", ["ownUse"] = "own use", ["availability"] = "availability",

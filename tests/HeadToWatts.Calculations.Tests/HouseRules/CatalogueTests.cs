@@ -7,6 +7,7 @@ using HeadToWatts.Hydraulics.Pipes;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Cautions;
 using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Calculations.Tests.HouseRules;
 
@@ -23,10 +24,13 @@ public class CatalogueTests
     public void Every_runner_speed_rule_belongs_to_a_turbine_type() => Listed<RunnerSpeedRule>(TurbineTypes.All.Where(t => t.OwnSpeedRule is not null).Select(t => t.OwnSpeedRule!));
 
     [Fact]
+    public void Every_rule_for_the_size_of_a_runner_belongs_to_a_turbine_type() => Listed<RunnerSizing>(TurbineTypes.All.Where(t => t.Sizing is not null).Select(t => t.Sizing!));
+
+    [Fact]
     public void Every_turbine_type_is_listed_and_every_folder_holds_one()
     {
         Assert.All(House.StaticsOf<TurbineType>(), t => Assert.Contains(t, TurbineTypes.All));
-        var folders = Directory.GetDirectories(Path.Combine(CheckValueFile.Root(), "src", "HeadToWatts.Turbines")).Select(d => Path.GetFileName(d)!).Where(d => d is not ("bin" or "obj" or "Units")).ToList();
+        var folders = Directory.GetDirectories(Path.Combine(CheckValueFile.Root(), "src", "HeadToWatts.Turbines")).Select(d => Path.GetFileName(d)!).Where(d => d is not ("bin" or "obj" or "Units" or "Sizing")).ToList();
         Assert.Equal(folders.Count, TurbineTypes.All.Count);
         foreach (var folder in folders)
         {

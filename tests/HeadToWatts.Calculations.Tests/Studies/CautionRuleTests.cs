@@ -5,6 +5,8 @@ using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Cautions;
 using HeadToWatts.Studies.Inputs;
+using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Sizing;
 
 namespace HeadToWatts.Calculations.Tests.Studies;
 
@@ -63,6 +65,12 @@ public class CautionRuleTests
         new("better-type", Quiet.WithType("crossflow"), "with crossflow", "would make"),
         new("typical-efficiency", Quiet, "not a guarantee", "not a guarantee") { Spares = Quiet.WithMakersEfficiency(0.88) },
         new("makers-efficiency", Quiet.WithMakersEfficiency(0.88), "manufacturer's table", "manufacturer's table"),
+        new("runner-too-high", Quiet with { Turbine = Quiet.Turbine with { RunnerHeightM = 9 } }, "is to stand 29.5 ft above the lowest tailwater", "is to stand 9.00 m above the lowest tailwater")
+            { Spares = Quiet with { Turbine = Quiet.Turbine with { RunnerHeightM = 0.5 } } },
+        new("runner-below-tailwater", Quiet.WithHead(25).WithType("propeller", 1), "below the lowest tailwater", "below the lowest tailwater"),
+        new("high-runaway", Quiet.WithHead(12).WithType("kaplan"), "up to 3.00 times its speed", "up to 3.00 times its speed"),
+        new("pump-scatter", Quiet.WithType("pump-as-turbine"), "put the pump to look for at flow", "put the pump to look for at flow"),
+        new("pump-scatter", Quiet.WithType("pump-as-turbine", 4) with { Turbine = new TurbineInput(TurbineTypes.Find("pump-as-turbine"), 4, null, null) { Pump = new PumpPoint(0.1, 30, 0.8, 1750) } }, "which lies outside the band even so", "put this pump's best point as turbine at flow"),
         new("drive-loss-forgotten", Quiet.WithHead(6).WithType("screw", 2).WithPipes(), "Gears and belts lose 2 to 5 %", "Gears and belts lose 2 to 5 %"),
         new("generator-overloaded", Quiet with { Train = Quiet.Train with { Generator = new GeneratorMachine(GeneratorKind.Synchronous, 300, null) } }, "on a generator of 300 kW", "on a generator of 300 kW")
             { Spares = Quiet with { Train = Quiet.Train with { Generator = new GeneratorMachine(GeneratorKind.Synchronous, null, null) } } },
