@@ -20,8 +20,8 @@ internal static class MachinesPart
             + body.Cite(RunnerSetting.Highest.Source) + " " + body.Cite(RunnerSetting.CriticalSigma.Source, "table 4") + ". Makers' figures decide.");
         body.Table("tab-machines", "Machines side by side, in the order of the ranking.",
             [
-                new("Type", Share: 1.6), new("At the meter, kW", ColumnAlign.Right, 0.5), new("Speed, rpm", ColumnAlign.Right, 0.5), new("Drive", Share: 0.5),
-                new("Runaway, rpm", ColumnAlign.Right, 0.5), new(MemoContext.Head("Runner", show.DiameterUnit), ColumnAlign.Right, 0.5), new("Highest setting", ColumnAlign.Right, 0.7), new("Against it here", Share: 2.6),
+                new("Type", Share: 1), new("Meter, kW", ColumnAlign.Right, 0), new("Speed, rpm", ColumnAlign.Right, 0), new("Drive", Share: 0),
+                new("Runaway, rpm", ColumnAlign.Right, 0), new(MemoContext.Head("Runner", show.DiameterUnit), ColumnAlign.Right, 0), new("Highest setting", ColumnAlign.Right, 0), new("Against it here", Share: 3),
             ],
             [.. turbine.Sheets.Select(s => new TableRow(
             [

@@ -11,7 +11,7 @@ public sealed class TurbineStageTests : Visitor
     public void Every_machine_stands_in_the_table_and_one_can_be_picked()
     {
         var page = Open(Put("larkspur-drop"), "turbine");
-        var rows = page.FindAll("table.machines tbody tr");
+        var rows = page.FindAll("table.machines tbody");
         Assert.Equal(9, rows.Count);
         var before = Session.Result!;
         var other = Session.Result!.Turbine.Ranking[1].Type;
