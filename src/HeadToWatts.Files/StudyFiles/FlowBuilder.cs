@@ -2,6 +2,7 @@ using HeadToWatts.Basis.Problems;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.FlowRecords.Quality;
+using HeadToWatts.FlowRecords.Reserved;
 using HeadToWatts.Studies.Inputs;
 
 namespace HeadToWatts.Files.StudyFiles;
@@ -34,15 +35,37 @@ internal static class FlowBuilder
         if (record is not null && record.ValidDaysIn(season) == 0)
             read.Refuse(path + ".season", d.Season, "no day of the record falls into the season with a flow", "a season that the record covers");
         var forSeason = RowsAreForSeason(d, path, season, hasRows, read);
-        var (reserved, stated) = Reserved(d.ReservedFlow, path + ".reservedFlow", read);
-        var monthly = ByMonth(d, path, record is not null || !hasRows, read);
-        var prior = read.Optional(d.PriorDeliveries, Dimension.Flow, path + ".priorDeliveries", 0, LargestFlowM3PerS) ?? 0;
         double? design = IsSuggest(d.DesignFlow) ? null : read.Optional(d.DesignFlow, Dimension.Flow, path + ".designFlow", 1e-5, LargestFlowM3PerS);
+        var loss = WaterRulesBuilder.Loss(d.LossToSite, path + ".lossToSite", read);
+        var atSite = record is null ? null : loss.At(record);
+        var yearCurve = curve is null || (forSeason && season.ShareOfYear < 1) ? null : loss.At(curve);
+        var rules = WaterRulesBuilder.Build(d, path, new FlowStatistics(atSite, yearCurve, position), loss, read);
+        var days = rules is null ? season : rules.SeasonWithin(season);
+        if (days is null)
+            read.Refuse(path + ".waterRight.season", d.WaterRight!.Season, "the right has no day within the season of operation", season.Describe());
+        else if (curve is not null && rules?.Right is not null && !days.Equals(season))
+            read.Refuse(path + ".waterRight.season", d.WaterRight!.Season, "rows of a curve know no days, so the right's days cannot be told from the rest", "a daily record, or rows and a season that count the days of the right only");
+        var byMonth = rules is null || days is null ? null : ByMonth(rules, days, d.ReservedByMonth is { Count: > 0 }, record is not null, path, read);
         if (read.Problems.Count > before)
             return null;
-        var byMonth = monthly?.Select(r => new WaterAllocation(r, prior)).ToList();
-        var allocation = byMonth is null ? new WaterAllocation(reserved, prior) : byMonth[MiddleMonth(season) - 1];
-        return new FlowInput(curve, forSeason, record, position, season, allocation, stated || monthly is not null || !string.IsNullOrWhiteSpace(d.PriorDeliveries), design, d.Source ?? "") { AllocationByMonth = byMonth };
+        var allocation = rules!.ForMonth(MiddleMonth(days!));
+        var stated = !string.IsNullOrWhiteSpace(d.ReservedFlow) || d.ReservedByMonth is { Count: > 0 } || rules.Deliveries.Count > 0 || !string.IsNullOrWhiteSpace(d.PriorDeliveries);
+        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules };
+    }
+
+    // Rules that change between the months of operation need days that have a month.
+    private static List<WaterAllocation>? ByMonth(WaterRules rules, OperatingSeason season, bool isByMonth, bool hasRecord, string path, FieldReader read)
+    {
+        var months = Enumerable.Range(1, 12).Select(rules.ForMonth).ToList();
+        var changes = Enumerable.Range(1, 12).Where(season.RunsInMonth).Select(m => months[m - 1]).Distinct().Count() > 1;
+        if ((changes || isByMonth) && !hasRecord)
+        {
+            var where = isByMonth ? ".reservedByMonth" : rules.Reserved.IsSameAllYear ? ".turnouts" : ".reservedFlow";
+            read.Refuse(path + where, "", "this changes from month to month, and rows of a curve know no months", "a daily record, or one figure for all months of operation");
+            return null;
+        }
+
+        return changes || isByMonth ? months : null;
     }
 
     // The middle one of the months in which the plant may run; July for a plant that runs all year.
@@ -50,29 +73,6 @@ internal static class FlowBuilder
     {
         var months = Enumerable.Range(1, 12).Where(season.RunsInMonth).ToList();
         return months.Count is 0 or 12 ? 7 : months[months.Count / 2];
-    }
-
-    private static List<ReservedFlow>? ByMonth(FlowDocument d, string path, bool hasRecord, FieldReader read)
-    {
-        if (d.ReservedByMonth is not { Count: > 0 } months)
-            return null;
-        if (!string.IsNullOrWhiteSpace(d.ReservedFlow))
-            read.Refuse(path + ".reservedByMonth", d.ReservedFlow, "reserved flow is given for the year and by month", "one of the two");
-        if (!hasRecord)
-            read.Refuse(path + ".reservedByMonth", "", "rows of a curve know no months", "a daily record, or one reserved flow for the year");
-        if (months.Count != 12)
-        {
-            read.Refuse(path + ".reservedByMonth", $"{months.Count} flows", "twelve flows are wanted, January first");
-            return null;
-        }
-
-        return [.. months.Select((text, i) =>
-        {
-            var where = $"{path}.reservedByMonth[{i}]";
-            if (string.IsNullOrWhiteSpace(text))
-                read.Refuse(where, text, "nothing is entered", "a flow, a percent of the flow arriving, or none");
-            return Reserved(text, where, read).Reserved;
-        })];
     }
 
     internal static bool IsSuggest(string? text) =>
@@ -177,16 +177,5 @@ internal static class FlowBuilder
                 read.Refuse(path + ".rowsAreFor", d.RowsAreFor, "this is not known", "season or year");
                 return false;
         }
-    }
-
-    private static (ReservedFlow Reserved, bool IsStated) Reserved(string? text, string where, FieldReader read)
-    {
-        if (string.IsNullOrWhiteSpace(text))
-            return (ReservedFlow.None, false);
-        if (text.Trim().Equals("none", StringComparison.OrdinalIgnoreCase))
-            return (ReservedFlow.None, true);
-        if (text.Contains('%', StringComparison.Ordinal))
-            return (ReservedFlow.PercentOfFlow(read.Optional(text, Dimension.Ratio, where, 0, 1) ?? 0), true);
-        return (ReservedFlow.Constant(read.Optional(text, Dimension.Flow, where, 0, LargestFlowM3PerS) ?? 0), true);
     }
 }

@@ -107,7 +107,10 @@ public sealed class FlowDocument
     /// <summary>Days of operation, as in "Apr 15 to Oct 15" or "all year".</summary>
     public string? Season { get; set; }
 
-    /// <summary>Reserved flow: a flow, a percent of the flow, or "none".</summary>
+    /// <summary>Loss between the gauge and the site: a percent of the flow, a flow, or both.</summary>
+    public string? LossToSite { get; set; }
+
+    /// <summary>Reserved flow: a flow, a percent of the flow with or without a floor, a level of Tennant's, a share of Q95 or 7Q10, or "none".</summary>
     public string? ReservedFlow { get; set; }
 
     /// <summary>Twelve reserved flows, January first, each as <see cref="ReservedFlow"/>, in place of one.</summary>
@@ -116,8 +119,37 @@ public sealed class FlowDocument
     /// <summary>Prior deliveries: a flow.</summary>
     public string? PriorDeliveries { get; set; }
 
+    /// <summary>Turnouts above the site, each with its flow and its months.</summary>
+    public List<TurnoutDocument>? Turnouts { get; set; }
+
+    /// <summary>The plant's right to water.</summary>
+    public WaterRightDocument? WaterRight { get; set; }
+
     /// <summary>Design flow of all units together, or "suggest".</summary>
     public string? DesignFlow { get; set; }
+}
+
+/// <summary>A turnout above the site, or another delivery that comes before the plant.</summary>
+public sealed class TurnoutDocument
+{
+    /// <summary>Whose, or which turnout.</summary>
+    public string? Name { get; set; }
+
+    /// <summary>Flow.</summary>
+    public string? Flow { get; set; }
+
+    /// <summary>Days on which it is taken, as in "Apr 1 to Sep 30"; all year when left out.</summary>
+    public string? Season { get; set; }
+}
+
+/// <summary>The plant's right to water.</summary>
+public sealed class WaterRightDocument
+{
+    /// <summary>The most the plant may take, a flow; no limit when left out.</summary>
+    public string? Rate { get; set; }
+
+    /// <summary>Days on which it may take it; all year when left out.</summary>
+    public string? Season { get; set; }
 }
 
 /// <summary>A row of a duration curve.</summary>

@@ -46,9 +46,12 @@ internal static class StudyDocumentFields
         Record = r.Object("record", Record),
         PlottingPosition = r.Text("plottingPosition"),
         Season = r.Text("season"),
+        LossToSite = r.Text("lossToSite"),
         ReservedFlow = r.Text("reservedFlow"),
         ReservedByMonth = r.Texts("reservedByMonth"),
         PriorDeliveries = r.Text("priorDeliveries"),
+        Turnouts = r.Array("turnouts", t => new TurnoutDocument { Name = t.Text("name"), Flow = t.Text("flow"), Season = t.Text("season") }),
+        WaterRight = r.Object("waterRight", w => new WaterRightDocument { Rate = w.Text("rate"), Season = w.Text("season") }),
         DesignFlow = r.Text("designFlow"),
     };
 

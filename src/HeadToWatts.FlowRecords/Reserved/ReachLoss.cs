@@ -36,7 +36,7 @@ public sealed record ReachLoss
         var flows = new double[gauge.DayCount];
         for (var i = 0; i < flows.Length; i++)
             flows[i] = SiteFlowM3PerS(gauge.Flows[i]);
-        return new DailyRecord(gauge.FirstDay, flows, $"{gauge.Description}; less {Describe()} between gauge and site");
+        return new DailyRecord(gauge.FirstDay, flows, $"{gauge.Description}; less {Describe()} between gauge and site") { Quality = gauge.Quality };
     }
 
     /// <summary>The curve at the site, with a point where the flow gives out.</summary>

@@ -87,7 +87,7 @@ public sealed record ProportionalReserved(double Ratio, double FloorM3PerS = 0) 
     public override ReservedFlow ReservedIn(int month) => _flow;
 }
 
-/// <summary>A flow for each month.</summary>
+/// <summary>A reserved flow for each month.</summary>
 public sealed record MonthlyReserved : ReservedRule
 {
     private readonly ReservedFlow[] _months;
@@ -96,22 +96,31 @@ public sealed record MonthlyReserved : ReservedRule
     /// <param name="flowsM3PerS">Twelve flows from January on, m3/s, zero or more.</param>
     /// <exception cref="ArgumentException">Not twelve flows.</exception>
     public MonthlyReserved(IReadOnlyList<double> flowsM3PerS)
+        : this((flowsM3PerS ?? throw new ArgumentNullException(nameof(flowsM3PerS))).Select(ReservedFlow.Constant))
     {
-        ArgumentNullException.ThrowIfNull(flowsM3PerS);
-        if (flowsM3PerS.Count != 12)
-            throw new ArgumentException("A rule by month has twelve flows.", nameof(flowsM3PerS));
-        _months = [.. flowsM3PerS.Select(ReservedFlow.Constant)];
-        FlowsM3PerS = [.. flowsM3PerS];
+    }
+
+    /// <summary>A rule of twelve reserved flows of any kind.</summary>
+    /// <param name="months">Twelve, from January on.</param>
+    /// <exception cref="ArgumentException">Not twelve.</exception>
+    public MonthlyReserved(IEnumerable<ReservedFlow> months)
+    {
+        ArgumentNullException.ThrowIfNull(months);
+        _months = [.. months];
+        if (_months.Length != 12)
+            throw new ArgumentException("A rule by month has twelve flows.", nameof(months));
     }
 
     /// <inheritdoc/>
     public override string KindId => "monthly";
 
-    /// <summary>The flows from January on, m3/s.</summary>
-    public IReadOnlyList<double> FlowsM3PerS { get; }
+    /// <summary>The reserved flows from January on.</summary>
+    public IReadOnlyList<ReservedFlow> Months => _months;
 
     /// <inheritdoc/>
-    public override string Describe() => $"by month, {Flow(FlowsM3PerS.Min())} to {Flow(FlowsM3PerS.Max())}";
+    public override string Describe() => _months.All(m => m.Ratio == 0)
+        ? $"by month, {Flow(_months.Min(m => m.FlowM3PerS))} to {Flow(_months.Max(m => m.FlowM3PerS))}"
+        : "by month";
 
     /// <inheritdoc/>
     public override ReservedFlow ReservedIn(int month)
@@ -121,10 +130,10 @@ public sealed record MonthlyReserved : ReservedRule
     }
 
     /// <inheritdoc/>
-    public bool Equals(MonthlyReserved? other) => other is not null && FlowsM3PerS.SequenceEqual(other.FlowsM3PerS);
+    public bool Equals(MonthlyReserved? other) => other is not null && _months.SequenceEqual(other._months);
 
     /// <inheritdoc/>
-    public override int GetHashCode() => FlowsM3PerS.Aggregate(0, HashCode.Combine);
+    public override int GetHashCode() => _months.Aggregate(0, HashCode.Combine);
 }
 
 /// <summary>Shares of the mean annual flow in two seasons, by Tennant or by the user's own shares.</summary>
@@ -163,6 +172,12 @@ public sealed record LowFlowReserved(string Statistic, double StatisticFlowM3Per
 
     /// <inheritdoc/>
     public override string KindId => "low-flow";
+
+    /// <summary>The methods behind the statistic, where it was reckoned from a record.</summary>
+    public IReadOnlyList<MethodUse> StatisticUses { get; init; } = [];
+
+    /// <inheritdoc/>
+    public override IReadOnlyList<MethodUse> Uses => StatisticUses;
 
     /// <inheritdoc/>
     public override string Describe() => (Ratio == 1 ? Statistic : $"{Percent(Ratio)} of {Statistic}") + $", {Flow(StatisticFlowM3PerS * Ratio)}";

@@ -1,7 +1,7 @@
 using HeadToWatts.Basis.Units;
-using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Memos.Content;
+using HeadToWatts.Studies;
 
 namespace HeadToWatts.Memos.Sections;
 
@@ -44,13 +44,11 @@ internal static class InputsAppendix
         if (flow.Record is not null)
             rows.Add(Row("Plotting position", flow.PlottingPosition.Name));
         rows.Add(Row("Season of operation", flow.Season.IsWholeYear ? "all year" : flow.Season.Describe()));
-        rows.Add(Row("Prior deliveries", show.Flow(flow.Allocation.PriorDeliveriesM3PerS)));
-        rows.Add(Row("Reserved flow", flow.Allocation.Reserved.Kind switch
-        {
-            ReservedFlowKind.Constant => show.Flow(flow.Allocation.Reserved.FlowM3PerS),
-            ReservedFlowKind.PercentOfFlow => MemoContext.Percent(flow.Allocation.Reserved.Ratio) + " of the flow arriving",
-            _ => flow.ReservedFlowIsStated ? "none" : "not stated",
-        }));
+        if (flow.Rules is { } rules && rules.Seepage != FlowRecords.Reserved.ReachLoss.None)
+            rows.Add(Row("Loss between gauge and site", WaterWords.Loss(rules.Seepage, show)));
+        rows.Add(Row("Delivered first", WaterWords.Deliveries(flow, show) is { Count: > 0 } first ? string.Join("; ", first) : "none"));
+        rows.Add(Row("Reserved flow", WaterWords.Reserved(flow, show)));
+        rows.Add(Row("Water right", WaterWords.Right(flow, show)));
         rows.Add(Row("Design flow", flow.DesignFlowM3PerS is { } design ? show.Flow(design) : "to be suggested"));
         rows.Add(Row("Friction formula", input.Waterway.Formula.Name));
         rows.Add(Row("Kinetic energy coefficient α", UnitDisplay.Number(input.Waterway.KineticEnergyCoefficient)));

@@ -1,5 +1,7 @@
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Reserved;
 using HeadToWatts.Memos.Content;
+using HeadToWatts.Studies;
 
 namespace HeadToWatts.Memos.Sections;
 
@@ -14,17 +16,19 @@ internal static class UsableWaterSection
         var result = memo.Result;
         var show = memo.Show;
         var input = result.Input.Flow;
-        var reserved = input.Allocation.Reserved;
         body.Section("Water that may be used", "water");
-        var rights = reserved.Kind switch
+        var rights = WaterWords.Reserved(input, show) switch
         {
-            ReservedFlowKind.Constant when reserved.FlowM3PerS > 0 => $"A reserved flow of {show.Flow(reserved.FlowM3PerS)} stays in the stream.",
-            ReservedFlowKind.PercentOfFlow => $"A reserved flow of {MemoContext.Percent(reserved.Ratio)} of what arrives stays in the stream.",
-            _ => input.ReservedFlowIsStated ? "No flow is reserved, as stated by the author." : "No reserved flow is stated; none is taken off.",
+            "not stated" => "No reserved flow is stated; none is taken off.",
+            "none, as stated" => "No flow is reserved, as stated by the author.",
+            var rule => $"What stays in the stream (the reserved flow): {rule}.",
         };
-        var prior = input.Allocation.PriorDeliveriesM3PerS > 0
-            ? $" Prior deliveries of {show.Flow(input.Allocation.PriorDeliveriesM3PerS)} come first."
-            : " No prior deliveries are stated.";
+        var deliveries = WaterWords.Deliveries(input, show);
+        var prior = deliveries.Count > 0 ? $" Others come first: {string.Join("; ", deliveries)}." : " No prior deliveries are stated.";
+        if (input.Rules is { Seepage: var loss } && loss != ReachLoss.None)
+            prior += $" Between gauge and site {WaterWords.Loss(loss, show)} is lost; all flows here are those at the site.";
+        if (input.Rules?.Right is not null)
+            prior += $" The water right: {WaterWords.Right(input, show)}; what lies beyond it stays in the stream and is counted as reserved.";
         var season = input.Season.IsWholeYear ? " The plant may run all year." : $" The plant may run from {input.Season.Describe()}: {MemoContext.Count(input.Season.DaysPerYear, "day", "days")} a year.";
         body.Say(rights + prior + season + " What is reserved comes off before the turbine's limit, never after.");
         body.Say($"The mean flow arriving over the year is {show.Flow(result.Flow.MeanFlowM3PerS)}, of which {show.Flow(result.Flow.MeanUsableFlowM3PerS)} may be used; there is some to use in {MemoContext.Percent(result.Flow.WetShareOfYear)} of the year. The design flow of {show.Flow(result.Flow.DesignFlowM3PerS)} is reached in {MemoContext.Percent(result.Flow.DesignFlowExceedance)} of the year. " + RichText.See("fig-fdc") + " and " + RichText.See("tab-exceedance") + " show the curve." + Position(memo));
@@ -43,7 +47,27 @@ internal static class UsableWaterSection
                 var split = input.Allocation.Split(flow);
                 return new TableRow([MemoContext.WholePercent(p), memo.Flow(flow), memo.Flow(split.PriorM3PerS), memo.Flow(split.ReservedM3PerS), memo.Flow(split.UsableM3PerS)]);
             })]);
-        body.Say("The water right itself (rate, dates, place of return) was not examined.", ParagraphKind.Note);
+        if (input.AllocationByMonth is { } months)
+            ByMonth(memo, months);
+        body.Say(
+            input.Rules?.Right is null
+                ? "No water right was given: the plant is taken to have the use of all that is left. A right's rate, dates and place of return must be settled before anything is built."
+                : "The water right is as the author gave it. Whether it covers power, and where the water must return, was not examined.",
+            ParagraphKind.Note);
+        if (input.Rules?.Reserved is TennantReserved or LowFlowReserved)
+            body.Say(RichText.Of("The rule of the reserved flow is a screening rule ") + Cited(memo) + "; the flow written in a permit governs, and agencies may ask for a study of the stream itself.", ParagraphKind.Note);
+    }
+
+    private static RichText Cited(MemoContext memo) =>
+        memo.Result.Input.Flow.Rules!.Uses is { Count: > 0 } uses ? memo.Body.Cite(uses[^1].Method.Source) : RichText.Of("(this study's own figure)");
+
+    private static void ByMonth(MemoContext memo, IReadOnlyList<WaterAllocation> months)
+    {
+        memo.Body.Table("tab-water-months", "What comes off by month.",
+            [new("Month"), new(MemoContext.Head("Delivered first", memo.Show.FlowUnit), ColumnAlign.Right), new("Reserved", Share: 2)],
+            [.. months.Select((a, i) => (a, Month: i + 1)).Where(x => memo.Result.Input.Flow.Season.RunsInMonth(x.Month)).Select(x => new TableRow([
+                System.Globalization.CultureInfo.InvariantCulture.DateTimeFormat.GetMonthName(x.Month), memo.Flow(x.a.PriorDeliveriesM3PerS), WaterWords.Amount(x.a.Reserved, memo.Show)]))]);
+        memo.Body.Say("The energy counts each month's own; the curve and the table of exceedance show the season's middle month.", ParagraphKind.Note);
     }
 
     private static RichText Position(MemoContext memo) => memo.Result.Input.Flow.Record is null

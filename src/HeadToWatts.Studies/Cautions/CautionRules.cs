@@ -11,6 +11,8 @@ public static class CautionRules
         new NoReservedFlow(),
         new AssumedInputs(),
         new ReservedByMonth(),
+        new ScreeningReserve(),
+        new RightBelowDesign(),
         new RecordUnderTenYears(),
         new MissingDays(),
         new NoRecord(),

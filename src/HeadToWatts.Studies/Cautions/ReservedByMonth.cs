@@ -2,7 +2,7 @@ using HeadToWatts.Basis.Units;
 
 namespace HeadToWatts.Studies.Cautions;
 
-/// <summary>A reserved flow that changes through the year.</summary>
+/// <summary>A reserved flow or deliveries that change through the year.</summary>
 internal sealed class ReservedByMonth() : CautionRule("reserved-by-month", StudyStage.Flow, Severity.Note, "Reserved flow by month", CautionSources.Esha)
 {
     public override string? Say(StudyResult result, UnitDisplay show)
@@ -11,6 +11,6 @@ internal sealed class ReservedByMonth() : CautionRule("reserved-by-month", Study
             return null;
         var flows = months.Where(m => m.Reserved.FlowM3PerS > 0).Select(m => m.Reserved.FlowM3PerS).ToList();
         var span = flows.Count == 0 ? "" : $" (up to {show.Flow(flows.Max())})";
-        return $"Reserved flow changes by month{span}. The energy counts each month's own; the duration chart shows the season's middle month.";
+        return $"What comes off before the plant changes by month{span}. The energy counts each month's own; the duration chart shows the season's middle month.";
     }
 }

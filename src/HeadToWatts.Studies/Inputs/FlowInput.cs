@@ -1,4 +1,5 @@
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Reserved;
 
 namespace HeadToWatts.Studies.Inputs;
 
@@ -25,6 +26,9 @@ public sealed record FlowInput(
 {
     /// <summary>Allocations by month, January first, where the reserved flow changes through the year; null where it does not. <see cref="Allocation"/> is then that of the season's middle month.</summary>
     public IReadOnlyList<WaterAllocation>? AllocationByMonth { get; init; }
+
+    /// <summary>The rules behind the allocations; null where only an allocation was given.</summary>
+    public WaterRules? Rules { get; init; }
 
     /// <summary>The allocation in a month.</summary>
     /// <param name="month">Month, 1 to 12.</param>

@@ -2,6 +2,8 @@ using System.Globalization;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Reserved;
+using HeadToWatts.Studies.Inputs;
 
 namespace HeadToWatts.Studies.Workings;
 
@@ -31,18 +33,12 @@ internal static class FlowWorkings
         }
 
         var split = input.Allocation.Split(flow.MeanFlowM3PerS);
-        var reserved = input.Allocation.Reserved;
-        var byMonth = input.AllocationByMonth is { } months
-            ? $" By month, January first: {string.Join(", ", months.Select(m => Amount(m.Reserved, show)))}. Chart and exceedance table show the season's middle month; the energy counts each month's own."
-            : "";
         yield return new Working(
-            "usable-flow", StudyStage.Flow, "Flow the plant may use", "Q_{use} = Q − Q_{prior} − Q_{res}",
+            "usable-flow", StudyStage.Flow, "Flow the plant may use", input.Allocation.RightRateM3PerS is null ? "Q_{use} = Q − Q_{prior} − Q_{res}" : "Q_{use} = min(Q − Q_{prior} − Q_{res}, Q_{right})",
             $"at the mean flow: {show.Flow(flow.MeanFlowM3PerS)} − {show.Flow(split.PriorM3PerS)} − {show.Flow(split.ReservedM3PerS)}",
             show.Flow(split.UsableM3PerS),
-            reserved.Kind == ReservedFlowKind.PercentOfFlow
-                ? $"Reserved: {UnitDisplay.Percent(reserved.Ratio)} of the flow arriving. Taken off before the turbine's limit." + byMonth
-                : "Taken off before the turbine's limit, never after." + byMonth,
-            []);
+            string.Join(" ", Notes(input, show)),
+            [.. input.Rules?.Uses.Select(u => u.Method) ?? []]);
 
         if (flow.DesignFlowIsSuggested)
         {
@@ -59,10 +55,17 @@ internal static class FlowWorkings
         }
     }
 
-    private static string Amount(ReservedFlow reserved, UnitDisplay show) => reserved.Kind switch
+    private static IEnumerable<string> Notes(FlowInput input, UnitDisplay show)
     {
-        ReservedFlowKind.PercentOfFlow => UnitDisplay.Percent(reserved.Ratio),
-        ReservedFlowKind.Constant => show.Flow(reserved.FlowM3PerS),
-        _ => "none",
-    };
+        yield return $"Reserved: {WaterWords.Reserved(input, show)}.";
+        if (WaterWords.Deliveries(input, show) is { Count: > 0 } deliveries)
+            yield return $"First: {string.Join("; ", deliveries)}.";
+        if (input.Rules?.Right is not null)
+            yield return $"Water right: {WaterWords.Right(input, show)}. What lies beyond it stays in the stream and counts as reserved.";
+        if (input.Rules is { Seepage: var loss } && loss != ReachLoss.None)
+            yield return $"Lost between gauge and site before all else: {WaterWords.Loss(loss, show)}.";
+        yield return "Taken off before the turbine's limit, never after.";
+        if (input.AllocationByMonth is not null)
+            yield return "Chart and exceedance table show the season's middle month; the energy counts each month's own.";
+    }
 }

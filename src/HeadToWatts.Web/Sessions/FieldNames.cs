@@ -12,7 +12,7 @@ public static partial class FieldNames
         ["site"] = "site", ["latitude"] = "latitude", ["elevation"] = "elevation", ["waterTemperature"] = "water temperature", ["gridFrequency"] = "grid frequency",
         ["flow"] = "flow", ["curve"] = "row", ["exceeded"] = "percent exceeded", ["rowsAreFor"] = "what the percentages count", ["beyondLastRow"] = "beyond the last row",
         ["record"] = "daily record", ["file"] = "file", ["unit"] = "unit", ["dateOrder"] = "order of day and month", ["column"] = "column", ["firstDay"] = "first day", ["days"] = "days",
-        ["plottingPosition"] = "plotting position", ["season"] = "season", ["reservedFlow"] = "reserved flow", ["priorDeliveries"] = "prior deliveries", ["designFlow"] = "design flow",
+        ["plottingPosition"] = "plotting position", ["season"] = "season", ["reservedFlow"] = "reserved flow", ["priorDeliveries"] = "prior deliveries", ["reservedByMonth"] = "reserved flow, month", ["lossToSite"] = "loss between gauge and site", ["turnouts"] = "turnout", ["waterRight"] = "water right", ["rate"] = "rate", ["designFlow"] = "design flow",
         ["head"] = "head", ["gross"] = "gross head", ["headwater"] = "headwater level", ["tailwater"] = "tailwater level",
         ["headwaterByMonth"] = "headwater, month", ["tailwaterByMonth"] = "tailwater, month", ["headwaterRating"] = "headwater, row", ["tailwaterRating"] = "tailwater, row", ["level"] = "level",
         ["headwaterCrest"] = "headwater crest", ["upstreamPressure"] = "upstream pressure", ["downstreamPressure"] = "downstream pressure", ["gaugeElevation"] = "gauge elevation", ["pressure"] = "pressure",

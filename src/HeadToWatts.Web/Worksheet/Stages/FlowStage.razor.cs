@@ -15,7 +15,6 @@ public sealed partial class FlowStage
     private static readonly Choice[] Positions = [.. PlottingPositions.All.Select(p => new Choice(p.Id, p.Name))];
     private static readonly Choice[] Beyond = [new("hold", "last flow holds"), new("dry", "no flow")];
     private static readonly Choice[] RowsFor = [new("", "the year"), new("year", "the whole year"), new("season", "the season only")];
-    private static readonly Choice[] ReservedAs = [new("", "not stated"), new("none", "none"), new("flow", "a flow"), new("percent", "% of the flow"), new("month", "by month")];
     private static readonly Choice[] FileUnits = [new("", "as the file says"), .. UnitTable.Of(Dimension.Flow).Select(u => new Choice(u.Symbol, u.Symbol))];
     private static readonly Choice[] DateOrders = [new("", "as the file shows"), new("month-day", "month first"), new("day-month", "day first")];
 
@@ -30,14 +29,6 @@ public sealed partial class FlowStage
 
     private string PositionFormula => FormulaPlain((PlottingPositions.Find(Doc.Flow.PlottingPosition ?? "") ?? PlottingPositions.Default).Method.Formula);
 
-    private string ReservedKind => Doc.Flow.ReservedByMonth is { Count: 12 } ? "month" : Doc.Flow.ReservedFlow?.Trim() switch
-    {
-        null or "" => "",
-        { } t when Same(t, "none") => "none",
-        { } t when t.Contains('%', StringComparison.Ordinal) => "percent",
-        _ => "flow",
-    };
-
     /// <inheritdoc/>
     public ValueTask DisposeAsync()
     {
@@ -49,19 +40,6 @@ public sealed partial class FlowStage
     private static bool Same(string? text, string word) => string.Equals(text?.Trim(), word, StringComparison.OrdinalIgnoreCase);
 
     private static string FormulaPlain(string formula) => Basis.Sources.FormulaText.Plain(formula);
-
-    private Task ChangeReserved(string kind) => Edit(() =>
-    {
-        var known = string.IsNullOrWhiteSpace(Doc.Flow.ReservedFlow) ? "none" : Doc.Flow.ReservedFlow;
-        Doc.Flow.ReservedByMonth = kind == "month" ? [.. Enumerable.Repeat(known, 12)] : null;
-        Doc.Flow.ReservedFlow = kind switch
-        {
-            "none" => "none",
-            "flow" => "0 " + Show.FlowUnit.Symbol,
-            "percent" => "10 %",
-            _ => null,
-        };
-    });
 
     // The rows that take the record's place are the record's own curve, so that the result stays.
     private Task RemoveRecord() => Edit(() =>
