@@ -1,5 +1,6 @@
 using HeadToWatts.Basis;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.FlowRecords.Statistics;
 
 namespace HeadToWatts.EnergyYield;
 
@@ -10,8 +11,8 @@ namespace HeadToWatts.EnergyYield;
 /// <param name="Days">Days of the record in the month that have a flow or lie outside the season; with none the month is not known and its energy stands at zero.</param>
 public sealed record MonthEnergy(int Month, double MeanEnergyKwh, double MeanFlowM3PerS, int Days);
 
-/// <summary>Energy of one calendar year of a record.</summary>
-/// <param name="Year">Calendar year.</param>
+/// <summary>Energy of one year of a record.</summary>
+/// <param name="Year">Calendar year, or the water or climate year by its name.</param>
 /// <param name="EnergyKwh">Energy of the days that have a flow, kWh.</param>
 /// <param name="Days">Days of the year that have a flow or lie outside the season.</param>
 /// <param name="IsWhole">True when these are at least 95 percent of the year's days.</param>
@@ -19,7 +20,7 @@ public sealed record YearEnergy(int Year, double EnergyKwh, int Days, bool IsWho
 
 /// <summary>The plant run on every day of a record: months and years. Days without a flow are left out, not read as zero.</summary>
 /// <param name="Months">Twelve months.</param>
-/// <param name="Years">The record's calendar years in order.</param>
+/// <param name="Years">The record's years in order.</param>
 /// <param name="MeanOfDaysKwh">Mean power of the season's days, over the season's share of 8760 h, kWh a year: the sum over the days that the duration curve must equal.</param>
 /// <param name="LongestStandstillDays">Longest run of successive days inside the season without power, days; a day without a flow ends no run and adds nothing.</param>
 /// <param name="StandstillFrom">First day of that run; null when the plant never stands.</param>
@@ -30,6 +31,12 @@ public sealed record DailyRun(
     int LongestStandstillDays,
     DateOnly? StandstillFrom)
 {
+    /// <summary>Energy of each day of the record at the meter, kWh; NaN for a day without a flow in the season.</summary>
+    public IReadOnlyList<double> EnergyOfDaysKwh { get; init; } = [];
+
+    /// <summary>Where the years begin.</summary>
+    public YearKind YearKind { get; init; } = YearKind.Calendar;
+
     private static readonly int[] DaysOfMonth = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
 
     /// <summary>Sum of the twelve months, kWh a year.</summary>
@@ -72,7 +79,8 @@ public sealed record DailyRun(
     /// <param name="record">Daily flows arriving.</param>
     /// <param name="season">Days on which the plant may run.</param>
     /// <param name="allocations">Prior deliveries and reserved flow in each month, January first.</param>
-    public static DailyRun Over(IReadOnlyList<PlantCurve> plants, DailyRecord record, OperatingSeason season, IReadOnlyList<WaterAllocation> allocations)
+    /// <param name="yearKind">Where years begin.</param>
+    public static DailyRun Over(IReadOnlyList<PlantCurve> plants, DailyRecord record, OperatingSeason season, IReadOnlyList<WaterAllocation> allocations, YearKind yearKind = YearKind.Calendar)
     {
         ArgumentNullException.ThrowIfNull(plants);
         ArgumentNullException.ThrowIfNull(record);
@@ -92,25 +100,32 @@ public sealed record DailyRun(
         }
 
         var flows = record.Flows;
+        var energies = new double[flows.Length];
         var day = record.FirstDay;
-        var (year, yearKwh, yearDays) = (day.Year, 0.0, 0);
+        var (year, yearKwh, yearDays) = (FlowRecords.Statistics.Years.Of(day, yearKind), 0.0, 0);
+        var next = FlowRecords.Statistics.Years.FirstDayOf(year + 1, yearKind);
         var seasonSum = 0.0;
         var seasonDays = 0;
         int run = 0, longest = 0;
         DateOnly runFrom = day, longestFrom = day;
         for (var i = 0; i < flows.Length; i++, day = day.AddDays(1))
         {
-            if (day.Year != year)
+            if (day == next)
             {
                 CloseYear();
-                (year, yearKwh, yearDays) = (day.Year, 0, 0);
+                (year, yearKwh, yearDays) = (year + 1, 0, 0);
+                next = FlowRecords.Statistics.Years.FirstDayOf(year + 1, yearKind);
             }
 
             // Outside the season the plant stands whatever was measured, so such a day is known even where the record has a gap;
             // computed inflows below zero count as no flow, as in the curve.
             var runs = season.Runs(day);
             if (runs && double.IsNaN(flows[i]))
+            {
+                energies[i] = double.NaN;
                 continue;
+            }
+
             var arriving = runs ? Math.Max(0, flows[i]) : 0;
             var month = day.Month - 1;
             if (!known[month].TryGetValue(arriving, out var powerKw))
@@ -138,6 +153,7 @@ public sealed record DailyRun(
             powerSum[month] += powerKw;
             flowSum[month] += arriving;
             days[month]++;
+            energies[i] = powerKw * 24;
             yearKwh += powerKw * 24;
             yearDays++;
         }
@@ -151,9 +167,9 @@ public sealed record DailyRun(
         }
 
         var meanOfDaysKwh = seasonDays == 0 ? 0 : seasonSum / seasonDays * season.ShareOfYear * PhysicalConstants.HoursPerYear;
-        return new DailyRun(months, years, meanOfDaysKwh, longest, longest > 0 ? longestFrom : null);
+        return new DailyRun(months, years, meanOfDaysKwh, longest, longest > 0 ? longestFrom : null) { EnergyOfDaysKwh = energies, YearKind = yearKind };
 
         void CloseYear() =>
-            years.Add(new YearEnergy(year, yearKwh, yearDays, yearDays >= 0.95 * (DateTime.IsLeapYear(year) ? 366 : 365)));
+            years.Add(new YearEnergy(year, yearKwh, yearDays, yearDays >= 0.95 * FlowRecords.Statistics.Years.DaysOf(year, yearKind)));
     }
 }

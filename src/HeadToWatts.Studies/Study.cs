@@ -44,7 +44,7 @@ public static class Study
         var year = YearOfParts.Make(input, design, supply);
         var plant = year.Representative;
         var annual = AnnualEnergy.Of(year.Parts);
-        var days = input.Flow.Record is { } record ? DailyRun.Over(year.PlantOfMonth, record, input.Flow.Season, year.AllocationOfMonth) : null;
+        var days = input.Flow.Record is { } record ? DailyRun.Over(year.PlantOfMonth, record, input.Flow.Season, year.AllocationOfMonth, input.Flow.YearKind) : null;
         var losses = waterway.At(designFlow, site);
         var highest = losses.Elements.Count == 0 ? 0 : losses.Elements.Max(e => e.VelocityMPerS);
         var surge = losses.Elements.Count == 0 ? null : SurgeScreening.Of(waterway, designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site);
@@ -88,7 +88,10 @@ public static class Study
                 input.Turbine.MakersCurve is not null,
                 choice.Units) { Sheets = MachineSheets.Of(choice.Ranking, site), Pump = MachineSheets.Pump(choice, input.Turbine) },
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant) },
-            StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply)));
+            StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply)))
+        {
+            Summary = RecordSummary.Of(input.Flow),
+        };
     }
 
     // The lowest flow the plant runs on: what its units need, or what there is at the dry end of the curve.

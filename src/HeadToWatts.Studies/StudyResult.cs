@@ -27,6 +27,9 @@ public sealed record StudyResult(
     EnergyResult Energy,
     IReadOnlyList<MethodUse> MethodsUsed)
 {
+    /// <summary>What the daily record tells beyond its duration curve; null without one.</summary>
+    public RecordSummary? Summary { get; init; }
+
     /// <summary>A display in the given family of units, with flow units that suit the study's size.</summary>
     public UnitDisplay Show(UnitSystem system) => UnitDisplay.For(system, Flow.DesignFlowM3PerS);
 

@@ -38,6 +38,11 @@ public static class AllDrawings
             ("months", MonthsChart.Draw(result, s)),
             ("pump band", PumpBandChart.Draw(Scenarios.AsPump(result), show, s)),
             ("staircase", EnergyStaircaseChart.Draw(result, s)),
+            ("hydrograph", HydrographChart.Draw(result, show, s)),
+            ("calendar of flow", DayCalendar.DrawFlow(result, s)),
+            ("calendar of energy", DayCalendar.DrawEnergy(result, s)),
+            ("curves of years", CurvesChart.DrawYears(result, show, s)),
+            ("curves of July", CurvesChart.DrawMonth(result, show, s, 7)),
             ("losses", LossShareChart.Draw(result, show, s)),
         };
         return [.. all.Where(d => d.Item2 is not null).Select(d => (d.Item1, d.Item2!))];

@@ -3,6 +3,7 @@ using HeadToWatts.Basis.Units;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.FlowRecords.Quality;
 using HeadToWatts.FlowRecords.Reserved;
+using HeadToWatts.FlowRecords.Statistics;
 using HeadToWatts.Studies.Inputs;
 
 namespace HeadToWatts.Files.StudyFiles;
@@ -22,6 +23,19 @@ internal static class FlowBuilder
         var position = PlottingPositions.Default;
         if (!string.IsNullOrWhiteSpace(d.PlottingPosition))
             position = read.Named(d.PlottingPosition, path + ".plottingPosition", PlottingPositions.Find, PlottingPositions.All.Select(p => p.Name)) ?? position;
+
+        var years = YearKind.Calendar;
+        switch (d.Years?.Trim().ToUpperInvariant())
+        {
+            case null or "" or "CALENDAR":
+                break;
+            case "WATER":
+                years = YearKind.Water;
+                break;
+            default:
+                read.Refuse(path + ".years", d.Years, "these years are not known", "calendar (from 1 January) or water (from 1 October)");
+                break;
+        }
 
         var hasRows = d.Curve is { Count: > 0 };
         if (hasRows == d.Record is not null)
@@ -50,7 +64,7 @@ internal static class FlowBuilder
             return null;
         var allocation = rules!.ForMonth(MiddleMonth(days!));
         var stated = !string.IsNullOrWhiteSpace(d.ReservedFlow) || d.ReservedByMonth is { Count: > 0 } || rules.Deliveries.Count > 0 || !string.IsNullOrWhiteSpace(d.PriorDeliveries);
-        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules };
+        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules, YearKind = years };
     }
 
     // Rules that change between the months of operation need days that have a month.

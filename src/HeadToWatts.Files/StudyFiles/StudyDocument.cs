@@ -104,6 +104,9 @@ public sealed class FlowDocument
     /// <summary>Name of the plotting position.</summary>
     public string? PlottingPosition { get; set; }
 
+    /// <summary>"calendar" or "water": where the years of a record begin.</summary>
+    public string? Years { get; set; }
+
     /// <summary>Days of operation, as in "Apr 15 to Oct 15" or "all year".</summary>
     public string? Season { get; set; }
 

@@ -45,6 +45,7 @@ internal static class StudyDocumentFields
         BeyondLastRow = r.Text("beyondLastRow"),
         Record = r.Object("record", Record),
         PlottingPosition = r.Text("plottingPosition"),
+        Years = r.Text("years"),
         Season = r.Text("season"),
         LossToSite = r.Text("lossToSite"),
         ReservedFlow = r.Text("reservedFlow"),

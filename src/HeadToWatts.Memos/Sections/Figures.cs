@@ -12,6 +12,17 @@ internal static class Figures
 
     public static Drawing FlowDuration(MemoContext memo) => FlowDurationChart.Draw(memo.Result, memo.Show, Size);
 
+    public static Drawing? Hydrograph(MemoContext memo) => HydrographChart.Draw(memo.Result, memo.Show, Size with { Height = 190 });
+
+    public static Drawing? Curves(MemoContext memo) => CurvesChart.DrawYears(memo.Result, memo.Show, Size);
+
+    public static Drawing? FlowCalendar(MemoContext memo) => DayCalendar.DrawFlow(memo.Result, Size with { Height = Years(memo) });
+
+    public static Drawing? EnergyCalendar(MemoContext memo) => DayCalendar.DrawEnergy(memo.Result, Size with { Height = Years(memo) });
+
+    // A line for each year wants some height to be told from the next.
+    private static double Years(MemoContext memo) => Math.Clamp(40 + (9 * (memo.Result.Summary?.Years.All.Count ?? 1)), 100, 420);
+
     public static Drawing Envelopes(MemoContext memo) => EnvelopeChart.Draw(memo.Result, memo.Show, Size with { Height = 290 });
 
     public static Drawing? DesignFlow(MemoContext memo) => DesignFlowChart.Draw(memo.Result, memo.Show, Size);

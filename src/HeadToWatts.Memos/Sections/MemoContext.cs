@@ -1,4 +1,5 @@
 using System.Globalization;
+using HeadToWatts.Basis.Sources;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Memos.Content;
 using HeadToWatts.Studies;
@@ -16,6 +17,9 @@ internal sealed class MemoContext(StudyResult result, UnitDisplay show)
     public MemoBuilder Body { get; } = new();
 
     public IReadOnlyList<Caution> Cautions { get; } = CautionRules.For(result, show);
+
+    /// <summary>Every method behind a figure of the memo, those of the record's summary among them.</summary>
+    public IReadOnlyList<MethodUse> Methods { get; } = MethodUse.Union([.. result.MethodsUsed, .. result.Summary?.Uses ?? []]);
 
     public bool GivesEnergy => Result.Energy.Annual.AnnualEnergyKwh > 0;
 

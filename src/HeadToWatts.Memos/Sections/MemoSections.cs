@@ -10,6 +10,7 @@ internal static class MemoSections
         ContentsSection.Write,
         SiteSection.Write,
         FlowDataSection.Write,
+        RecordSection.Write,
         UsableWaterSection.Write,
         HeadSection.Write,
         TurbineSection.Write,

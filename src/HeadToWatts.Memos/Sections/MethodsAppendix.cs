@@ -14,7 +14,7 @@ internal static class MethodsAppendix
         body.Say("Every published method behind the numbers, with the range its source states and the span over which it was used here. Leaving a range is a caution.");
         body.Table("tab-methods", "Methods used.",
             [new("Method", Share: 2), new("Formula", Share: 1), new("Stated range and span used", Share: 2), new("Source", ColumnAlign.Left, 0)],
-            [.. memo.Result.MethodsUsed.Select(u => new TableRow([u.Method.Name, RichText.Formula(u.Method.Formula), Ranges(u), body.Cite(u.Method.Source, u.Method.Locator.Length <= 16 ? u.Method.Locator : "")]))]);
+            [.. memo.Methods.Select(u => new TableRow([u.Method.Name, RichText.Formula(u.Method.Formula), Ranges(u), body.Cite(u.Method.Source, u.Method.Locator.Length <= 16 ? u.Method.Locator : "")]))]);
     }
 
     private static RichText Ranges(MethodUse use)

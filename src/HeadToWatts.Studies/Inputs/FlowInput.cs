@@ -1,5 +1,6 @@
 using HeadToWatts.FlowRecords;
 using HeadToWatts.FlowRecords.Reserved;
+using HeadToWatts.FlowRecords.Statistics;
 
 namespace HeadToWatts.Studies.Inputs;
 
@@ -26,6 +27,9 @@ public sealed record FlowInput(
 {
     /// <summary>Allocations by month, January first, where the reserved flow changes through the year; null where it does not. <see cref="Allocation"/> is then that of the season's middle month.</summary>
     public IReadOnlyList<WaterAllocation>? AllocationByMonth { get; init; }
+
+    /// <summary>Where the years begin in which a record is looked at.</summary>
+    public YearKind YearKind { get; init; } = YearKind.Calendar;
 
     /// <summary>The rules behind the allocations; null where only an allocation was given.</summary>
     public WaterRules? Rules { get; init; }

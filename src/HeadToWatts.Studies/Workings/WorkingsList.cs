@@ -15,6 +15,7 @@ public static class WorkingsList
         return
         [
             .. FlowWorkings.Of(result, show),
+            .. LowFlowWorkings.Of(result, show),
             .. HeadWorkings.Of(result, show),
             .. WaterwayWorkings.Of(result, show),
             .. TurbineWorkings.Of(result, show),

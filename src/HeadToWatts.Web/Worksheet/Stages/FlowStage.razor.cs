@@ -15,6 +15,7 @@ public sealed partial class FlowStage
     private static readonly Choice[] Positions = [.. PlottingPositions.All.Select(p => new Choice(p.Id, p.Name))];
     private static readonly Choice[] Beyond = [new("hold", "last flow holds"), new("dry", "no flow")];
     private static readonly Choice[] RowsFor = [new("", "the year"), new("year", "the whole year"), new("season", "the season only")];
+    private static readonly Choice[] YearKinds = [new("calendar", "1 January"), new("water", "1 October")];
     private static readonly Choice[] FileUnits = [new("", "as the file says"), .. UnitTable.Of(Dimension.Flow).Select(u => new Choice(u.Symbol, u.Symbol))];
     private static readonly Choice[] DateOrders = [new("", "as the file shows"), new("month-day", "month first"), new("day-month", "day first")];
 
@@ -48,7 +49,7 @@ public sealed partial class FlowStage
         var curve = Result?.Flow.Curve;
         double[] percents = [0, 5, 10, 20, 30, 40, 50, 60, 70, 80, 90, 95, 100];
         Doc.Flow.Record = null;
-        Doc.Flow.PlottingPosition = null;
+        Doc.Flow.PlottingPosition = Doc.Flow.Years = null;
         Doc.Flow.RowsAreFor = "year";
         Doc.Flow.Curve = curve is null
             ? []
