@@ -72,17 +72,21 @@ public sealed record PowerTrain(
             generatedKw = SquareLoss.OutputKw(drivenKw, loss * s * runningShare, loss * (1 - s) * loadSpread / (kw * kw));
         }
 
-        var sentKw = (generatedKw * (1 - OwnUseRatio)) - OwnUseKw;
-        var transformedKw = sentKw * TransformerEfficiency;
+        // A generator that draws because it cannot cover its own losses has no output to take a share of.
+        var sentKw = generatedKw - (Math.Max(0, generatedKw) * OwnUseRatio) - OwnUseKw;
+        var transformedKw = Passed(sentKw, TransformerEfficiency);
         if (Rated?.Transformer is { } transformer)
         {
             var full = PowerFactor * transformer.RatingKva;
             transformedKw = SquareLoss.OutputKw(sentKw, transformer.NoLoadLossKw, transformer.LoadLossKw / (full * full));
         }
 
-        var meterKw = Line is { } line ? SquareLoss.OutputKw(transformedKw, 0, line.PerKw(PowerFactor)) : transformedKw * LineEfficiency;
+        var meterKw = Line is { } line ? SquareLoss.OutputKw(transformedKw, 0, line.PerKw(PowerFactor)) : Passed(transformedKw, LineEfficiency);
         return new TrainPower(drivenKw, generatedKw, sentKw, transformedKw, meterKw);
     }
+
+    // What is drawn loses on its way in as what is sent does on its way out.
+    private static double Passed(double powerKw, double efficiency) => powerKw >= 0 ? powerKw * efficiency : powerKw / efficiency;
 
     /// <summary>Power at the meter from power at the shaft with all units running alike, kW. Below zero where the plant would use more than it makes; <see cref="PlantCurve"/> then keeps it standing.</summary>
     /// <param name="shaftPowerKw">Power at the turbine shaft, kW.</param>

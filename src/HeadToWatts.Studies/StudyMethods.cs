@@ -35,6 +35,7 @@ public static class StudyMethods
         }
 
         uses.Add(FlowRecordMethods.DurationCurve.Used());
+        uses.AddRange(input.Flow.Origin?.Uses ?? []);
         uses.AddRange(input.Flow.Rules?.Uses ?? []);
         uses.AddRange(waterway.UsesBetween(Math.Min(lowestFlowM3PerS, choice.DesignFlowM3PerS), choice.DesignFlowM3PerS, site));
         if (waterway.Elements.Count > 0)

@@ -21,4 +21,12 @@ internal static class Finding
     private static List<IElement> Labels<T>(IRenderedComponent<T> page, string label)
         where T : IComponent =>
         [.. page.FindAll("label").Where(l => l.TextContent.Trim() == label)];
+
+    /// <summary>Presses the button of a name. A redraw between finding and pressing gives the button another handler, so it is then found anew.</summary>
+    public static void Press<T>(this IRenderedComponent<T> page, string name)
+        where T : Microsoft.AspNetCore.Components.IComponent
+    {
+        page.WaitForState(() => page.FindAll("button").Any(b => b.TextContent.Trim() == name), TimeSpan.FromSeconds(10));
+        page.InvokeAsync(() => page.FindAll("button").Single(b => b.TextContent.Trim() == name).Click()).Wait(TimeSpan.FromSeconds(10));
+    }
 }

@@ -47,4 +47,7 @@ public enum Dimension
 
     /// <summary>Electrical apparent power; SI unit VA.</summary>
     ApparentPower,
+
+    /// <summary>Area; SI unit m2.</summary>
+    Area,
 }

@@ -77,6 +77,7 @@ public sealed class UnitDisplay
         Dimension.RotationalSpeed => UnitTable.RevolutionPerMinute,
         Dimension.Voltage => UnitTable.Kilovolt,
         Dimension.ApparentPower => UnitTable.KilovoltAmpere,
+        Dimension.Area => System == UnitSystem.US ? UnitTable.SquareMile : UnitTable.SquareKilometre,
         _ => throw new ArgumentOutOfRangeException(nameof(dimension)),
     };
 

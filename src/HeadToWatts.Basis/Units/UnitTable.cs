@@ -93,6 +93,12 @@ public static class UnitTable
     /// <summary>Kilovolt-amperes.</summary>
     public static readonly UnitOfMeasure KilovoltAmpere = Unit("kVA", Dimension.ApparentPower, 1e3);
 
+    /// <summary>Square kilometres.</summary>
+    public static readonly UnitOfMeasure SquareKilometre = Unit("km2", Dimension.Area, 1e6, "km²", "km^2", "sq km");
+
+    /// <summary>Square miles.</summary>
+    public static readonly UnitOfMeasure SquareMile = Unit("mi2", Dimension.Area, 1609.344 * 1609.344, "mi²", "mi^2", "sq mi");
+
     /// <summary>Hours.</summary>
     public static readonly UnitOfMeasure Hour = Unit("h", Dimension.Duration, 3600, "hour", "hours", "hr");
 
@@ -156,6 +162,11 @@ public static class UnitTable
         KilovoltAmpere,
         Unit("VA", Dimension.ApparentPower, 1),
         Unit("MVA", Dimension.ApparentPower, 1e6),
+        SquareKilometre,
+        Unit("m2", Dimension.Area, 1, "m²", "m^2"),
+        SquareMile,
+        Unit("ha", Dimension.Area, 1e4, "hectare", "hectares"),
+        Unit("acre", Dimension.Area, 43_560 * Foot * Foot, "acres", "ac"),
     ];
 
     private static readonly FrozenDictionary<Dimension, UnitOfMeasure[]> ByDimension =

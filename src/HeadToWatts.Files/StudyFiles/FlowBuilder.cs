@@ -38,14 +38,26 @@ internal static class FlowBuilder
         }
 
         var hasRows = d.Curve is { Count: > 0 };
-        if (hasRows == d.Record is not null)
+        string[] given = [.. new[] { (hasRows, "curve"), (d.Record is not null, "record"), (d.MonthlyMeans is { Count: > 0 }, "monthlyMeans"), (d.Schedule is { Count: > 0 }, "schedule") }.Where(g => g.Item1).Select(g => g.Item2)];
+        if (given.Length != 1)
         {
-            read.Refuse(path, "", hasRows ? "rows of a curve and a record are both given" : "no flow is given", "either curve (rows of exceeded and flow) or record");
+            read.Refuse(path, "", given.Length > 1 ? $"the flow is given more than once: {string.Join(" and ", given)}" : "no flow is given", "one of curve (rows of exceeded and flow), record, monthlyMeans, schedule");
             return null;
         }
 
         var curve = hasRows ? Curve(d, path, read) : null;
-        var record = d.Record is { } r ? Record(r, path + ".record", read, files) : null;
+        var made = d.MonthlyMeans is { Count: > 0 } ? TransferBuilder.Means(d, path, read) : d.Schedule is { Count: > 0 } ? TransferBuilder.Schedule(d, path, read) : null;
+        var record = d.Record is { } r ? Record(r, path + ".record", read, files) : made?.Record;
+        if (d.Record is not null && record is not null && TransferBuilder.Carry(d, record, path, read, files) is { } carried)
+        {
+            made = carried;
+            record = new DailyRecord(carried.Record.FirstDay, carried.Record.Flows.ToArray(), carried.Record.Description) { Quality = record.Quality };
+        }
+        else if (d.Record is null && (d.AreaRatio is not null || d.Neighbour is not null))
+        {
+            read.Refuse(path + (d.AreaRatio is not null ? ".areaRatio" : ".neighbour"), "", "only a daily record can be carried to the site", "a record");
+        }
+
         if (record is not null && record.ValidDaysIn(season) == 0)
             read.Refuse(path + ".season", d.Season, "no day of the record falls into the season with a flow", "a season that the record covers");
         var forSeason = RowsAreForSeason(d, path, season, hasRows, read);
@@ -64,7 +76,7 @@ internal static class FlowBuilder
             return null;
         var allocation = rules!.ForMonth(MiddleMonth(days!));
         var stated = !string.IsNullOrWhiteSpace(d.ReservedFlow) || d.ReservedByMonth is { Count: > 0 } || rules.Deliveries.Count > 0 || !string.IsNullOrWhiteSpace(d.PriorDeliveries);
-        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules, YearKind = years };
+        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules, YearKind = years, Origin = made is null ? null : FlowOrigin.Of(made) };
     }
 
     // Rules that change between the months of operation need days that have a month.
@@ -137,7 +149,7 @@ internal static class FlowBuilder
         return UnitTable.Find(Dimension.Flow, text[at..].Trim());
     }
 
-    private static DailyRecord? Record(RecordDocument d, string path, FieldReader read, IFlowFileSource files)
+    internal static DailyRecord? Record(RecordDocument d, string path, FieldReader read, IFlowFileSource files)
     {
         if (!string.IsNullOrWhiteSpace(d.File) == !string.IsNullOrWhiteSpace(d.Days))
         {

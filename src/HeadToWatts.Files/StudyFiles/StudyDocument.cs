@@ -101,6 +101,18 @@ public sealed class FlowDocument
     /// <summary>A daily record; none when rows are given.</summary>
     public RecordDocument? Record { get; set; }
 
+    /// <summary>Twelve mean flows, January first, in place of a record or rows.</summary>
+    public List<string?>? MonthlyMeans { get; set; }
+
+    /// <summary>A delivery schedule in place of a record or rows.</summary>
+    public List<DeliveryRowDocument>? Schedule { get; set; }
+
+    /// <summary>Carries the record from a gauge to the site by drainage area.</summary>
+    public AreaRatioDocument? AreaRatio { get; set; }
+
+    /// <summary>A longer record nearby, by which the record at the site is extended.</summary>
+    public RecordDocument? Neighbour { get; set; }
+
     /// <summary>Name of the plotting position.</summary>
     public string? PlottingPosition { get; set; }
 
@@ -130,6 +142,29 @@ public sealed class FlowDocument
 
     /// <summary>Design flow of all units together, or "suggest".</summary>
     public string? DesignFlow { get; set; }
+}
+
+/// <summary>A line of a delivery schedule.</summary>
+public sealed class DeliveryRowDocument
+{
+    /// <summary>The days, as in "Apr 15 to May 31".</summary>
+    public string? Days { get; set; }
+
+    /// <summary>Flow on these days.</summary>
+    public string? Flow { get; set; }
+}
+
+/// <summary>Drainage areas of a gauge and of the site.</summary>
+public sealed class AreaRatioDocument
+{
+    /// <summary>Drainage area of the gauge.</summary>
+    public string? GaugeArea { get; set; }
+
+    /// <summary>Drainage area of the site.</summary>
+    public string? SiteArea { get; set; }
+
+    /// <summary>Exponent of the ratio of areas; 1 when left out.</summary>
+    public string? Exponent { get; set; }
 }
 
 /// <summary>A turnout above the site, or another delivery that comes before the plant.</summary>

@@ -64,6 +64,8 @@ internal static class AnswerSection
         var text = RichText.Bold("Energy. ") + $"{UnitDisplay.Energy(annual.AnnualEnergyKwh)} in a mean year, a plant factor of {UnitDisplay.Percent(annual.PlantFactor)}.";
         if (memo.Result.Energy.WithHeadError is { } range)
             text += $" The head's error alone makes it {UnitDisplay.Energy(range.LowKwh)} to {UnitDisplay.Energy(range.HighKwh)}.";
+        if (memo.Result.Input.Flow.Origin is { } origin)
+            return text + $" The flow behind it was {origin.Reason}: confidence {origin.Grade}.";
         if (memo.Result.Energy.Days is not { } days)
             return text + " A duration curve alone does not say what a dry year gives.";
         return DryYear(memo) is { } dry

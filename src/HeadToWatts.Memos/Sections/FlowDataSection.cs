@@ -13,15 +13,28 @@ internal static class FlowDataSection
         body.Section("Flow data and their quality", "flow-data");
         var source = MemoContext.OrElse(flow.SourceDescription, flow.Record?.Description is { Length: > 0 } description ? description : "");
         body.Say(source.Length > 0 ? RichText.Of("Source, in the author's words: ") + RichText.Italic(source) : "The author states no source for the flows.");
+        if (flow.Origin is { } origin)
+            Origin(memo, origin);
         if (flow.Record is { } record)
             Record(memo, record);
         else if (flow.TypedCurve is { } curve)
             Typed(memo, curve);
     }
 
+    private static void Origin(MemoContext memo, HeadToWatts.Studies.Inputs.FlowOrigin origin)
+    {
+        var body = memo.Body;
+        var text = RichText.Bold("Not measured at the site. ") + $"The flow was {origin.Reason}. Confidence: {origin.Grade}.";
+        if (origin.Uses.Count > 0)
+            text = text + " Method: " + string.Join("; ", origin.Uses.Select(u => u.Method.Name)) + " " + body.Cite(origin.Uses[0].Method.Source) + ".";
+        body.Say(text, keepWithNext: true);
+        body.Add(ListBlock.Bullets([.. origin.Notes.Select(n => RichText.Of(MemoContext.Sentence(n)))]));
+    }
+
     private static void Record(MemoContext memo, DailyRecord record)
     {
         var show = memo.Show;
+        var flow = memo.Result.Input.Flow;
         var missing = record.DayCount == 0 ? 0 : (double)record.MissingCount / record.DayCount;
         memo.Body.Table("tab-record", "The record.", [new("What"), new("Found"), new("What was done about it", Share: 2)],
         [
@@ -33,7 +46,7 @@ internal static class FlowDataSection
             Row("Days of negative flow", MemoContext.Count(record.NegativeCount), record.NegativeCount == 0 ? "nothing to do" : "counted as no flow"),
             Row("Least, mean, most", $"{show.Flow(record.SmallestM3PerS)}, {show.Flow(record.MeanM3PerS)}, {show.Flow(record.LargestM3PerS)}", "as read"),
         ]);
-        memo.Body.Say("No day was estimated here. Whether the station estimated some, and how well its rating holds, must be asked of its owner. Flow measured upstream of turnouts is not the flow at a drop below them.", ParagraphKind.Note);
+        memo.Body.Say((flow.Origin is null ? "No day was estimated here. " : "") + "Whether the station estimated some, and how well its rating holds, must be asked of its owner. Flow measured upstream of turnouts is not the flow at a drop below them.", ParagraphKind.Note);
     }
 
     private static void Typed(MemoContext memo, FlowDurationCurve curve)

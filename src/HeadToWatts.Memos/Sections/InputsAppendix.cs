@@ -41,6 +41,8 @@ internal static class InputsAppendix
 
         var flow = input.Flow;
         rows.Add(Row("Flow", TitleSection.Period(memo)));
+        if (flow.Origin is { } origin)
+            rows.Add(Row("How the flow came about", MemoContext.Sentence($"{origin.Reason}; {string.Join("; ", origin.Notes)}")));
         if (flow.Record is not null)
             rows.Add(Row("Plotting position", flow.PlottingPosition.Name));
         rows.Add(Row("Season of operation", flow.Season.IsWholeYear ? "all year" : flow.Season.Describe()));

@@ -10,6 +10,7 @@ public static class CautionRules
     [
         new NoReservedFlow(),
         new AssumedInputs(),
+        new FlowNotMeasured(),
         new ReservedByMonth(),
         new ScreeningReserve(),
         new RightBelowDesign(),

@@ -32,6 +32,13 @@ internal static class FlowWorkings
                 $"mean {show.Flow(flow.MeanFlowM3PerS)}", "", [FlowRecordMethods.DurationCurve]);
         }
 
+        if (input.Origin is { } origin)
+        {
+            yield return new Working(
+                "flow-origin", StudyStage.Flow, "Flow carried to the site", origin.Uses.Count > 0 ? origin.Uses[0].Method.Formula : "Q(t) as stated",
+                string.Join("; ", origin.Notes), $"mean {show.Flow(flow.MeanFlowM3PerS)}", $"The flow was {origin.Reason}. Confidence: {origin.Grade}.", [.. origin.Uses.Select(u => u.Method)]);
+        }
+
         var split = input.Allocation.Split(flow.MeanFlowM3PerS);
         yield return new Working(
             "usable-flow", StudyStage.Flow, "Flow the plant may use", input.Allocation.RightRateM3PerS is null ? "Q_{use} = Q − Q_{prior} − Q_{res}" : "Q_{use} = min(Q − Q_{prior} − Q_{res}, Q_{right})",

@@ -49,6 +49,7 @@ public static class AnswerFigures
         var (value, unit) = UnitDisplay.EnergyParts(kwh);
         var note = result.Energy.Days switch
         {
+            { } when result.Input.Flow.Origin is { } origin => $"flow not measured: {origin.Grade}",
             { DryYearKwh: { } dry } => $"{UnitDisplay.Energy(dry)} in a dry year",
             { } => "dry year needs 10 years",
             null => "dry year needs a record",

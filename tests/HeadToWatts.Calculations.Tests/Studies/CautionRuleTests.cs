@@ -2,6 +2,7 @@ using HeadToWatts.Basis.Units;
 using HeadToWatts.EnergyYield.Electrical;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.FlowRecords.Reserved;
+using HeadToWatts.FlowRecords.Transfer;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Cautions;
@@ -27,6 +28,7 @@ public class CautionRuleTests
         new("no-reserved-flow", Quiet.WithFlow(f => f with { ReservedFlowIsStated = false }), "even if it is zero", "even if it is zero"),
         new("assumed-inputs", Quiet with { Assumptions = ["The latitude is taken as 45 deg."] }, "The latitude is taken as 45 deg.", "The latitude is taken as 45 deg."),
         new("reserved-by-month", Quiet.WithFlow(f => f with { AllocationByMonth = [.. Enumerable.Range(1, 12).Select(m => new WaterAllocation(ReservedFlow.Constant(m == 5 ? 0.5 : 0.1), 0))] }), "up to 17.7 cfs", "up to 0.500 m3/s"),
+        new("flow-not-measured", Quiet.WithFlow(f => f with { Origin = new FlowOrigin(FlowConfidence.Low, "made of monthly means", [], []) }), "The flow was made of monthly means (confidence: low)", "The flow was made of monthly means (confidence: low)"),
         new("screening-reserve", Quiet.WithFlow(f => f with { Rules = WaterRules.None with { Reserved = new LowFlowReserved("Q95", 0.5, 0.7) } }), "70.0 % of Q95, 12.4 cfs", "70.0 % of Q95, 0.350 m3/s")
             { Spares = Quiet.WithFlow(f => f with { Rules = WaterRules.None with { Reserved = new ConstantReserved(0.1) } }) },
         new("right-below-design", Quiet.WithFlow(f => f with { Rules = WaterRules.None with { Right = new WaterRight(1.5, OperatingSeason.WholeYear) } }), "allows 53.0 cfs, less than the design flow of 63.6 cfs", "allows 1.50 m3/s, less than the design flow of 1.80 m3/s")

@@ -34,11 +34,11 @@ public sealed class TurbineStageTests : Visitor
         var page = Open(Put("tamarack-pipeline"), "turbine");
         page.FindByLabel("Type").Change("pump-as-turbine");
         page.WaitForAssertion(() => Assert.Contains("The pump to look for", page.Markup, StringComparison.Ordinal), Patience);
-        page.FindAll("button").Single(b => b.TextContent == "Enter a pump's catalogue point").Click();
+        page.Press("Enter a pump's catalogue point");
         page.WaitForAssertion(() => Assert.NotNull(Session.Result!.Turbine.Pump!.Pump), Patience);
         Assert.Empty(Session.Problems);
         Assert.True(Session.Result!.Turbine.Pump!.HoldsSite);
-        page.FindAll("button").Single(b => b.TextContent == "Forget this pump").Click();
+        page.Press("Forget this pump");
         page.WaitForAssertion(() => Assert.Null(Session.Result!.Turbine.Pump!.Pump), Patience);
     }
 }

@@ -15,6 +15,8 @@ public sealed partial class FlowStage
     private static readonly Choice[] Positions = [.. PlottingPositions.All.Select(p => new Choice(p.Id, p.Name))];
     private static readonly Choice[] Beyond = [new("hold", "last flow holds"), new("dry", "no flow")];
     private static readonly Choice[] RowsFor = [new("", "the year"), new("year", "the whole year"), new("season", "the season only")];
+    private const string FlowFileKinds = ".csv,.txt,.tsv,.rdb,.json,.dat,.day,.mon,.prn,.asc,.cmd,text/*,application/json";
+    private static readonly Choice[] GivenAs = [new("rows", "percent exceeded"), new("means", "monthly means"), new("plan", "a delivery schedule")];
     private static readonly Choice[] YearKinds = [new("calendar", "1 January"), new("water", "1 October")];
     private static readonly Choice[] FileUnits = [new("", "as the file says"), .. UnitTable.Of(Dimension.Flow).Select(u => new Choice(u.Symbol, u.Symbol))];
     private static readonly Choice[] DateOrders = [new("", "as the file shows"), new("month-day", "month first"), new("day-month", "day first")];
@@ -48,7 +50,8 @@ public sealed partial class FlowStage
         var unit = Show.FlowUnit;
         var curve = Result?.Flow.Curve;
         double[] percents = [0, 5, 10, 20, 30, 40, 50, 60, 70, 80, 90, 95, 100];
-        Doc.Flow.Record = null;
+        Doc.Flow.Record = Doc.Flow.Neighbour = null;
+        Doc.Flow.AreaRatio = null;
         Doc.Flow.PlottingPosition = Doc.Flow.Years = null;
         Doc.Flow.RowsAreFor = "year";
         Doc.Flow.Curve = curve is null
@@ -56,12 +59,37 @@ public sealed partial class FlowStage
             : [.. percents.Select(p => new CurveRowDocument { Exceeded = FieldText.Round(p) + " %", Flow = FieldText.Round(unit.FromHeld(curve.FlowAt(p / 100)), 4) + " " + unit.Symbol })];
     });
 
+    private string Given => Doc.Flow.MonthlyMeans is not null ? "means" : Doc.Flow.Schedule is not null ? "plan" : "rows";
+
+    // What is known goes over into the new way of giving the flow, as far as it can.
+    private Task ChangeGiven(string given) => Edit(() =>
+    {
+        var unit = Show.FlowUnit;
+        var mean = Result is null ? null : FieldText.Round(unit.FromHeld(Result.Flow.MeanFlowM3PerS), 3) + " " + unit.Symbol;
+        Doc.Flow.MonthlyMeans = given == "means" ? [.. Enumerable.Repeat(mean, 12)] : null;
+        Doc.Flow.Schedule = given == "plan" ? [new DeliveryRowDocument { Days = "Apr 15 to Oct 15", Flow = mean }] : null;
+        Doc.Flow.Curve = given == "rows" ? [new CurveRowDocument { Exceeded = "0 %", Flow = mean }, new CurveRowDocument { Exceeded = "100 %", Flow = mean }] : null;
+        Doc.Flow.RowsAreFor = Doc.Flow.BeyondLastRow = null;
+    });
+
     private void Stop() => _reading?.Cancel();
 
-    private async Task OpenAsync(InputFileChangeEventArgs chosen)
+    private Task OpenAsync(InputFileChangeEventArgs chosen) => OpenAsync(chosen, TakeAsync);
+
+    private Task OpenNeighbourAsync(InputFileChangeEventArgs chosen) => OpenAsync(chosen, TakeNeighbourAsync);
+
+    private async Task TakeNeighbourAsync(string name, FlowFile flow)
+    {
+        if (flow.Record is { } record)
+            await Edit(() => Doc.Flow.Neighbour = RecordText.Write(record, flow.Report.Unit));
+        else
+            (_problemTitle, _problems) = ($"{name} was not taken; the study is as it was", [new Problem(name, "a flow-duration curve", "a neighbour must be a daily record, so that days in common can be found", "a record of days")]);
+    }
+
+    private async Task OpenAsync(InputFileChangeEventArgs chosen, Func<string, FlowFile, Task> take)
     {
         var file = chosen.File;
-        await ReadingAsync(file.Name, async cancel =>
+        await ReadingAsync(file.Name, take, async cancel =>
         {
             if (file.Size > LargestFlowFileBytes)
                 return Checked.Refused<FlowFile>(new Problem(file.Name, $"{file.Size / 1048576.0:0.0} MB", "a flow file is at most 64 MB", "a shorter record"));
@@ -70,7 +98,7 @@ public sealed partial class FlowStage
         });
     }
 
-    private async Task ReadingAsync(string name, Func<CancellationToken, Task<Checked<FlowFile>>> read)
+    private async Task ReadingAsync(string name, Func<string, FlowFile, Task> take, Func<CancellationToken, Task<Checked<FlowFile>>> read)
     {
         (_busy, _problems, _report) = (true, [], []);
         _reading?.Dispose();
@@ -82,7 +110,7 @@ public sealed partial class FlowStage
             if (reading.TryGet(out var flow))
             {
                 _report = flow.Report.Lines();
-                await TakeAsync(name, flow);
+                await take(name, flow);
             }
             else
             {
@@ -115,11 +143,16 @@ public sealed partial class FlowStage
         {
             Doc.Flow.Record = RecordText.Write(record, unit);
             Doc.Flow.Curve = null;
+            Doc.Flow.MonthlyMeans = null;
+            Doc.Flow.Schedule = null;
             Doc.Flow.RowsAreFor = Doc.Flow.BeyondLastRow = null;
         }
         else if (flow.Curve is { } curve)
         {
-            Doc.Flow.Record = null;
+            Doc.Flow.Record = Doc.Flow.Neighbour = null;
+            Doc.Flow.AreaRatio = null;
+            Doc.Flow.MonthlyMeans = null;
+            Doc.Flow.Schedule = null;
             Doc.Flow.PlottingPosition = null;
             Doc.Flow.Curve = CurveRows.Write(curve.Rows, unit);
         }

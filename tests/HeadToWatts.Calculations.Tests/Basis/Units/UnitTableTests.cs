@@ -61,6 +61,11 @@ public class UnitTableTests
         ["VA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Voltampere).Voltamperes, 1e-12),
         ["kVA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Kilovoltampere).Voltamperes, 1e-12),
         ["MVA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Megavoltampere).Voltamperes, 1e-12),
+        ["m2"] = (UnitsNet.Area.From(1, AreaUnit.SquareMeter).SquareMeters, 1e-12),
+        ["km2"] = (UnitsNet.Area.From(1, AreaUnit.SquareKilometer).SquareMeters, 1e-12),
+        ["mi2"] = (UnitsNet.Area.From(1, AreaUnit.SquareMile).SquareMeters, 1e-8),
+        ["ha"] = (UnitsNet.Area.From(1, AreaUnit.Hectare).SquareMeters, 1e-12),
+        ["acre"] = (UnitsNet.Area.From(1, AreaUnit.Acre).SquareMeters, 1e-5),
         ["rpm"] = (UnitsNet.RotationalSpeed.From(1, RotationalSpeedUnit.RevolutionPerMinute).RevolutionsPerMinute, 1e-12),
     };
 
