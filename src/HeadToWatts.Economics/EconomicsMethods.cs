@@ -1,4 +1,6 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Economics.CashFlows;
+using HeadToWatts.Economics.Costs;
 
 namespace HeadToWatts.Economics;
 
@@ -6,5 +8,9 @@ namespace HeadToWatts.Economics;
 public static class EconomicsMethods
 {
     /// <summary>Every method of this stage.</summary>
-    public static IReadOnlyList<Method> All { get; } = [];
+    public static IReadOnlyList<Method> All { get; } =
+    [
+        .. CostMethods.All,
+        .. CashFlowMethods.All,
+    ];
 }

@@ -11,6 +11,7 @@ public partial class NamingTests
     [
         "M3PerS", "M2PerS", "MPerS2", "MPerS", "KgPerM3", "NPerM3", "KnPerM3", "JPerKg", "PaS", "DegC", "Kwh", "Kw", "KwM", "W", "Pa", "Rad", "Rpm", "Hz",
         "M", "M2", "M3", "Km2", "S", "Metres", "Hours", "Years", "Ft", "UsHp", "MetricHp", "MetricHpM", "UsHpFt", "Decades", "DecadesOutside", "V", "A", "Ohm", "Kva", "Mm", "Mm2",
+        "Amount", // of money, in the currency and price year of the basis beside it
     ];
 
     [Fact]
