@@ -145,6 +145,6 @@ public class CashFlowTests
         Assert.Throws<ArgumentOutOfRangeException>(() => CashFlow.Of(Plans.Plain with { CapitalAmount = double.NaN }));
         Assert.Throws<ArgumentException>(() => Depreciation.Given([0.7, 0.7]));
         Assert.Null(CashFlowMeasures.Payback([-100, 10, 10], 0));
-        Assert.Equal(0, RateOfReturn.Of([-1.0, -2, -3]).Rates.Count);
+        Assert.Empty(RateOfReturn.Of([-1.0, -2, -3]).Rates);
     }
 }
