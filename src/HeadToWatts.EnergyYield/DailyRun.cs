@@ -39,6 +39,9 @@ public sealed record DailyRun(
 
     private static readonly int[] DaysOfMonth = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
 
+    /// <summary>Starts of units in a year, all units together, counted from day to day; starts within a day are not seen.</summary>
+    public double UnitStartsPerYear { get; init; }
+
     /// <summary>Sum of the twelve months, kWh a year.</summary>
     public double SumOfMonthsKwh => Months.Sum(m => m.MeanEnergyKwh);
 
@@ -92,7 +95,7 @@ public sealed record DailyRun(
         var days = new int[12];
         var years = new List<YearEnergy>();
         // Records repeat their flows; each distinct flow is worked out once for the months that share plant and allocation.
-        var known = new Dictionary<double, double>[12];
+        var known = new Dictionary<double, (double PowerKw, int Units)>[12];
         for (var m = 0; m < 12; m++)
         {
             var like = Enumerable.Range(0, m).FirstOrDefault(k => ReferenceEquals(plants[k], plants[m]) && allocations[k] == allocations[m], m);
@@ -107,6 +110,7 @@ public sealed record DailyRun(
         var seasonSum = 0.0;
         var seasonDays = 0;
         int run = 0, longest = 0;
+        int running = 0, starts = 0, counted = 0;
         DateOnly runFrom = day, longestFrom = day;
         for (var i = 0; i < flows.Length; i++, day = day.AddDays(1))
         {
@@ -128,11 +132,17 @@ public sealed record DailyRun(
 
             var arriving = runs ? Math.Max(0, flows[i]) : 0;
             var month = day.Month - 1;
-            if (!known[month].TryGetValue(arriving, out var powerKw))
+            if (!known[month].TryGetValue(arriving, out var found))
             {
-                powerKw = plants[month].At(allocations[month].Split(arriving).UsableM3PerS).MeterPowerKw * availability;
-                known[month].Add(arriving, powerKw);
+                var point = plants[month].At(allocations[month].Split(arriving).UsableM3PerS);
+                found = (point.MeterPowerKw * availability, point.UnitsRunning);
+                known[month].Add(arriving, found);
             }
+
+            var powerKw = found.PowerKw;
+            starts += Math.Max(0, found.Units - running);
+            running = found.Units;
+            counted++;
 
             if (runs)
             {
@@ -167,7 +177,12 @@ public sealed record DailyRun(
         }
 
         var meanOfDaysKwh = seasonDays == 0 ? 0 : seasonSum / seasonDays * season.ShareOfYear * PhysicalConstants.HoursPerYear;
-        return new DailyRun(months, years, meanOfDaysKwh, longest, longest > 0 ? longestFrom : null) { EnergyOfDaysKwh = energies, YearKind = yearKind };
+        return new DailyRun(months, years, meanOfDaysKwh, longest, longest > 0 ? longestFrom : null)
+        {
+            EnergyOfDaysKwh = energies,
+            YearKind = yearKind,
+            UnitStartsPerYear = counted == 0 ? 0 : starts * 365.0 / counted,
+        };
 
         void CloseYear() =>
             years.Add(new YearEnergy(year, yearKwh, yearDays, yearDays >= 0.95 * FlowRecords.Statistics.Years.DaysOf(year, yearKind)));

@@ -9,15 +9,15 @@ internal static class MovingDispatch
     internal static double FlowTakenM3PerS(PlantCurve plant, double usableFlowM3PerS, double grossHeadM)
     {
         var units = plant.Design.Units;
-        var unitFlow = units.DesignFlowM3PerS / units.UnitCount;
-        var most = Math.Min(usableFlowM3PerS, units.DesignFlowM3PerS);
-        double bestFlow = 0, bestKw = 0;
-        for (var running = 1; running <= units.UnitCount; running++)
+        var capacity = plant.Design.CapacityM3PerS(grossHeadM);
+        var most = Math.Min(usableFlowM3PerS, capacity);
+        double bestFlow = 0, bestKw = 0, from = 0, share = 0;
+        for (var running = 1; running <= units.UnitCount && from < most; running++)
         {
-            var from = (running - 1) * unitFlow;
-            if (from >= most)
-                break;
-            Try(Top(Math.Max(from, 1e-9 * unitFlow), Math.Min(running * unitFlow, most)));
+            share = running == units.UnitCount ? 1 : share + units.Sizes[running - 1].ShareRatio;
+            var to = share * capacity;
+            Try(Top(Math.Max(from, 1e-9 * to), Math.Min(to, most)));
+            from = to;
         }
 
         return bestFlow;

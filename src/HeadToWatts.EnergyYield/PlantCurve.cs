@@ -221,7 +221,7 @@ public sealed class PlantCurve
     private PlantPoint Standing(double usableFlowM3PerS, double grossHeadM) =>
         new(usableFlowM3PerS, 0, 0, grossHeadM, 0, 0, -Design.Train.StandingDrawKw) { GrossHeadM = grossHeadM };
 
-    // Machines are rated for a unit's highest power at the rated head; where the pipe takes more than the flow brings, that is below full flow.
+    // Machines are rated for a unit's highest power at the rated head, however the flow is split; where the pipe takes more than the flow brings, that is below full flow.
     private static double BestUnitShaftKw(PlantDesign design)
     {
         const int steps = 20;
@@ -229,7 +229,7 @@ public sealed class PlantCurve
         for (var i = 1; i <= steps; i++)
         {
             var flow = design.Units.DesignFlowM3PerS * i / steps;
-            best = Math.Max(best, flow * design.NetHeadM(flow) * design.Units.LoadAt(flow).Efficiency);
+            best = Math.Max(best, flow * design.NetHeadM(flow) * design.Units.InTurnAt(flow).Efficiency);
         }
 
         return best * design.Site.SpecificWeightNPerM3 / 1000 / design.Units.UnitCount;
@@ -240,7 +240,38 @@ public sealed class PlantCurve
     // The units' own answer to a flow, whether or not taking it is wise.
     internal PlantPoint Follow(double flowM3PerS, double grossHeadM)
     {
-        var load = Design.Units.LoadAt(flowM3PerS);
+        if (Design.HeadBehaviour is { } behaviour)
+            return Away(flowM3PerS, grossHeadM, behaviour);
+        var point = Loaded(flowM3PerS, grossHeadM, Design.Units.LoadAt(flowM3PerS));
+        return Design.Units.Split == LoadSplit.Best ? Better(point, Loaded(flowM3PerS, grossHeadM, Design.Units.InTurnAt(flowM3PerS))) : point;
+    }
+
+    private static PlantPoint Better(in PlantPoint a, in PlantPoint b) => b.IsRunning && (!a.IsRunning || b.MeterPowerKw > a.MeterPowerKw) ? b : a;
+
+    // Away from the rated head every unit passes less; what a unit is opened to is its flow over what it can pass there.
+    private PlantPoint Away(double flowM3PerS, double grossHeadM, HeadBehaviour behaviour)
+    {
+        var capacity = behaviour.CapacityRatio(grossHeadM - Design.LossM(Math.Min(flowM3PerS, Design.Units.DesignFlowM3PerS)));
+        if (capacity <= 0)
+            return Standing(flowM3PerS, grossHeadM);
+        var point = Of(Design.Units.LoadAt(flowM3PerS / capacity));
+        return Design.Units.Split == LoadSplit.Best ? Better(point, Of(Design.Units.InTurnAt(flowM3PerS / capacity))) : point;
+
+        PlantPoint Of(UnitLoad load)
+        {
+            if (load.Running == 0)
+                return Standing(flowM3PerS, grossHeadM);
+            var passed = load.TurbineFlowM3PerS * capacity;
+            var opening = load.TurbineFlowM3PerS / (load.RunningShare * Design.Units.DesignFlowM3PerS);
+            var efficiency = behaviour.Efficiency(Math.Min(1, opening), load.Efficiency, grossHeadM - Design.LossM(passed));
+            return efficiency <= 0
+                ? Standing(flowM3PerS, grossHeadM)
+                : Loaded(flowM3PerS, grossHeadM, load with { TurbineFlowM3PerS = passed, FlowPerUnitM3PerS = load.FlowPerUnitM3PerS * capacity, Efficiency = efficiency });
+        }
+    }
+
+    private PlantPoint Loaded(double flowM3PerS, double grossHeadM, in UnitLoad load)
+    {
         if (load.Running == 0)
             return Standing(flowM3PerS, grossHeadM);
         var netHeadM = grossHeadM - Design.LossM(load.TurbineFlowM3PerS);

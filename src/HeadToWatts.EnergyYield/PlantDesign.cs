@@ -19,6 +19,9 @@ public sealed record PlantDesign(SiteConditions Site, GrossHead GrossHead, Water
     /// <summary>Gross head over usable flow, where the levels move with the flow; null where they stay.</summary>
     public MovingHead? MovingHead { get; init; }
 
+    /// <summary>What the units do away from their rated head; null where capacity and efficiency are held.</summary>
+    public HeadBehaviour? HeadBehaviour { get; init; }
+
     /// <summary>Gross head on a usable flow, m.</summary>
     /// <param name="usableFlowM3PerS">Usable flow, m3/s.</param>
     public double GrossHeadM(double usableFlowM3PerS) => MovingHead?.GrossHeadM(usableFlowM3PerS) ?? GrossHead.Metres;
@@ -26,6 +29,18 @@ public sealed record PlantDesign(SiteConditions Site, GrossHead GrossHead, Water
     /// <summary>Head lost when the waterway carries a flow, m.</summary>
     /// <param name="turbineFlowM3PerS">Flow through the waterway, m3/s.</param>
     public double LossM(double turbineFlowM3PerS) => QuickLosses?.LossM(turbineFlowM3PerS) ?? Waterway.LossM(turbineFlowM3PerS, Site);
+
+    /// <summary>Most that the units pass at a gross head, m3/s.</summary>
+    /// <param name="grossHeadM">Gross head, m.</param>
+    public double CapacityM3PerS(double grossHeadM)
+    {
+        if (HeadBehaviour is null)
+            return Units.DesignFlowM3PerS;
+
+        // The loss goes with what is passed, so twice is near enough: the capacity moves with the root of the head only.
+        var flow = Units.DesignFlowM3PerS * HeadBehaviour.CapacityRatio(grossHeadM - LossM(Units.DesignFlowM3PerS));
+        return Units.DesignFlowM3PerS * HeadBehaviour.CapacityRatio(grossHeadM - LossM(flow));
+    }
 
     /// <summary>Net head when the waterway carries a flow and the gross head is that of the design flow, m.</summary>
     /// <param name="turbineFlowM3PerS">Flow through the waterway, m3/s.</param>

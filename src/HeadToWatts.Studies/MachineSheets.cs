@@ -32,7 +32,7 @@ internal static class MachineSheets
             yield return pump.Use;
     }
 
-    private static MachineSheet Sheet(TurbineCandidate candidate, SiteConditions site)
+    internal static MachineSheet Sheet(TurbineCandidate candidate, SiteConditions site)
     {
         var type = candidate.Type;
         if (candidate.Speed is not { } speed)

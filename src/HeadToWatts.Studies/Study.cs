@@ -41,6 +41,7 @@ public static class Study
             input = RatedHead.At(input, designFlow);
 
         var design = new PlantDesign(site, input.Head.Gross, waterway, choice.Units, input.Train);
+        design = design with { HeadBehaviour = AwayFromRated.Of(input.Turbine, choice.Chosen.Type, design) };
         var year = YearOfParts.Make(input, design, supply);
         var plant = year.Representative;
         var annual = AnnualEnergy.Of(year.Parts);
@@ -83,12 +84,19 @@ public static class Study
                 choice.Ranking,
                 choice.Chosen,
                 input.Turbine.Type is null,
-                input.Turbine.UnitCount is null,
+                input.Turbine.UnitCount is null && input.Turbine.UnitSizes is null,
                 choice.Units.Efficiency,
-                input.Turbine.MakersCurve is not null,
-                choice.Units) { Sheets = MachineSheets.Of(choice.Ranking, site), Pump = MachineSheets.Pump(choice, input.Turbine) },
-            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant) },
-            StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply)))
+                input.Turbine.MakersCurve is not null || input.Turbine.HillChart is not null,
+                choice.Units)
+            {
+                Sheets = MachineSheets.Of(choice.Ranking, site),
+                Pump = MachineSheets.Pump(choice, input.Turbine),
+                StepUp = choice.StepUp,
+                Split = SplitComparison.Of(plant.Design, supply, annual.AnnualEnergyKwh),
+                HeadBehaviour = design.HeadBehaviour,
+            },
+            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(input, design, supply) },
+            StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour))
         {
             Summary = RecordSummary.Of(input.Flow),
         };

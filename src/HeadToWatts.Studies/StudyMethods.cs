@@ -9,6 +9,7 @@ using HeadToWatts.Hydraulics.Waterways;
 using HeadToWatts.Pumping;
 using HeadToWatts.Studies.Inputs;
 using HeadToWatts.Turbines;
+using HeadToWatts.Turbines.Units;
 
 namespace HeadToWatts.Studies;
 
@@ -26,7 +27,7 @@ public static class StudyMethods
         .. EconomicsMethods.All,
     ];
 
-    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, Waterway waterway, SurgeResult? surge, PlantChoice choice, double lowestFlowM3PerS)
+    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, Waterway waterway, SurgeResult? surge, PlantChoice choice, double lowestFlowM3PerS, HeadBehaviour? behaviour)
     {
         var uses = new List<MethodUse>(site.Uses);
         if (input.Flow.Record is { } record)
@@ -46,6 +47,10 @@ public static class StudyMethods
         uses.AddRange(ElectricalUses.Of(input.Train, choice));
         if (choice.Chosen.Speed is { } speed)
             uses.AddRange(speed.Uses);
+        if (choice.StepUp is { } stepUp)
+            uses.Add(stepUp.Use);
+        if (behaviour is not null)
+            uses.Add(behaviour.Use);
         uses.AddRange(MachineSheets.Uses(choice, input.Turbine, site));
         if (surge is not null)
             uses.AddRange(surge.Uses);

@@ -115,6 +115,10 @@ public sealed class EfficiencyCurve
         return _efficiency[segment] + (_slope[segment] * (flowRatio - _ratio[segment]));
     }
 
+    /// <summary>The curve with every efficiency higher or lower by so much, kept between 0 and 1.</summary>
+    /// <param name="change">What is added, -1 to 1.</param>
+    public EfficiencyCurve Shifted(double change) => new([.. Points.Select(p => p with { Efficiency = Math.Clamp(p.Efficiency + change, 0, 1) })]);
+
     private static bool Check(string at, string what, double value, List<Problem> problems)
     {
         if (value is >= 0 and <= 1)

@@ -56,5 +56,8 @@ public static class TurbineMethods
         RunnerSetting.CriticalSigma,
         RunnerSetting.Highest,
         PumpCorrelations.Method,
+        MoodyStepUp.Method,
+        Units.HeldSpeed.Method,
+        Units.HillChart.Method,
     ];
 }

@@ -77,6 +77,42 @@ internal static class MachineJson
         json.WriteEndObject();
     }
 
+    internal static void Split(Utf8JsonWriter json, StudyResult r)
+    {
+        if (r.Turbine.Split is not { } split)
+        {
+            json.WriteNull("loadSplit");
+            return;
+        }
+
+        json.WriteStartObject("loadSplit");
+        json.WriteString("used", r.Turbine.Units.Split == Turbines.Units.LoadSplit.Best ? "best" : "in turn");
+        json.WriteNumber("inTurnKwh", split.InTurnKwh);
+        json.WriteNumber("bestKwh", split.BestKwh);
+        json.WriteStartArray("rows");
+        foreach (var row in split.Rows)
+        {
+            json.WriteStartObject();
+            json.WriteNumber("flowM3PerS", row.FlowM3PerS);
+            Flows("inTurnM3PerS", row.InTurnM3PerS);
+            json.WriteNumber("inTurnEfficiency", row.InTurnEfficiency);
+            Flows("bestM3PerS", row.BestM3PerS);
+            json.WriteNumber("bestEfficiency", row.BestEfficiency);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+        json.WriteEndObject();
+
+        void Flows(string name, IReadOnlyList<double> flows)
+        {
+            json.WriteStartArray(name);
+            foreach (var flow in flows)
+                json.WriteNumberValue(flow);
+            json.WriteEndArray();
+        }
+    }
+
     internal static void Number(Utf8JsonWriter json, string name, double? value)
     {
         if (value is { } number && double.IsFinite(number))

@@ -70,6 +70,10 @@ public static class ResultsJson
         Steps(json, r);
         MachineJson.Electrical(json, r);
         MachineJson.Pump(json, r);
+        json.WriteNumber("threePointsLowerKwh", r.Energy.ThreePointsLowerKwh);
+        Nullable(json, "unitStartsPerYear", r.Energy.Days?.UnitStartsPerYear);
+        Nullable(json, "stepUpPoints", r.Turbine.StepUp?.PeakChange * 100);
+        MachineJson.Split(json, r);
         Elements(json, r);
         json.WriteStartArray("netHeads");
         foreach (var p in r.Head.AtShares)

@@ -414,11 +414,52 @@ public sealed class TurbineDocument
     /// <summary>Least flow of a unit in percent of its design flow.</summary>
     public string? LeastFlow { get; set; }
 
+    /// <summary>The units one by one, in the order in which they come in, in place of a number of equal ones.</summary>
+    public List<UnitDocument>? UnitSizes { get; set; }
+
+    /// <summary>"in turn" or "best": how several units share the flow.</summary>
+    public string? LoadSplit { get; set; }
+
+    /// <summary>A manufacturer's chart of efficiency over flow and head, in place of a table over flow.</summary>
+    public List<HillHeadDocument>? HillChart { get; set; }
+
+    /// <summary>Diameter of the runner on which the efficiencies were measured.</summary>
+    public string? TestedDiameter { get; set; }
+
+    /// <summary>Diameter of the runner here.</summary>
+    public string? RunnerDiameter { get; set; }
+
+    /// <summary>"held" or "follow": capacity and efficiency away from the rated head.</summary>
+    public string? AwayFromRatedHead { get; set; }
+
+    /// <summary>Net head below which a unit is shut off: a length, or a percent of the rated head.</summary>
+    public string? LeastHead { get; set; }
+
     /// <summary>Height of the runner above the lowest tailwater, a length; negative below it.</summary>
     public string? RunnerHeight { get; set; }
 
     /// <summary>Best point of the pump that is to run as turbine.</summary>
     public PumpDocument? Pump { get; set; }
+}
+
+/// <summary>One of several units.</summary>
+public sealed class UnitDocument
+{
+    /// <summary>Its full flow in percent of that of all units.</summary>
+    public string? Share { get; set; }
+
+    /// <summary>Its least flow in percent of its own full flow.</summary>
+    public string? LeastFlow { get; set; }
+}
+
+/// <summary>Efficiencies at one head of a manufacturer's chart.</summary>
+public sealed class HillHeadDocument
+{
+    /// <summary>Net head.</summary>
+    public string? Head { get; set; }
+
+    /// <summary>Efficiencies over the flow of the unit, in percent of its full flow at the rated head.</summary>
+    public List<EfficiencyRowDocument>? Rows { get; set; }
 }
 
 /// <summary>A pump's best point from its catalogue.</summary>

@@ -127,6 +127,13 @@ internal static class StudyDocumentFields
         Units = r.NumberText("units"),
         EfficiencyTable = r.Array("efficiencyTable", row => new EfficiencyRowDocument { Flow = row.Text("flow"), Efficiency = row.Text("efficiency") }),
         LeastFlow = r.Text("leastFlow"),
+        UnitSizes = r.Array("unitSizes", u => new UnitDocument { Share = u.Text("share"), LeastFlow = u.Text("leastFlow") }),
+        LoadSplit = r.Text("loadSplit"),
+        HillChart = r.Array("hillChart", h => new HillHeadDocument { Head = h.Text("head"), Rows = h.Array("rows", row => new EfficiencyRowDocument { Flow = row.Text("flow"), Efficiency = row.Text("efficiency") }) }),
+        TestedDiameter = r.Text("testedDiameter"),
+        RunnerDiameter = r.Text("runnerDiameter"),
+        AwayFromRatedHead = r.Text("awayFromRatedHead"),
+        LeastHead = r.Text("leastHead"),
         RunnerHeight = r.Text("runnerHeight"),
         Pump = r.Object("pump", p => new PumpDocument { Flow = p.Text("flow"), Head = p.Text("head"), Efficiency = p.Text("efficiency"), Speed = p.Text("speed") }),
     };

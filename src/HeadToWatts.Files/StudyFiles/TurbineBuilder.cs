@@ -34,6 +34,14 @@ internal static class TurbineBuilder
 
         return new TurbineInput(type, units, curve, least)
         {
+            UnitSizes = MachineBuilder.UnitSizes(d, type, path, read),
+            Split = MachineBuilder.Split(d, path, read),
+            HillChart = MachineBuilder.HillChart(d, type, path, read),
+            TestedDiameterM = MachineBuilder.TestedDiameterM(d, type, path, read),
+            RunnerDiameterM = read.Optional(d.RunnerDiameter, Dimension.Length, path + ".runnerDiameter", 0.02, 15),
+            FollowsHead = MachineBuilder.FollowsHead(d, path, read),
+            LeastHeadRatio = MachineBuilder.IsShare(d.LeastHead) ? read.Optional(d.LeastHead, Dimension.Ratio, path + ".leastHead", 0.1, 1) : null,
+            LeastHeadM = MachineBuilder.IsShare(d.LeastHead) ? null : read.Optional(d.LeastHead, Dimension.Length, path + ".leastHead", 0, 2000),
             RunnerHeightM = read.Optional(d.RunnerHeight, Dimension.Length, path + ".runnerHeight", -30, 30),
             Pump = d.Pump is { } pump ? Pump(pump, path + ".pump", read) : null,
         };

@@ -50,6 +50,9 @@ internal static class EnergySection
 
         if (memo.Result.Energy.WithHeadError is { } range)
             rows.Add(Row("With the head's error", $"{UnitDisplay.Energy(range.LowKwh)}, {UnitDisplay.Energy(range.HighKwh)}", $"mean year with the head {memo.Show.Length(memo.Result.Input.Head.ErrorM)} lower and higher"));
+        rows.Add(Row("With the turbine three points less efficient", UnitDisplay.Energy(memo.Result.Energy.ThreePointsLowerKwh), "mean year, at every load"));
+        if (memo.Result.Energy.Days is { } run)
+            rows.Add(Row("Starts of units", "about " + UnitDisplay.Number(run.UnitStartsPerYear) + " a year", "all units, from day to day"));
         rows.Add(Row("Plant factor", UnitDisplay.Percent(annual.PlantFactor), "energy over installed power times 8760 h"));
         rows.Add(Row("Hours running", UnitDisplay.Number(annual.RunningHours) + " h a year", "some water through a turbine"));
         rows.Add(Row("Full-load hours", UnitDisplay.Number(annual.FullLoadHours) + " h a year", "energy over installed power"));

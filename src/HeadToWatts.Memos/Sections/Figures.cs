@@ -35,5 +35,7 @@ internal static class Figures
 
     public static Drawing? PumpBand(MemoContext memo) => PumpBandChart.Draw(memo.Result, memo.Show, Size with { Height = 240 });
 
+    public static Drawing? Split(MemoContext memo) => SplitChart.Draw(memo.Result, memo.Show, Size with { Height = 230 });
+
     public static Drawing? Months(MemoContext memo) => MonthsChart.Draw(memo.Result, Size with { Height = 190 });
 }

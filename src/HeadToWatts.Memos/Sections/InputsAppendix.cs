@@ -2,6 +2,7 @@ using HeadToWatts.Basis.Units;
 using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Memos.Content;
 using HeadToWatts.Studies;
+using HeadToWatts.Turbines.Units;
 
 namespace HeadToWatts.Memos.Sections;
 
@@ -55,14 +56,18 @@ internal static class InputsAppendix
         rows.Add(Row("Friction formula", input.Waterway.Formula.Name));
         rows.Add(Row("Kinetic energy coefficient α", UnitDisplay.Number(input.Waterway.KineticEnergyCoefficient)));
         rows.Add(Row("Turbine type", input.Turbine.Type?.Name ?? "to be suggested"));
-        rows.Add(Row("Number of units", input.Turbine.UnitCount is { } units ? MemoContext.Count(units) : "to be suggested"));
+        rows.Add(Row(input.Turbine.UnitSizes is null ? "Number of units" : "Units, one by one", UnitsPart.Given(memo)));
+        if (input.Turbine.Split == LoadSplit.Best)
+            rows.Add(Row("Sharing the flow", "for most power at each flow"));
+        if (input.Turbine.FollowsHead)
+            rows.Add(Row("Away from the rated head", "capacity and efficiency follow; shut off below " + (input.Turbine.LeastHeadM is { } leastM ? show.Length(leastM) : MemoContext.Percent(input.Turbine.LeastHeadRatio ?? HeldSpeed.UsualLeastHeadRatio) + " of the rated head")));
         if (input.Turbine.LeastFlowRatio is { } least)
             rows.Add(Row("Least flow of a unit", MemoContext.Percent(least) + " of its full flow"));
         if (input.Turbine.RunnerHeightM is { } runner)
             rows.Add(Row("Runner above the lowest tailwater", memo.Show.Length(runner)));
         if (input.Turbine.Pump is { } pump)
             rows.Add(Row("Pump to run as turbine", $"{show.Flow(pump.FlowM3PerS)}, {show.Length(pump.HeadM)}, {MemoContext.Percent(pump.Efficiency)}, {UnitDisplay.Number(pump.SpeedRpm, 4)} rpm"));
-        rows.Add(Row("Efficiency", input.Turbine.MakersCurve is null ? "typical of the type" : "manufacturer's table, printed in the section on turbines"));
+        rows.Add(Row("Efficiency", input.Turbine.HillChart is not null ? "manufacturer's chart, printed in the section on turbines" : input.Turbine.MakersCurve is null ? "typical of the type" : "manufacturer's table, printed in the section on turbines"));
         var train = input.Train;
         rows.Add(Row("Gear or belt; generator; transformer; line", ElectricalPart.Given(memo)));
         rows.Add(Row("Own use", $"{MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}"));

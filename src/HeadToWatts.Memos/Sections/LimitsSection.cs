@@ -1,6 +1,7 @@
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Memos.Content;
 using HeadToWatts.Studies.Cautions;
+using HeadToWatts.Turbines.Units;
 
 namespace HeadToWatts.Memos.Sections;
 
@@ -23,7 +24,7 @@ internal static class LimitsSection
                 : "Headwater and tailwater levels hold at every flow.",
             $"{(train.IsConstant ? "Constant efficiencies behind the shaft" : "Behind the shaft")}: {ElectricalPart.Given(memo)}; own use {MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}.",
             $"The plant is fit to run {MemoContext.Percent(train.Availability)} of the time, evenly over the flows.",
-            "Units are equal and come in one after another; the plant follows the flow without storage.",
+            $"Units {(result.Turbine.Units.Sizes.All(s => s == result.Turbine.Units.Sizes[0]) ? "are equal and " : "")}{(result.Turbine.Units.Split == LoadSplit.Best ? "share the flow for most power" : "come in one after another")}; the plant follows the flow without storage.",
             "The year has 365 days and 8760 hours.",
             result.Turbine.EfficiencyIsMakers ? "The manufacturer's efficiencies hold at site." : "The machine bought has the typical efficiency of its type.",
         ]));

@@ -40,6 +40,7 @@ internal static class TurbineSection
             body.Say(RichText.Bold(MemoContext.Capital(candidate.Type.Name) + ". ") + string.Join(" ", TurbineWords.Reasons(candidate, show)) + " " + RichText.Italic("Against it: ") + candidate.Type.Limits);
         MachinesPart.Write(memo);
         Efficiency(memo, chosen.Type);
+        UnitsPart.Write(memo);
     }
 
     private static void Efficiency(MemoContext memo, TurbineType type)

@@ -41,6 +41,8 @@ public static class CautionRules
         new BetterType(),
         new TypicalEfficiency(),
         new MakersEfficiency(),
+        new HillChartLeft(),
+        new HeadMovesMachineHeld(),
         new RunnerTooHigh(),
         new RunnerBelowTailwater(),
         new HighRunaway(),

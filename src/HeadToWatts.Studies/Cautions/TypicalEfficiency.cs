@@ -9,6 +9,6 @@ internal sealed class TypicalEfficiency() : CautionRule("typical-efficiency", St
     {
         return result.Turbine.EfficiencyIsMakers
             ? null
-            : $"The {result.Turbine.Chosen.Type.Name} efficiency curve is typical, not a guarantee. Three points less would cost about {UnitDisplay.Percent(0.03 / Math.Max(result.Turbine.Efficiency.Peak, 0.03))} of the energy. Ask makers for their own.";
+            : $"The {result.Turbine.Chosen.Type.Name} efficiency curve is typical, not a guarantee. Three points less at every load would leave {UnitDisplay.Energy(result.Energy.ThreePointsLowerKwh)} of {UnitDisplay.Energy(result.Energy.Annual.AnnualEnergyKwh)} a year. Ask makers for their own.";
     }
 }

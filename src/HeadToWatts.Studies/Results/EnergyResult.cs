@@ -13,6 +13,9 @@ public sealed record EnergyResult(PlantCurve Plant, AnnualEnergy Annual, DailyRu
     /// <summary>Annual energy with the head lower and higher by its stated error; null when no error is stated.</summary>
     public EnergyRange? WithHeadError { get; init; }
 
+    /// <summary>Annual energy with the turbine's efficiency three points lower at every load, kWh.</summary>
+    public double ThreePointsLowerKwh { get; init; }
+
     /// <summary>From the shaft to the meter in detail; null where every step keeps a constant ratio.</summary>
     public ElectricalResult? Electrical { get; init; }
 }

@@ -28,6 +28,15 @@ public sealed record TurbineResult(
     /// <summary>The sheet of the type the study runs on.</summary>
     public MachineSheet? ChosenSheet => Sheets.FirstOrDefault(s => s.Candidate.Type.Id == Chosen.Type.Id);
 
+    /// <summary>Step-up of the manufacturer's efficiencies to this runner's size; null where none is made.</summary>
+    public MoodyStepUp? StepUp { get; init; }
+
+    /// <summary>Several units: the best split beside one after another; null for one unit.</summary>
+    public SplitResult? Split { get; init; }
+
+    /// <summary>What the units do away from their rated head; null where capacity and efficiency are held.</summary>
+    public HeadBehaviour? HeadBehaviour { get; init; }
+
     /// <summary>What the correlations say of a pump as turbine; null where the fall gives no head.</summary>
     public PumpBand? Pump { get; init; }
 }

@@ -31,6 +31,13 @@ internal static class TurbineWorkings
                 [TurbineMethods.SpecificSpeedKwM]);
         }
 
+        yield return new Working(
+            "three-points", StudyStage.Turbine, "Energy with three points less", "E(η − 0.03)",
+            $"every efficiency of the curve three points lower, at best {UnitDisplay.Percent(turbine.Efficiency.Peak - CurveError.Points)} in place of {UnitDisplay.Percent(turbine.Efficiency.Peak)}",
+            UnitDisplay.Energy(result.Energy.ThreePointsLowerKwh),
+            $"In place of {UnitDisplay.Energy(result.Energy.Annual.AnnualEnergyKwh)}: what it means when the machine bought falls short of its curve."
+                + (turbine.StepUp is { } up ? $" The maker's efficiencies were stepped up by {UnitDisplay.Number(up.PeakChange * 100, 2)} points from a runner of {show.Diameter(up.TestedDiameterM)} to one of {show.Diameter(up.RunnerDiameterM)}." : ""),
+            turbine.StepUp is null ? [EnergyYield.EnergyMethods.AnnualEnergy] : [EnergyYield.EnergyMethods.AnnualEnergy, Turbines.Sizing.MoodyStepUp.Method]);
         if (turbine.ChosenSheet is not { } sheet)
             yield break;
         if (sheet.Geometry is { } geometry)

@@ -9,6 +9,7 @@ using HeadToWatts.Studies.Cautions;
 using HeadToWatts.Studies.Inputs;
 using HeadToWatts.Turbines;
 using HeadToWatts.Turbines.Sizing;
+using HeadToWatts.Turbines.Units;
 
 namespace HeadToWatts.Calculations.Tests.Studies;
 
@@ -72,6 +73,9 @@ public class CautionRuleTests
         new("better-type", Quiet.WithType("crossflow"), "with crossflow", "would make"),
         new("typical-efficiency", Quiet, "not a guarantee", "not a guarantee") { Spares = Quiet.WithMakersEfficiency(0.88) },
         new("makers-efficiency", Quiet.WithMakersEfficiency(0.88), "manufacturer's table", "manufacturer's table"),
+        new("hill-chart-left", Quiet.WithType("francis", 1) with { Turbine = new TurbineInput(TurbineTypes.Find("francis"), 1, null, null) { HillChart = HillChart.From([new(20, [new(0.4, 0.8), new(1, 0.9)]), new(30, [new(0.4, 0.8), new(1, 0.9)])], "chart").Value } }, "covers net heads from 65.6 ft to 98.4 ft", "covers net heads from 20.0 m to 30.0 m"),
+        new("head-moves-machine-held", Quiet.WithTailwater(new(1.5, 0), new(2.5, 20)), "are held at those of its rated head", "are held at those of its rated head")
+            { Spares = Quiet.WithTailwater(new(1.5, 0), new(2.5, 20)) with { Turbine = Quiet.Turbine with { FollowsHead = true } } },
         new("runner-too-high", Quiet with { Turbine = Quiet.Turbine with { RunnerHeightM = 9 } }, "is to stand 29.5 ft above the lowest tailwater", "is to stand 9.00 m above the lowest tailwater")
             { Spares = Quiet with { Turbine = Quiet.Turbine with { RunnerHeightM = 0.5 } } },
         new("runner-below-tailwater", Quiet.WithHead(25).WithType("propeller", 1), "below the lowest tailwater", "below the lowest tailwater"),

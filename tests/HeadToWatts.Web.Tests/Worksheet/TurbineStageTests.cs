@@ -15,9 +15,42 @@ public sealed class TurbineStageTests : Visitor
         Assert.Equal(9, rows.Count);
         var before = Session.Result!;
         var other = Session.Result!.Turbine.Ranking[1].Type;
-        page.Find($"table.machines button[aria-label='Use {other.Name}']").Click();
+        page.InvokeAsync(() => page.Find($"table.machines button[aria-label='Use {other.Name}']").Click());
         page.WaitForAssertion(() => Assert.Equal(other.Id, Session.Result!.Turbine.Chosen.Type.Id), Patience);
         Assert.NotSame(before, Session.Result);
+    }
+
+    [Fact]
+    public void Units_of_unequal_size_take_the_place_of_their_number_and_may_share_for_most_power()
+    {
+        var page = Open(Put("larkspur-drop"), "turbine");
+        page.Press("Units of unequal size");
+        page.WaitForAssertion(() => Assert.Equal(2, Session.Result!.Turbine.Units.UnitCount), Patience);
+        Assert.Empty(Session.Problems);
+        page.FindByLabel("Sharing the flow").Change("best");
+        page.WaitForAssertion(() => Assert.Equal(HeadToWatts.Turbines.Units.LoadSplit.Best, Session.Result!.Turbine.Units.Split), Patience);
+        Assert.Contains("with the best split", page.Markup, StringComparison.Ordinal);
+        page.FindByLabel("Share of unit 1").Input("50 %");
+        page.WaitForAssertion(() => Assert.Contains("do not add up", page.Markup, StringComparison.Ordinal), Patience);
+        page.FindByLabel("Share of unit 2").Input("50 %");
+        page.WaitForAssertion(() => Assert.Empty(Session.Problems), Patience);
+    }
+
+    [Fact]
+    public void A_makers_chart_starts_from_the_typical_curve_about_this_head()
+    {
+        var page = Open(Put("larkspur-drop"), "turbine");
+        page.Press("Enter a maker's chart over head");
+        page.WaitForAssertion(() => Assert.NotNull(Session.Result!.Input.Turbine.HillChart), Patience);
+        Assert.Empty(Session.Problems);
+        Assert.True(Session.Result!.Energy.Annual.AnnualEnergyKwh > 0);
+        for (var heads = 2; heads > 0; heads--)
+        {
+            page.InvokeAsync(() => page.FindAll("button").First(b => b.TextContent == "Remove this head").Click());
+            page.WaitForAssertion(() => Assert.Equal(heads - 1, page.FindAll("button").Count(b => b.TextContent == "Remove this head")), Patience);
+        }
+
+        page.WaitForAssertion(() => Assert.Null(Session.Result!.Input.Turbine.HillChart), Patience);
     }
 
     [Fact]
