@@ -103,6 +103,8 @@ internal sealed class BestSplit
         }
 
         var less = sum - flow;
+        if (less < 0)
+            return FillUp(from, flow, trial);
         if (sum <= 0 || less > room * (1 + 1e-12))
             return false;
         var share = room > 0 ? Math.Min(1, less / room) : 0;
