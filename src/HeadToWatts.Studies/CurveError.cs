@@ -1,6 +1,4 @@
 using HeadToWatts.EnergyYield;
-using HeadToWatts.Studies.Inputs;
-using HeadToWatts.Turbines.Units;
 
 namespace HeadToWatts.Studies;
 
@@ -10,13 +8,25 @@ internal static class CurveError
     /// <summary>How much lower, as is usually asked: three points.</summary>
     internal const double Points = 0.03;
 
-    internal static double LowerKwh(AlternativeInput input, PlantDesign design, FlowSupply supply)
+    private const int SharesOfYear = 400;
+
+    // Both plants are run on the same equal shares of the year and their ratio taken, so that what the shares miss falls out: every keystroke asks for this.
+    internal static double LowerKwh(PlantCurve plant, FlowSupply supply, double annualEnergyKwh)
     {
-        var lower = design with
+        var design = plant.Design with { QuickLosses = new LossTable(plant.Design.Waterway, plant.Design.Site, plant.Design.Units.DesignFlowM3PerS) };
+        var lower = new PlantCurve(design with
         {
             Units = design.Units.With(design.Units.Efficiency.Shifted(-Points)),
             HeadBehaviour = design.HeadBehaviour?.Lowered(Points),
-        };
-        return AnnualEnergy.Of(YearOfParts.Make(input, lower, supply).Parts).AnnualEnergyKwh;
+        });
+        var own = new PlantCurve(design);
+        double ownKw = 0, lowerKw = 0;
+        foreach (var flow in supply.MiddlesM3PerS(SharesOfYear))
+        {
+            ownKw += own.At(flow).MeterPowerKw;
+            lowerKw += lower.At(flow).MeterPowerKw;
+        }
+
+        return ownKw > 0 ? annualEnergyKwh * lowerKw / ownKw : annualEnergyKwh;
     }
 }

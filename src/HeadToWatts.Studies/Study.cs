@@ -95,7 +95,7 @@ public static class Study
                 Split = SplitComparison.Of(plant.Design, supply, annual.AnnualEnergyKwh),
                 HeadBehaviour = design.HeadBehaviour,
             },
-            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(input, design, supply) },
+            new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(plant, supply, annual.AnnualEnergyKwh) },
             StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour))
         {
             Summary = RecordSummary.Of(input.Flow),

@@ -26,7 +26,7 @@ internal static class UnitsPart
         var body = memo.Body;
         var units = turbine.Units;
         body.Part("Sharing the flow among the units", "split");
-        body.Say($"{MemoContext.Count(units.UnitCount)} units{(units.Sizes.Any(s => s != units.Sizes[0]) ? " of unequal size" : "")}. One after another, opened alike, they give about {UnitDisplay.Energy(split.InTurnKwh)} a year; split so that the turbines give most power at each flow, about {UnitDisplay.Energy(split.BestKwh)}, {MemoContext.Percent(split.GainRatio)} more. This memo reckons with {(units.Split == LoadSplit.Best ? "the best split" : "one after another")}."
+        body.Say($"{MemoContext.Count(units.UnitCount)} units{(units.Sizes.Any(s => s != units.Sizes[0]) ? " of unequal size; speed and size above are those of a unit of their mean" : "")}. One after another, opened alike, they give about {UnitDisplay.Energy(split.InTurnKwh)} a year; split so that the turbines give most power at each flow, about {UnitDisplay.Energy(split.BestKwh)}, {(split.GainRatio < 5e-5 ? "no" : MemoContext.Percent(split.GainRatio))} more. This memo reckons with {(units.Split == LoadSplit.Best ? "the best split" : "one after another")}."
             + (memo.Result.Energy.Days is { } days ? $" Units start about {UnitDisplay.Number(days.UnitStartsPerYear)} times a year, counted from day to day." : ""));
         body.Figure("fig-split", drawing, "Efficiency of the turbines together, with the best split and one after another.");
         body.Table("tab-split", "Flow of each unit in percent of its own full flow.",
