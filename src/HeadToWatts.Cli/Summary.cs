@@ -1,6 +1,7 @@
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Cautions;
+using HeadToWatts.Studies.Worth;
 
 namespace HeadToWatts.Cli;
 
@@ -19,6 +20,14 @@ internal static class Summary
         Line("net head", show.Length(r.Head.NetHeadAtDesignM), $"of {show.Length(r.Head.GrossHeadM)} gross");
         Line("velocity", show.Velocity(r.Waterway.HighestVelocityMPerS), $"limit {show.Velocity(r.Waterway.VelocityLimitMPerS)}");
         Line("turbine", $"{r.Turbine.Chosen.Type.Name} x {r.Turbine.Chosen.UnitCount}", r.Turbine.Chosen.Fit.IsInside ? "inside its envelope" : "OUTSIDE its envelope");
+        if (r.Money is { } money)
+        {
+            Line("net present value", MoneyText.Amount(money.Measures.NetPresentValueAmount, money.Basis), MoneyText.Terms(money.Flow.Plan));
+            Line("capital cost", MoneyText.Amount(money.Costs.TotalAmount, money.Basis), money.Measures.PaybackYears is { } years ? $"paid back after {MoneyText.Years(years)}" : "not paid back");
+            Line("rate of return", MoneyText.Rate(money.Measures.Rate), money.Measures.Rate.Statement);
+            output.WriteLine($"  {money.Answer.Headline}. {money.Answer.Text}");
+        }
+
         foreach (var caution in CautionRules.For(r, show))
         {
             var mark = caution.Severity switch { Severity.SettleFirst => "settle first", Severity.Weigh => "weigh", _ => "note" };

@@ -14,20 +14,21 @@ internal static class HeadError
         var error = input.Head.ErrorM;
         if (error <= 0)
             return null;
-        return new EnergyRange(Energy(-error), Energy(error));
+        return new EnergyRange(EnergyKwh(input, design, supply, -error), EnergyKwh(input, design, supply, error));
+    }
 
-        double Energy(double shiftM)
+    /// <summary>Energy of a mean year with the gross head higher or lower by a shift, kWh.</summary>
+    internal static double EnergyKwh(AlternativeInput input, PlantDesign design, FlowSupply supply, double shiftM)
+    {
+        var gross = Math.Max(input.Head.Gross.Metres + shiftM, 1e-3);
+        var shifted = input with
         {
-            var gross = Math.Max(input.Head.Gross.Metres + shiftM, 1e-3);
-            var shifted = input with
+            Head = input.Head with
             {
-                Head = input.Head with
-                {
-                    Gross = GrossHead.FromMetres(gross),
-                    HeadwaterRule = input.Head.Moves ? new ShiftedLevel(input.Head.Headwater, shiftM) : null,
-                },
-            };
-            return AnnualEnergy.Of(YearOfParts.Make(shifted, design with { GrossHead = shifted.Head.Gross }, supply).Parts).AnnualEnergyKwh;
-        }
+                Gross = GrossHead.FromMetres(gross),
+                HeadwaterRule = input.Head.Moves ? new ShiftedLevel(input.Head.Headwater, shiftM) : null,
+            },
+        };
+        return AnnualEnergy.Of(YearOfParts.Make(shifted, design with { GrossHead = shifted.Head.Gross }, supply).Parts).AnnualEnergyKwh;
     }
 }

@@ -1,10 +1,12 @@
 using HeadToWatts.Basis.Sources;
+using HeadToWatts.Basis.Units;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.Hydraulics.Surge;
 using HeadToWatts.Hydraulics.Water;
 using HeadToWatts.Hydraulics.Waterways;
 using HeadToWatts.Studies.Inputs;
 using HeadToWatts.Studies.Results;
+using HeadToWatts.Studies.Worth;
 using HeadToWatts.Turbines;
 using HeadToWatts.Turbines.Units;
 
@@ -52,6 +54,7 @@ public static class Study
         var middleFlow = curve.MeanFlowM3PerS;
         var atMean = plant.At(input.Flow.Allocation.Split(middleFlow).UsableM3PerS).MeterPowerKw * Basis.PhysicalConstants.HoursPerYear * input.Train.Availability;
 
+        var money = MoneyOf(input, design, supply, annual, days);
         return new StudyResult(
             header,
             input,
@@ -96,10 +99,22 @@ public static class Study
                 HeadBehaviour = design.HeadBehaviour,
             },
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(plant, supply, annual.AnnualEnergyKwh) },
-            StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour))
+            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. money?.Uses ?? []]))
         {
             Summary = RecordSummary.Of(input.Flow),
+            Money = money,
         };
+    }
+
+    private static MoneyResult? MoneyOf(AlternativeInput input, PlantDesign design, FlowSupply supply, AnnualEnergy annual, DailyRun? days)
+    {
+        if (input.Money is not { } money)
+            return null;
+        var shift = Math.Max(input.Head.ErrorM, MoneyRun.HeadSwingRatio * input.Head.Gross.Metres);
+        var swing = annual.AnnualEnergyKwh > 0
+            ? new HeadSwing(HeadError.EnergyKwh(input, design, supply, -shift), HeadError.EnergyKwh(input, design, supply, shift), UnitDisplay.Percent(shift / input.Head.Gross.Metres))
+            : null;
+        return MoneyRun.Of(money, annual.AnnualEnergyKwh, input.Train.Availability, null, swing, new FlowEvidence(days?.WholeYearsKwh.Count ?? 0));
     }
 
     // The lowest flow the plant runs on: what its units need, or what there is at the dry end of the curve.

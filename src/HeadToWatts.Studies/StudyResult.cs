@@ -27,6 +27,9 @@ public sealed record StudyResult(
     EnergyResult Energy,
     IReadOnlyList<MethodUse> MethodsUsed)
 {
+    /// <summary>Whether it pays; null when no costs and no income are given.</summary>
+    public Worth.MoneyResult? Money { get; init; }
+
     /// <summary>What the daily record tells beyond its duration curve; null without one.</summary>
     public RecordSummary? Summary { get; init; }
 

@@ -17,4 +17,7 @@ public enum StudyStage
 
     /// <summary>Energy.</summary>
     Energy,
+
+    /// <summary>Money.</summary>
+    Money,
 }

@@ -44,6 +44,9 @@ public static class AllDrawings
             ("calendar of energy", DayCalendar.DrawEnergy(result, s)),
             ("curves of years", CurvesChart.DrawYears(result, show, s)),
             ("curves of July", CurvesChart.DrawMonth(result, show, s, 7)),
+            ("cash flow", CashFlowChart.Draw(Scenarios.WithMoney(result), s)),
+            ("cost build-up", CostBuildUpChart.Draw(Scenarios.WithMoney(result), s)),
+            ("sensitivity", SensitivityBarsChart.Draw(Scenarios.WithMoney(result), s)),
             ("losses", LossShareChart.Draw(result, show, s)),
         };
         return [.. all.Where(d => d.Item2 is not null).Select(d => (d.Item1, d.Item2!))];

@@ -1,5 +1,7 @@
 using HeadToWatts.Basis.Quantities;
 using HeadToWatts.Basis.Units;
+using HeadToWatts.Economics.CashFlows;
+using HeadToWatts.Economics.Costs;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Hydraulics.Friction;
@@ -35,6 +37,24 @@ public static class Scenarios
 
     /// <summary>The same study with a pump as turbine, for the drawing that only such a study has.</summary>
     public static StudyResult AsPump(StudyResult result) => Study.Run(result.Header, result.Input with { Turbine = new TurbineInput(TurbineTypes.Find("pump-as-turbine"), null, null, null) });
+
+    /// <summary>The same study with costs of about twelve years' income, and a price.</summary>
+    public static StudyResult WithMoney(StudyResult result)
+    {
+        var basis = MoneyBasis.Of("USD", 2026);
+        var cost = Math.Max(result.Energy.Annual.AnnualEnergyKwh, 100) * 0.09 * 8;
+        CostLine Line(CostClass kind, double share) => new(kind.Name, kind, 1, "", Money.Of(cost * share, basis), 0.2);
+        return Study.Run(result.Header, result.Input with
+        {
+            Money = new MoneyInput(basis, PriceTerms.Real, 30, 0.06)
+            {
+                PriceAmountPerKwh = 0.09,
+                CostLines = [Line(CostClasses.Permits, 0.05), Line(CostClasses.Civil, 0.25), Line(CostClasses.Pipe, 0.2), Line(CostClasses.Machine, 0.3), Line(CostClasses.Electrical, 0.12), Line(CostClasses.Grid, 0.08)],
+                EngineeringRatio = 0.1, Construction = new Construction(1, 0.05),
+                RunningCosts = [new RunningCost("O&M", cost * 0.02, 0.002, 0)], Replacements = [new Replacement("runner", cost * 0.06, 15, 0)],
+            },
+        });
+    }
 
     public static StudyResult Get(string name) => Results.Value[name];
 

@@ -74,6 +74,7 @@ public static class ResultsJson
         Nullable(json, "unitStartsPerYear", r.Energy.Days?.UnitStartsPerYear);
         Nullable(json, "stepUpPoints", r.Turbine.StepUp?.PeakChange * 100);
         MachineJson.Split(json, r);
+        MoneyJson.Write(json, r);
         Elements(json, r);
         json.WriteStartArray("netHeads");
         foreach (var p in r.Head.AtShares)

@@ -60,6 +60,7 @@ public static class StudyBuilder
         var waterway = WaterwayBuilder.Build(d.Waterway, path + ".waterway", read);
         var turbine = TurbineBuilder.Build(d.Turbine, path + ".turbine", read);
         var train = TrainBuilder.Build(d.Losses, path + ".losses", read);
+        var money = MoneyBuilder.Build(d.Money, path + ".money", read);
 
         // With a problem anywhere the value is thrown away by the caller; the placeholders only keep the types whole.
         return new AlternativeInput(
@@ -70,7 +71,10 @@ public static class StudyBuilder
             waterway,
             turbine,
             train,
-            read.Problems.Count == before ? [.. read.Assumptions, .. MonthsWithoutRecord(head, flow)] : []);
+            read.Problems.Count == before ? [.. read.Assumptions, .. MonthsWithoutRecord(head, flow)] : [])
+        {
+            Money = money,
+        };
     }
 
     private static IEnumerable<string> MonthsWithoutRecord(HeadInput? head, FlowInput? flow)

@@ -65,6 +65,9 @@ public sealed class AlternativeDocument
 
     /// <summary>From the shaft to the meter.</summary>
     public LossesDocument Losses { get; set; } = new();
+
+    /// <summary>Costs and income; none when money is left out.</summary>
+    public MoneyDocument? Money { get; set; }
 }
 
 /// <summary>Place and water.</summary>

@@ -27,6 +27,7 @@ internal static class StudyDocumentFields
         Waterway = r.Object("waterway", Waterway) ?? new WaterwayDocument(),
         Turbine = r.Object("turbine", Turbine) ?? new TurbineDocument(),
         Losses = r.Object("losses", Losses) ?? new LossesDocument(),
+        Money = r.Object("money", MoneyFields.Read),
     };
 
     private static SiteDocument Site(JsonObjectReader r) => new()

@@ -31,9 +31,12 @@ internal static class AnswerSection
             body.Add(new ListBlock([Power(memo), Energy(memo), Water(memo), Machine(memo), NextStep(memo)], ["1.", "2.", "3.", "4.", "5."], []));
         }
 
+        // On the first page whatever follows, for it says what the answer is not.
+        body.Say(RichText.Of(StandingCautions.Statement), ParagraphKind.Note);
+        if (memo.Result.Money is { } money)
+            body.Say(RichText.Bold("Whether it pays: " + char.ToLowerInvariant(money.Answer.Headline[0]) + money.Answer.Headline[1..] + ". ") + money.Answer.Text + " More in " + RichText.See("money") + ".");
         body.Say(RichText.Bold("The three biggest unknowns"), keepWithNext: true);
         body.Add(ListBlock.Bullets([.. Unknowns(memo)]));
-        body.Say(RichText.Of(StandingCautions.Statement), ParagraphKind.Note);
     }
 
     private static KeyFiguresBlock Headline(MemoContext memo)

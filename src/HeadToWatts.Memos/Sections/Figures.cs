@@ -33,6 +33,12 @@ internal static class Figures
 
     public static Drawing? Staircase(MemoContext memo) => EnergyStaircaseChart.Draw(memo.Result, Size);
 
+    public static Drawing? CashFlow(MemoContext memo) => CashFlowChart.Draw(memo.Result, Size);
+
+    public static Drawing? CostBuildUp(MemoContext memo) => CostBuildUpChart.Draw(memo.Result, Size);
+
+    public static Drawing? Sensitivity(MemoContext memo) => SensitivityBarsChart.Draw(memo.Result, Size);
+
     public static Drawing? PumpBand(MemoContext memo) => PumpBandChart.Draw(memo.Result, memo.Show, Size with { Height = 240 });
 
     public static Drawing? Split(MemoContext memo) => SplitChart.Draw(memo.Result, memo.Show, Size with { Height = 230 });

@@ -72,6 +72,7 @@ internal static class InputsAppendix
         rows.Add(Row("Gear or belt; generator; transformer; line", ElectricalPart.Given(memo)));
         rows.Add(Row("Own use", $"{MemoContext.Percent(train.OwnUseRatio)} and {UnitDisplay.Power(train.OwnUseKw)}"));
         rows.Add(Row("Availability", MemoContext.Percent(train.Availability)));
+        rows.AddRange(MoneySection.Given(memo).Select(g => Row(g.Name, g.Value)));
         body.Table("tab-inputs", "Inputs.", [new("Input", Share: 1), new("Value", Share: 2)], rows);
         if (input.Assumptions.Count > 0)
         {

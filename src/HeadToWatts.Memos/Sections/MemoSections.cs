@@ -16,6 +16,7 @@ internal static class MemoSections
         TurbineSection.Write,
         DesignFlowSection.Write,
         EnergySection.Write,
+        MoneySection.Write,
         CautionsSection.Write,
         HazardsSection.Write,
         LimitsSection.Write,

@@ -57,6 +57,19 @@ public static class CautionRules
         new HighEfficiency(),
         new AlwaysAvailable(),
         new MeanFlowTrap(),
+        new NoCostGiven(),
+        new NoPriceGiven(),
+        new NoInterconnectionCost(),
+        new NoContingency(),
+        new NoRunningCosts(),
+        new NoReplacements(),
+        new SeveralRates(),
+        new PaybackBeyondLife(),
+        new LongLife(),
+        new DebtCoverThin(),
+        new RealWithHighRate(),
+        new PriceYearOld(),
+        new NoTaxCounted(),
     ];
 
     /// <summary>The cautions that bite, those to settle first before the others.</summary>

@@ -24,4 +24,8 @@ public sealed record AlternativeInput(
     WaterwayInput Waterway,
     TurbineInput Turbine,
     PowerTrain Train,
-    IReadOnlyList<string> Assumptions);
+    IReadOnlyList<string> Assumptions)
+{
+    /// <summary>Costs and income; null when none are given.</summary>
+    public MoneyInput? Money { get; init; }
+}

@@ -20,6 +20,7 @@ public static class WorkingsList
             .. WaterwayWorkings.Of(result, show),
             .. TurbineWorkings.Of(result, show),
             .. EnergyWorkings.Of(result, show),
+            .. MoneyWorkings.Of(result),
         ];
     }
 

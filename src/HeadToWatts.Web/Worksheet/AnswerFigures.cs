@@ -2,6 +2,7 @@ using System.Globalization;
 using HeadToWatts.Basis.Units;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Cautions;
+using HeadToWatts.Studies.Worth;
 
 namespace HeadToWatts.Web.Worksheet;
 
@@ -20,7 +21,7 @@ public static class AnswerFigures
         ArgumentNullException.ThrowIfNull(result);
         ArgumentNullException.ThrowIfNull(show);
         ArgumentNullException.ThrowIfNull(cautions);
-        return [Power(result), Energy(result), PlantFactor(result), NetHead(result, show), Velocity(result, show), Turbine(result), Cautions(cautions)];
+        return [Power(result), Energy(result), PlantFactor(result), NetHead(result, show), Velocity(result, show), Turbine(result), .. Money(result), Cautions(cautions)];
     }
 
     /// <summary>The same places with nothing in them yet, for a study that cannot be worked out so far.</summary>
@@ -83,6 +84,16 @@ public static class AnswerFigures
     {
         var chosen = result.Turbine.Chosen;
         return new AnswerFigure("turbine", "Turbine", ShortName(chosen.Type.Name), "× " + chosen.UnitCount.ToString(CultureInfo.InvariantCulture), chosen.Fit.IsInside ? "inside its envelope" : "outside its envelope", OnPhone: false);
+    }
+
+    // Only where costs and income are entered: most studies begin without.
+    private static IEnumerable<AnswerFigure> Money(StudyResult result)
+    {
+        if (result.Money is not { HasCosts: true, HasPrice: true } money)
+            yield break;
+        var npv = money.Measures.NetPresentValueAmount;
+        var note = money.Measures.PaybackYears is { } years ? $"paid back after {MoneyText.Years(years)}" : "never paid back";
+        yield return new AnswerFigure("npv", "Net present value", UnitDisplay.Number(npv), money.Basis.Currency, note, Exact(npv, money.Basis.ToString()), OnPhone: false);
     }
 
     private static AnswerFigure Cautions(IReadOnlyList<Caution> cautions)

@@ -1,4 +1,7 @@
+using HeadToWatts.Basis.Quantities;
 using HeadToWatts.Basis.Units;
+using HeadToWatts.Economics.CashFlows;
+using HeadToWatts.Economics.Costs;
 using HeadToWatts.EnergyYield.Electrical;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.FlowRecords.Reserved;
@@ -94,7 +97,26 @@ public class CautionRuleTests
         new("high-efficiency", Quiet.WithMakersEfficiency(0.95) with { Train = Quiet.Train with { DriveEfficiency = 1, GeneratorEfficiency = 1, TransformerEfficiency = 1, LineEfficiency = 1 } }, "95.0 % at best", "95.0 % at best"),
         new("always-available", Quiet with { Train = Quiet.Train with { Availability = 1 } }, "100 %", "100 %") { Spares = Quiet with { Train = Quiet.Train with { Availability = 0.99 } } },
         new("mean-flow-trap", Quiet.WithCurve(BeyondLastRow.Dry, new(0, 4), new(0.5, 4)), "8760 h would claim", "over the whole curve it is"),
+        // Whole money: 2 300 000 of works and contingency 25 %, a tenth of engineering; each case takes one thing away.
+        new("no-cost-given", Paying(m => m with { CostLines = [] }), "is what they may cost at the most", "is what they may cost at the most") { Spares = Whole },
+        new("no-price-given", Paying(m => m with { PriceAmountPerKwh = null }), "The price that breaks even is 0.0", "USD/kWh") { Spares = Whole },
+        new("no-interconnection-cost", Paying(m => m with { CostLines = [.. m.CostLines.Where(l => l.Class != CostClasses.Grid)] }), "No line of the estimate is for the interconnection", "No line of the estimate is for the interconnection") { Spares = Whole },
+        new("no-contingency", Paying(m => m with { CostLines = [.. m.CostLines.Select(l => l with { ContingencyRatio = 0.05 })] }), "Contingency is 5.00 % of the works", "Contingency is 5.00 % of the works") { Spares = Whole },
+        new("no-running-costs", Paying(m => m with { RunningCosts = [] }), "nobody pays to run", "nobody pays to run") { Spares = Whole },
+        new("no-replacements", Paying(m => m with { Replacements = [] }), "Over 30 years nothing is replaced", "Over 30 years nothing is replaced") { Spares = Whole },
+        new("several-rates", Paying(m => m with { GrantAmount = 4e6 }), "no rate of return", "Judge by the net present value") { Spares = Whole },
+        new("payback-beyond-life", Paying(m => m with { PriceAmountPerKwh = 0.012 }), "does not return USD\u00a03\u202f160\u202f000 of 2026", "income of 30 years") { Spares = Whole },
+        new("long-life", Paying(m => m with { LifeYears = 60 }), "60 years of operation are counted", "60 years of operation are counted") { Spares = Whole },
+        new("debt-cover-thin", Paying(m => m with { InflationRate = 0.02, PriceAmountPerKwh = 0.05, Loan = new LoanShare(1, 0.08, 12) }), "times the debt service", "times the debt service")
+            { Spares = Paying(m => m with { InflationRate = 0.02, Loan = new LoanShare(0.3, 0.05, 20) }) },
+        new("terms-doubtful", Paying(m => m with { PriceEscalationRate = 0.03 }), "rises by 3.00 % a year beyond inflation", "rises by 3.00 % a year beyond inflation") { Spares = Whole },
+        new("price-year-old", Paying(m => m with { Basis = MoneyBasis.Of("USD", 2020), CostLines = [] }), "prices are of 2020, the memo is of 2026", "prices are of 2020, the memo is of 2026") { Spares = Whole },
+        new("no-tax-counted", Whole, "No tax is counted", "No tax is counted") { Spares = Paying(m => m with { InflationRate = 0.02, Tax = new TaxEntry(0.2, 1, Depreciation.StraightLine(20)) }) },
     ];
+
+    private static AlternativeInput Whole => Quiet with { Money = MoneyRunTests.Whole };
+
+    private static AlternativeInput Paying(Func<MoneyInput, MoneyInput> change) => Quiet with { Money = change(MoneyRunTests.Whole) };
 
     public static TheoryData<string> RuleIds => new(CautionRules.All.Select(r => r.Id));
 

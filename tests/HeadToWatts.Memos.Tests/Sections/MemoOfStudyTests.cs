@@ -13,7 +13,7 @@ public partial class MemoOfStudyTests
 {
     private static readonly string[] SectionTitles =
     [
-        "The answer", "Site and scheme", "Flow data and their quality", "Water that may be used", "Head and losses", "Turbine options", "Design flow", "Energy",
+        "The answer", "Site and scheme", "Flow data and their quality", "Water that may be used", "Head and losses", "Turbine options", "Design flow", "Energy", "Whether it pays",
         "Cautions", "Hazards and permits", "Assumptions and limits", "Inputs as given", "Workings", "Constants of the site", "Methods and their ranges", "Sources",
     ];
 

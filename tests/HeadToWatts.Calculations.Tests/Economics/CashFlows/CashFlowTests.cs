@@ -1,5 +1,7 @@
 using CsCheck;
+using HeadToWatts.Basis.Quantities;
 using HeadToWatts.Economics.CashFlows;
+using HeadToWatts.Economics.Costs;
 
 namespace HeadToWatts.Calculations.Tests.Economics.CashFlows;
 
@@ -21,6 +23,23 @@ public class CashFlowTests
             Tax = null, LifeYears = life, DiscountRate = rate, CapitalAmount = capital, AnnualEnergyKwh = energy, PriceAmountPerKwh = price, PriceEscalationRate = growth, DegradationRate = wear,
             RunningCosts = [new RunningCost("O&M", running, 0.003, growth / 2)], Replacements = [new Replacement("runner", capital / 10, every, 0)],
         };
+
+    [Fact]
+    public void The_cash_flow_worked_by_hand_on_the_page_about_economics_holds()
+    {
+        // docs/economics.md: factors of four decimals, so the sums agree to some tens.
+        var cost = CostBuildUp.Of(Plans.Dollars, [new CostLine("works", CostClasses.Civil, 1, "", Money.Of(300_000, Plans.Dollars), 0.2)], 0.1, new Construction(1, 0.04));
+        Assert.Equal(403_842, cost.TotalAmount, 1.0);
+        var measures = CashFlowMeasures.Of(CashFlow.Of(new CashFlowPlan(Plans.Dollars, PriceTerms.Real, 15, 0.05)
+        {
+            CapitalAmount = cost.TotalAmount, AnnualEnergyKwh = 500_000, PriceAmountPerKwh = 0.1,
+            RunningCosts = [new RunningCost("O&M", 8_000, 0.002, 0)], Replacements = [new Replacement("part", 20_000, 10, 0)],
+        }));
+        Assert.Equal(9_448, measures.NetPresentValueAmount, 10.0);
+        Assert.Equal(10.3, measures.PaybackYears!.Value, 0.05);
+        Assert.Equal(0.0982, measures.LevelisedCostAmountPerKwh!.Value, 5e-5);
+        Assert.Equal(measures.LevelisedCostAmountPerKwh.Value, measures.BreakEvenPriceAmountPerKwh!.Value, 1e-9);
+    }
 
     [Fact]
     public void A_plain_plan_is_the_closed_form()
