@@ -15,6 +15,7 @@ internal static class Summary
         output.WriteLine($"{r.Header.Name}: {r.Input.Name}");
         Line("power at the meter", UnitDisplay.Power(annual.MeterPowerKw), $"installed {UnitDisplay.Power(annual.InstalledPowerKw)}");
         Line("energy in a mean year", UnitDisplay.Energy(annual.AnnualEnergyKwh), r.Energy.Days?.DryYearKwh is { } dry ? $"{UnitDisplay.Energy(dry)} in a dry year" : "");
+        Line("three points less", UnitDisplay.Energy(r.Energy.ThreePointsLowerKwh), "with the turbine's efficiency lower by so much at every load");
         Line("plant factor", UnitDisplay.Percent(annual.PlantFactor), $"{UnitDisplay.Number(annual.FullLoadHours)} full-load hours, {UnitDisplay.Number(annual.RunningHours)} h running");
         Line("design flow", show.Flow(r.Flow.DesignFlowM3PerS), $"{(r.Flow.DesignFlowIsSuggested ? "suggested" : "given")}, reached {UnitDisplay.Percent(r.Flow.DesignFlowExceedance)} of the year");
         Line("net head", show.Length(r.Head.NetHeadAtDesignM), $"of {show.Length(r.Head.GrossHeadM)} gross");

@@ -37,6 +37,7 @@ public static class AllDrawings
             ("design flow", DesignFlowChart.Draw(result, show, s)),
             ("months", MonthsChart.Draw(result, s)),
             ("pump band", PumpBandChart.Draw(Scenarios.AsPump(result), show, s)),
+            ("efficiency", EfficiencyChart.Draw(result, show, s)),
             ("split", SplitChart.Draw(result, show, s)),
             ("staircase", EnergyStaircaseChart.Draw(result, s)),
             ("hydrograph", HydrographChart.Draw(result, show, s)),

@@ -43,5 +43,7 @@ internal static class Figures
 
     public static Drawing? Split(MemoContext memo) => SplitChart.Draw(memo.Result, memo.Show, Size with { Height = 230 });
 
+    public static Drawing Efficiency(MemoContext memo) => EfficiencyChart.Draw(memo.Result, memo.Show, Size with { Height = 210 });
+
     public static Drawing? Months(MemoContext memo) => MonthsChart.Draw(memo.Result, Size with { Height = 190 });
 }

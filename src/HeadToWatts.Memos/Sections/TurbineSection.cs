@@ -51,6 +51,7 @@ internal static class TurbineSection
             ? "The efficiencies are the manufacturer's as given by the author; a maker's figure is not the site's."
             : RichText.Of("The efficiencies are typical of small machines of this type ") + Cite(memo, type, TurbineFigure.Efficiency) + ", not those of a machine on offer.";
         memo.Body.Say(from + $" A unit is taken to run from {MemoContext.Percent(turbine.Units.LeastFlowRatio)} of its full flow " + Cite(memo, type, TurbineFigure.LeastFlow) + "; the range of head and flow is from " + Cite(memo, type, TurbineFigure.Envelope) + ".");
+        memo.Body.Figure("fig-efficiency", Figures.Efficiency(memo), $"Efficiency of one {type.Name} unit; three points lower at every load the year would give {UnitDisplay.Energy(memo.Result.Energy.ThreePointsLowerKwh)}.");
         memo.Body.Table("tab-efficiency", $"Efficiency of one {type.Name} unit over its flow.",
             [new("Flow of full flow, %", ColumnAlign.Right, 0), .. points.Select(p => new TableColumn(MemoContext.WholePercent(p.FlowRatio), ColumnAlign.Right))],
             [new TableRow(["Turbine efficiency, %", .. points.Select(p => RichText.Of(MemoContext.PercentColumn(p.Efficiency)))])]);

@@ -72,6 +72,7 @@ public class CautionRuleTests
         new("method-out-of-range", Quiet.WithPipes(TestStudies.Pipe(0.75, 100)) with { Waterway = new WaterwayInput([TestStudies.Pipe(0.75, 100)], FrictionFormulas.Find("hazen-williams")!, 1) }, "Hazen-Williams is stated for velocity 0 to 3.00 m/s; here it ran", "4.07 m/s")
             { Spares = Quiet with { Waterway = Quiet.Waterway with { Formula = FrictionFormulas.Find("hazen-williams")! } } },
         new("outside-envelope", Quiet.WithHead(12).WithType("pelton"), "One Pelton unit at", "usual range of the type"),
+        new("outside-envelope", Quiet with { Turbine = new TurbineInput(TurbineTypes.Find("francis"), null, null, null) { UnitSizes = [new(0.02, 0.4), new(0.98, 0.4)] } }, "number 1 with 1.27 cfs", "number 1 with 0.0360 m3/s"),
         new("much-below-least", Quiet.WithType("propeller", 1).WithFlow(f => f with { DesignFlowM3PerS = 2.2 }), "less than the 58.3 cfs", "less than the 1.65 m3/s"),
         new("better-type", Quiet.WithType("crossflow"), "with crossflow", "would make"),
         new("typical-efficiency", Quiet, "not a guarantee", "not a guarantee") { Spares = Quiet.WithMakersEfficiency(0.88) },
