@@ -30,14 +30,15 @@ public static partial class EfficiencyChart
         if (input.Used.Points.Count < 2)
             throw new ArgumentException("A curve needs two points.", nameof(input));
         var furthest = Math.Max(100, input.Heads.Append(input.Used).Max(l => l.Points[^1].FlowRatio) * 100);
+        var least = input.Heads.Append(input.Used).SelectMany(l => l.Points).Min(p => p.Efficiency) - input.LessPoints;
         var frame = ChartFrame.Begin(
             size,
             Axis.Linear("flow of the unit, % of its full flow", 0, furthest, ChartFrame.HorizontalIntervals(size), toTicks: false),
-            Axis.Linear("turbine efficiency, %", 0, 100, ChartFrame.VerticalIntervals(size)));
+            Axis.Linear("turbine efficiency, %", Math.Max(0, Math.Floor(least * 5) * 20), 100, ChartFrame.VerticalIntervals(size)));
         var used = Line(input.Used.Points, 0);
         var lower = Line(input.Used.Points, input.LessPoints);
-        var least = frame.AtX(input.LeastFlowRatio * 100);
-        Point[] stop = [new(least, frame.Top), new(least, frame.Bottom)];
+        var stopX = frame.AtX(input.LeastFlowRatio * 100);
+        Point[] stop = [new(stopX, frame.Top), new(stopX, frame.Bottom)];
         frame.Canvas.Line(stop[0], stop[1], new Stroke(InkRole.Soft, 1, Dash.Dotted));
         foreach (var head in input.Heads)
             frame.Curve(Line(head.Points, 0), new Stroke(InkRole.Green, 1.2));
@@ -46,14 +47,14 @@ public static partial class EfficiencyChart
         frame.Labels.AvoidLines(stop, 0.4);
         var type = size.Type;
         frame.Labels.TryPlace(frame.Canvas, input.Used.Name, frame.StrongStyle(InkRole.Water), Spots.AlongCurve(used, type.Strong, 0.6));
-        frame.Labels.TryPlace(frame.Canvas, $"{UnitDisplay.Number(input.LessPoints * 100)} points lower", frame.LabelStyle(InkRole.Ochre), Spots.AlongCurve(lower, type.Label, 0.7, aboveFirst: false));
+        frame.Labels.TryPlace(frame.Canvas, $"{UnitDisplay.Number(input.LessPoints * 100, 1)} points lower", frame.LabelStyle(InkRole.Ochre), Spots.AlongCurve(lower, type.Label, 0.7, aboveFirst: false));
         foreach (var head in input.Heads)
         {
             var line = Line(head.Points, 0);
             frame.Labels.TryPlace(frame.Canvas, head.Name, frame.LabelStyle(InkRole.Green), Spots.AlongCurve(line, type.Label, 0.25, aboveFirst: false));
         }
 
-        frame.Labels.TryPlace(frame.Canvas, "least flow", frame.LabelStyle(InkRole.Soft), [new LabelSpot(new Point(least + 5, frame.Bottom - (type.Label * 0.6))), new LabelSpot(new Point(least - 5, frame.Bottom - (type.Label * 0.6)), TextAnchor.End)]);
+        frame.Labels.TryPlace(frame.Canvas, "least flow", frame.LabelStyle(InkRole.Soft), [new LabelSpot(new Point(stopX + 5, frame.Bottom - (type.Label * 0.6))), new LabelSpot(new Point(stopX - 5, frame.Bottom - (type.Label * 0.6)), TextAnchor.End)]);
         frame.HoverBands([.. input.Used.Points.Select(p => (new Point(frame.AtX(p.FlowRatio * 100), frame.AtY(p.Efficiency * 100)), $"{UnitDisplay.Percent(p.FlowRatio)} of full flow: {UnitDisplay.Percent(p.Efficiency)}"))]);
         var peak = input.Used.Points.MaxBy(p => p.Efficiency);
         return frame.Canvas.Finish(
