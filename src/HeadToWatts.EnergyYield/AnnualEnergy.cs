@@ -44,7 +44,7 @@ public sealed record AnnualEnergy(
         return new AnnualEnergy(
             energyKwh,
             installedKw,
-            top.MeterPowerKw,
+            top.IsRunning ? top.MeterPowerKw : 0,
             fullLoadHours / PhysicalConstants.HoursPerYear,
             year.RunningShare * availability * PhysicalConstants.HoursPerYear,
             fullLoadHours,
