@@ -112,9 +112,10 @@ public static class Study
             return null;
         var shift = Math.Max(input.Head.ErrorM, MoneyRun.HeadSwingRatio * input.Head.Gross.Metres);
         var swing = annual.AnnualEnergyKwh > 0
-            ? new HeadSwing(HeadError.EnergyKwh(input, design, supply, -shift), HeadError.EnergyKwh(input, design, supply, shift), UnitDisplay.Percent(shift / input.Head.Gross.Metres))
+            ? new HeadSwing(HeadError.EnergyKwh(input, design, supply, -shift), HeadError.EnergyKwh(input, design, supply, shift), (100 * shift / input.Head.Gross.Metres).ToString("0.#", System.Globalization.CultureInfo.InvariantCulture) + " %")
             : null;
-        return MoneyRun.Of(money, annual.AnnualEnergyKwh, input.Train.Availability, null, swing, new FlowEvidence(days?.WholeYearsKwh.Count ?? 0));
+        var found = MoneyRun.Of(money, annual.AnnualEnergyKwh, input.Train.Availability, null, swing, new FlowEvidence(days?.WholeYearsKwh.Count ?? 0));
+        return found with { CostBands = CostBand.Of(money, found.Costs, annual.InstalledPowerKw, input.Head.Gross.Metres) };
     }
 
     // The lowest flow the plant runs on: what its units need, or what there is at the dry end of the curve.

@@ -64,6 +64,21 @@ internal static class MoneyJson
         }
 
         json.WriteEndArray();
+        json.WriteStartArray("costCorrelations");
+        foreach (var band in money.CostBands)
+        {
+            json.WriteStartObject();
+            json.WriteString("id", band.Correlation.Id);
+            json.WriteString("currency", band.Cost.Basis.Currency);
+            json.WriteNumber("priceYear", band.Cost.Basis.PriceYear);
+            json.WriteNumber("cost", band.Cost.Amount);
+            json.WriteBoolean("insideRange", band.IsInside);
+            MachineJson.Number(json, "atOurPrices", band.AtOurPrices?.Amount);
+            json.WriteString("index", band.Index);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
         json.WriteStartArray("sensitivity");
         foreach (var bar in money.Bars)
         {

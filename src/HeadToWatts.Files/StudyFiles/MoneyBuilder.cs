@@ -60,6 +60,7 @@ internal static partial class MoneyBuilder
             Tax = d.Tax is { } tax
                 ? new TaxEntry(read.Quantity(tax.Rate, Dimension.Ratio, path + ".tax.rate", 0, 1), read.Optional(tax.Depreciable, Dimension.Ratio, path + ".tax.depreciable", 0, 1) ?? 1, Written(tax.Depreciation, path + ".tax.depreciation", read))
                 : null,
+            Indexes = Each(d.Indexes, path + ".indexes", Index),
         };
         return read.Problems.Count == before ? input : null;
 
@@ -70,6 +71,17 @@ internal static partial class MoneyBuilder
             if (string.IsNullOrWhiteSpace(text))
                 read.Refuse(where, text, "nothing is entered", "an amount");
             return Amount(text, where, 0) ?? 0;
+        }
+
+        PriceIndex Index(PriceIndexDocument c, string at)
+        {
+            if (string.IsNullOrWhiteSpace(c.Name))
+                read.Refuse(at + ".name", c.Name, "an index must be named", "as 'construction cost index of ...'");
+            if (string.IsNullOrWhiteSpace(c.FromYear))
+                read.Refuse(at + ".fromYear", c.FromYear, "nothing is entered", "a year");
+            if (string.IsNullOrWhiteSpace(c.Ratio))
+                read.Refuse(at + ".ratio", c.Ratio, "nothing is entered", "index of the price year over that of the earlier year");
+            return new PriceIndex(c.Name?.Trim() ?? "", read.Whole(c.FromYear, at + ".fromYear", 1900, 2200) ?? 2000, read.Number(c.Ratio, at + ".ratio", 0.01, 1000) ?? 1);
         }
 
         int Years(string? text, string where)

@@ -65,6 +65,22 @@ public sealed class MoneyDocument
 
     /// <summary>The tax.</summary>
     public TaxDocument? Tax { get; set; }
+
+    /// <summary>Indexes that bring published costs of earlier years to the price year.</summary>
+    public List<PriceIndexDocument>? Indexes { get; set; }
+}
+
+/// <summary>An index of prices.</summary>
+public sealed class PriceIndexDocument
+{
+    /// <summary>Name of the index.</summary>
+    public string? Name { get; set; }
+
+    /// <summary>The earlier year.</summary>
+    public string? FromYear { get; set; }
+
+    /// <summary>Index of the price year over that of the earlier year.</summary>
+    public string? Ratio { get; set; }
 }
 
 /// <summary>A line of the cost estimate.</summary>

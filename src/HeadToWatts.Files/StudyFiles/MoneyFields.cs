@@ -26,5 +26,6 @@ internal static class MoneyFields
         Salvage = r.NumberText("salvage"),
         Loan = r.Object("loan", c => new LoanDocument { Share = c.Text("share"), Interest = c.Text("interest"), Years = c.NumberText("years") }),
         Tax = r.Object("tax", c => new TaxDocument { Rate = c.Text("rate"), Depreciable = c.Text("depreciable"), Depreciation = c.Text("depreciation") }),
+        Indexes = r.Array("indexes", c => new PriceIndexDocument { Name = c.Text("name"), FromYear = c.NumberText("fromYear"), Ratio = c.NumberText("ratio") }),
     };
 }

@@ -70,6 +70,23 @@ internal static class MoneySection
         body.Table("tab-costs", $"Cost estimate, {money.Basis}.",
             [new("Item", Share: 1.5), new("Class", Share: 1.1), new("Quantity", ColumnAlign.Right, 0), new("Unit price", ColumnAlign.Right, 0), new("Amount", ColumnAlign.Right, 0), new("Contingency, %", ColumnAlign.Right, 0)],
             rows);
+        Bands(memo, money);
+    }
+
+    // Beside the user's figures, never in their place: each in its own money, with what it was drawn from.
+    private static void Bands(MemoContext memo, MoneyResult money)
+    {
+        if (money.CostBands.Count == 0)
+            return;
+        var body = memo.Body;
+        var rows = money.CostBands.Select(b => new TableRow([
+            RichText.Of(b.Correlation.Name + " ") + body.Cite(b.Correlation.Source),
+            $"{(b.Correlation.Scope == Economics.CostCorrelations.CostScope.Machine ? "machine" : "plant")}: {b.Correlation.For}{(b.IsInside ? "" : "; this plant lies outside")}",
+            MoneyText.WithYear(b.Cost.Amount, b.Cost.Basis),
+            b.AtOurPrices is { } ours ? MoneyText.WithYear(ours.Amount, ours.Basis) + (b.Index.Length > 0 ? $" by {b.Index}" : "") : "no index given, or another currency",
+            MoneyText.WithYear(b.OwnAmount, money.Basis)])).ToList();
+        body.Table("tab-bands", "Published correlations as a band beside the estimate.", [new("Correlation"), new("Of what", Share: 1.5), new("Gives", ColumnAlign.Right), new("At this study's prices", ColumnAlign.Right), new("This estimate", ColumnAlign.Right)], rows,
+            RichText.Of("They lie two to three times apart and are no estimate. Their coefficients were written down from memory and not checked against print. Machine: turbine, generator, electrical works with contingency; plant: everything but interest."));
     }
 
     private static void Cash(MemoContext memo, MoneyResult money)
@@ -132,7 +149,7 @@ internal static class MoneySection
         static string Yearly(double rate) => rate == 0 ? "unchanged from year to year" : $"{MemoContext.Percent(rate)} a year";
     }
 
-    private static string Quantity(double number, string unit) => (UnitDisplay.Number(number, 4) + " " + unit).Trim();
+    private static string Quantity(double number, string unit) => (number == Math.Floor(number) && number < 1e9 ? MemoContext.Count((int)number) : UnitDisplay.Number(number, 4)) is var text && unit.Length > 0 ? text + " " + unit : text;
 
     private static string Years(double? years) => years is { } known ? MoneyText.Years(known) : "never";
 

@@ -70,6 +70,7 @@ public static class CautionRules
         new RealWithHighRate(),
         new PriceYearOld(),
         new NoTaxCounted(),
+        new CorrelationOutOfRange(),
     ];
 
     /// <summary>The cautions that bite, those to settle first before the others.</summary>

@@ -52,7 +52,16 @@ public sealed record MoneyInput(MoneyBasis Basis, PriceTerms Terms, int LifeYear
 
     /// <summary>The tax; null when none is counted.</summary>
     public TaxEntry? Tax { get; init; }
+
+    /// <summary>Indexes that bring prices of earlier years to the price year.</summary>
+    public IReadOnlyList<PriceIndex> Indexes { get; init; } = [];
 }
+
+/// <summary>How prices have moved from one year to the price year, by an index that is named.</summary>
+/// <param name="Name">Name of the index.</param>
+/// <param name="FromYear">The earlier year.</param>
+/// <param name="IndexRatio">Index of the price year over that of the earlier year.</param>
+public sealed record PriceIndex(string Name, int FromYear, double IndexRatio);
 
 /// <summary>A loan over a share of the capital cost.</summary>
 /// <param name="CapitalShare">Share of the capital cost that is lent, 0 to 1.</param>

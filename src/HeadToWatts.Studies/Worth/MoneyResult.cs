@@ -27,6 +27,9 @@ public sealed record MoneyResult(MoneyInput Input, CostBuildUp Costs, CashFlow F
     /// <summary>Share of the energy that may fail before nothing is gained; null where there is no gain or no price.</summary>
     public double? EnergyMargin { get; init; }
 
+    /// <summary>Published correlations beside the user's figures.</summary>
+    public IReadOnlyList<CostBand> CostBands { get; init; } = [];
+
     /// <summary>The methods behind it.</summary>
     public IReadOnlyList<MethodUse> Uses =>
     [

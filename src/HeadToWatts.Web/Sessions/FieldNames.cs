@@ -29,7 +29,7 @@ public static partial class FieldNames
         ["money"] = "money", ["currency"] = "currency", ["priceYear"] = "price year", ["terms"] = "terms", ["discountRate"] = "discount rate", ["inflation"] = "inflation", ["life"] = "years of operation", ["price"] = "price of energy", ["priceEscalation"] = "change of the price",
         ["degradation"] = "energy lost by wear", ["costs"] = "item", ["class"] = "class", ["quantity"] = "quantity", ["unitPrice"] = "price of one", ["contingency"] = "contingency", ["engineering"] = "engineering", ["constructionYears"] = "years of construction", ["constructionInterest"] = "interest while building",
         ["running"] = "running cost", ["yearly"] = "amount a year", ["perKwh"] = "amount for each kWh", ["escalation"] = "yearly change", ["replacements"] = "replacement", ["amount"] = "amount", ["everyYears"] = "years between", ["credits"] = "credit", ["grants"] = "grants", ["salvage"] = "worth at the end",
-        ["loan"] = "loan", ["interest"] = "interest", ["tax"] = "tax", ["depreciable"] = "share written off", ["depreciation"] = "schedule",
+        ["loan"] = "loan", ["indexes"] = "price index", ["fromYear"] = "earlier year", ["ratio"] = "ratio", ["interest"] = "interest", ["tax"] = "tax", ["depreciable"] = "share written off", ["depreciation"] = "schedule",
     };
 
     /// <summary>The place in words, as "waterway, pipe 1, inside diameter". A place that is not a field stays as it is.</summary>

@@ -112,6 +112,7 @@ public class CautionRuleTests
             { Spares = Paying(m => m with { InflationRate = 0.02, Loan = new LoanShare(0.3, 0.05, 20) }) },
         new("terms-doubtful", Paying(m => m with { PriceEscalationRate = 0.03 }), "rises by 3.00 % a year beyond inflation", "rises by 3.00 % a year beyond inflation") { Spares = Whole },
         new("price-year-old", Paying(m => m with { Basis = MoneyBasis.Of("USD", 2020), CostLines = [] }), "prices are of 2020, the memo is of 2026", "prices are of 2020, the memo is of 2026") { Spares = Whole },
+        new("correlation-out-of-range", Whole, "at 164 ft lies outside the plants behind Hall and others 2003", "at 50.0 m lies outside the plants behind Hall and others 2003"),
         new("no-tax-counted", Whole, "No tax is counted", "No tax is counted") { Spares = Paying(m => m with { InflationRate = 0.02, Tax = new TaxEntry(0.2, 1, Depreciation.StraightLine(20)) }) },
     ];
 

@@ -24,7 +24,8 @@ public class MoneyTests
           "credits": [ { "name": "certificates", "perKwh": 0.002, "years": 10 } ],
           "grants": 25000, "salvage": -8000,
           "loan": { "share": "50 %", "interest": "6 %", "years": 15 },
-          "tax": { "rate": "21 %", "depreciable": "90 %", "depreciation": "declining balance 15 x 1.5" }
+          "tax": { "rate": "21 %", "depreciable": "90 %", "depreciation": "declining balance 15 x 1.5" },
+          "indexes": [ { "name": "an invented index", "fromYear": 2014, "ratio": 1.4 } ]
         }
         """;
 
@@ -62,13 +63,13 @@ public class MoneyTests
             "money": {
               "currency": "dollars", "priceYear": "about 2020", "terms": "maybe", "discountRate": "7", "life": 0,
               "price": "0,08", "costs": [ { "class": "penstok", "unitPrice": "" } ], "contingency": "-5 %", "constructionYears": 2,
-              "running": [ { "yearly": "much" } ], "replacements": [ { "everyYears": 0 } ], "tax": { "rate": "21 %", "depreciation": "fast" }, "loan": {}
+              "running": [ { "yearly": "much" } ], "replacements": [ { "everyYears": 0 } ], "tax": { "rate": "21 %", "depreciation": "fast" }, "loan": {}, "indexes": [ { "ratio": "-1" } ]
             }
             """));
         string[] places =
         [
             "currency", "priceYear", "terms", "discountRate", "life", "price", "costs[0].class", "costs[0].unitPrice", "contingency", "constructionInterest", "running[0].yearly",
-            "replacements[0].amount", "replacements[0].everyYears", "tax.depreciation", "loan.share", "loan.interest", "loan.years",
+            "replacements[0].amount", "replacements[0].everyYears", "indexes[0].name", "indexes[0].fromYear", "indexes[0].ratio", "tax.depreciation", "loan.share", "loan.interest", "loan.years",
         ];
         Assert.Equal(places.Order(), problems.Select(p => p.Where["alternatives[0].money.".Length..]).Order());
 
@@ -86,6 +87,12 @@ public class MoneyTests
         var money = json.RootElement.GetProperty("alternatives")[0].GetProperty("money");
         Assert.Equal("USD", money.GetProperty("currency").GetString());
         Assert.Equal(26, money.GetProperty("years").GetArrayLength());
+
+        // A named index brings a correlation of its own year and currency to the price year, and no other.
+        var bands = money.GetProperty("costCorrelations").EnumerateArray().ToList();
+        Assert.All(bands, b => Assert.Equal(b.GetProperty("priceYear").GetInt32() == 2014, b.GetProperty("atOurPrices").ValueKind == JsonValueKind.Number));
+        var moved = bands.Single(b => b.GetProperty("priceYear").GetInt32() == 2014);
+        Assert.Equal(1.4 * moved.GetProperty("cost").GetDouble(), moved.GetProperty("atOurPrices").GetDouble(), 1e-6);
         Assert.Equal(result[0].Money!.Measures.NetPresentValueAmount, money.GetProperty("netPresentValue").GetDouble());
         using var without = JsonDocument.Parse(ResultsJson.Write(Study.RunAll(Samples.Input(Samples.Good))));
         Assert.Equal(JsonValueKind.Null, without.RootElement.GetProperty("alternatives")[0].GetProperty("money").ValueKind);
