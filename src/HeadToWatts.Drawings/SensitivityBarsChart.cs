@@ -46,8 +46,8 @@ public static partial class SensitivityBarsChart
             canvas.Text(new Point(3 + nameRoom, y + (row * 0.64)), BarNames.Fitted(bar.Name, nameRoom, type.Label), new TextStyle(InkRole.Ink, type.Label, TextAnchor.End));
             canvas.Rectangle(new Point(worse, y + (row * 0.18)), Math.Max(0.5, planned - worse), row * 0.58, Paint.Filled(InkRole.Ochre, 0.85));
             canvas.Rectangle(new Point(planned, y + (row * 0.18)), Math.Max(0.5, better - planned), row * 0.58, Paint.Filled(InkRole.Water, 0.75));
-            canvas.Text(new Point(worse - 4, y + (row * 0.64)), bar.WorseText, new TextStyle(InkRole.Soft, type.Tick, TextAnchor.End));
-            canvas.Text(new Point(better + 4, y + (row * 0.64)), bar.BetterText, new TextStyle(InkRole.Soft, type.Tick));
+            canvas.Text(new Point(worse - 4, y + (row * 0.64)), bar.WorseText, new TextStyle(InkRole.Soft, type.Tick, TextAnchor.End, Halo: true));
+            canvas.Text(new Point(better + 4, y + (row * 0.64)), bar.BetterText, new TextStyle(InkRole.Soft, type.Tick, Halo: true));
             canvas.EndMark();
         }
 
