@@ -62,7 +62,7 @@ public sealed class WorksheetTests(BrowserRun run)
         Assert.True(Number(narrow) < Number(wide), $"{narrow} against {wide}");
 
         await page.GetByRole(AriaRole.Button, new() { Name = "SI", Exact = true }).ClickAsync();
-        await page.WaitForFunctionAsync("document.querySelectorAll('.fig .v')[3].textContent.endsWith(' m')");
+        await page.WaitForFunctionAsync("() => document.querySelectorAll('.fig .v')[3].textContent.endsWith(' m')");
         // 48 in = 1219.2 mm by the international inch; the head in metres is that in feet times 0.3048, to three digits.
         Assert.Equal("1219.2", await page.GetByLabel("Inside diameter").InputValueAsync());
         Assert.InRange(Number(await FigureAsync(page, "Net head")), (Number(narrow) - 0.05) * 0.3048 - 0.005, (Number(narrow) + 0.05) * 0.3048 + 0.005);
