@@ -3,6 +3,7 @@ using HeadToWatts.Hydraulics.Canals;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Hydraulics.LocalLosses;
 using HeadToWatts.Hydraulics.Surge;
+using HeadToWatts.Hydraulics.Transients;
 using HeadToWatts.Hydraulics.Water;
 using HeadToWatts.Hydraulics.Waterways;
 
@@ -35,6 +36,8 @@ public static class HydraulicsMethods
         WaveSpeed.Method,
         Joukowsky.Method,
         Michaud.Method,
+        Characteristics.Method,
+        AllieviClosure.Method,
         UniformFlow.Method,
         SpecificEnergy.Method,
         SpecificEnergy.Froude,

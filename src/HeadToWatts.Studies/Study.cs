@@ -50,7 +50,9 @@ public static class Study
         var days = input.Flow.Record is { } record ? DailyRun.Over(year.PlantOfMonth, record, input.Flow.Season, year.AllocationOfMonth, input.Flow.YearKind) : null;
         var losses = waterway.At(designFlow, site);
         var highest = losses.Elements.Count == 0 ? 0 : losses.Elements.Max(e => e.VelocityMPerS);
-        var surge = losses.Elements.Count == 0 ? null : SurgeScreening.Of(waterway, designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site);
+        var surge = losses.Elements.Count == 0 ? null : SurgeScreening.Of(waterway, designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site, null, input.Waterway.Stop?.Restraint ?? PipeRestraint.AnchoredThroughout);
+        var lines = waterway.GradeLines(designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site);
+        var stop = PlantStop.Of(input, site, losses, lines, surge, choice.Chosen.Type);
         var middleFlow = curve.MeanFlowM3PerS;
         var atMean = plant.At(input.Flow.Allocation.Split(middleFlow).UsableM3PerS).MeterPowerKw * Basis.PhysicalConstants.HoursPerYear * input.Train.Availability;
 
@@ -81,8 +83,8 @@ public static class Study
                 losses.TotalLossM / input.Head.Gross.Metres,
                 highest,
                 VelocityLimits.UsbrLimitMPerS(input.Head.Gross.Metres, site.GravityMPerS2),
-                waterway.GradeLines(designFlow, input.Head.HeadwaterM, input.Head.TailwaterM, site),
-                surge),
+                lines,
+                surge) { Stop = stop },
             new TurbineResult(
                 choice.Ranking,
                 choice.Chosen,
@@ -99,7 +101,7 @@ public static class Study
                 HeadBehaviour = design.HeadBehaviour,
             },
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(plant, supply, annual.AnnualEnergyKwh) },
-            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. money?.Uses ?? []]))
+            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, stop, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. money?.Uses ?? []]))
         {
             Summary = RecordSummary.Of(input.Flow),
             Money = money,

@@ -8,6 +8,7 @@ using HeadToWatts.Hydraulics.Water;
 using HeadToWatts.Hydraulics.Waterways;
 using HeadToWatts.Pumping;
 using HeadToWatts.Studies.Inputs;
+using HeadToWatts.Studies.Results;
 using HeadToWatts.Turbines;
 using HeadToWatts.Turbines.Units;
 
@@ -27,7 +28,7 @@ public static class StudyMethods
         .. EconomicsMethods.All,
     ];
 
-    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, Waterway waterway, SurgeResult? surge, PlantChoice choice, double lowestFlowM3PerS, HeadBehaviour? behaviour)
+    internal static IReadOnlyList<MethodUse> Uses(AlternativeInput input, SiteConditions site, Waterway waterway, SurgeResult? surge, StopResult? stop, PlantChoice choice, double lowestFlowM3PerS, HeadBehaviour? behaviour)
     {
         var uses = new List<MethodUse>(site.Uses);
         if (input.Flow.Record is { } record)
@@ -54,6 +55,7 @@ public static class StudyMethods
         uses.AddRange(MachineSheets.Uses(choice, input.Turbine, site));
         if (surge is not null)
             uses.AddRange(surge.Uses);
+        uses.AddRange(stop?.Uses ?? []);
         return MethodUse.Union(uses);
     }
 }

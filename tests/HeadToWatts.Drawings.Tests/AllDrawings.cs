@@ -39,6 +39,8 @@ public static class AllDrawings
             ("pump band", PumpBandChart.Draw(Scenarios.AsPump(result), show, s)),
             ("efficiency", EfficiencyChart.Draw(result, show, s)),
             ("split", SplitChart.Draw(result, show, s)),
+            ("heads of a stop", StopHeadsChart.Draw(Scenarios.WithStop(result), show, s)),
+            ("time of a stop", StopTimeChart.Draw(Scenarios.WithStop(result), show, s)),
             ("staircase", EnergyStaircaseChart.Draw(result, s)),
             ("hydrograph", HydrographChart.Draw(result, show, s)),
             ("calendar of flow", DayCalendar.DrawFlow(result, s)),

@@ -56,6 +56,9 @@ public static class Scenarios
         });
     }
 
+    /// <summary>The same study with a plant that stops in eight seconds.</summary>
+    public static StudyResult WithStop(StudyResult result) => Study.Run(result.Header, result.Input with { Waterway = result.Input.Waterway with { Stop = new StopInput(8) } });
+
     public static StudyResult Get(string name) => Results.Value[name];
 
     private static StudyResult CanalDrop() => Run(

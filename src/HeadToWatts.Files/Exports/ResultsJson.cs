@@ -76,6 +76,7 @@ public static class ResultsJson
         MachineJson.Split(json, r);
         MoneyJson.Write(json, r);
         Elements(json, r);
+        StopJson.Write(json, r.Waterway.Stop);
         json.WriteStartArray("netHeads");
         foreach (var p in r.Head.AtShares)
         {

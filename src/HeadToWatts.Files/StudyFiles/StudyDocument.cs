@@ -350,6 +350,9 @@ public sealed class WaterwayDocument
 
     /// <summary>Pipe elements in order from the headwater; none when the machine stands at the drop.</summary>
     public List<ElementDocument> Elements { get; set; } = [];
+
+    /// <summary>How the plant stops when the unit trips; null when no transient is to be run.</summary>
+    public StopDocument? Stop { get; set; }
 }
 
 /// <summary>A pipe element.</summary>

@@ -105,6 +105,7 @@ internal static class StudyDocumentFields
         Friction = r.Text("friction"),
         KineticEnergyCoefficient = r.NumberText("kineticEnergyCoefficient"),
         Elements = r.Array("elements", Element) ?? [],
+        Stop = r.Object("stop", s => new StopDocument { ClosingTime = s.Text("closingTime"), Law = s.Text("law"), RunawayFlow = s.Text("runawayFlow"), RunawayTime = s.Text("runawayTime"), Restraint = s.Text("restraint"), PressureLimit = s.Text("pressureLimit") }),
     };
 
     private static ElementDocument Element(JsonObjectReader r) => new()

@@ -17,7 +17,7 @@ internal static class WaterwayBuilder
             formula = read.Named(d.Friction, path + ".friction", FrictionFormulas.Find, FrictionFormulas.All.Select(f => f.Name)) ?? formula;
         var alpha = read.Number(d.KineticEnergyCoefficient, path + ".kineticEnergyCoefficient", 1, 2) ?? 1;
         var elements = d.Elements.Select((e, i) => Element(e, i, $"{path}.elements[{i}]", read)).ToList();
-        return new WaterwayInput([.. elements.OfType<PipeElement>()], formula, alpha);
+        return new WaterwayInput([.. elements.OfType<PipeElement>()], formula, alpha) { Stop = StopBuilder.Build(d.Stop, path + ".stop", read) };
     }
 
     private static PipeElement? Element(ElementDocument d, int index, string path, FieldReader read)

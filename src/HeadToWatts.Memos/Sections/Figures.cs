@@ -39,6 +39,10 @@ internal static class Figures
 
     public static Drawing? Sensitivity(MemoContext memo) => SensitivityBarsChart.Draw(memo.Result, Size);
 
+    public static Drawing? StopHeads(MemoContext memo) => StopHeadsChart.Draw(memo.Result, memo.Show, Size with { Height = 210 });
+
+    public static Drawing? StopTime(MemoContext memo) => StopTimeChart.Draw(memo.Result, memo.Show, Size with { Height = 190 });
+
     public static Drawing? PumpBand(MemoContext memo) => PumpBandChart.Draw(memo.Result, memo.Show, Size with { Height = 240 });
 
     public static Drawing? Split(MemoContext memo) => SplitChart.Draw(memo.Result, memo.Show, Size with { Height = 230 });

@@ -34,6 +34,7 @@ internal static class HeadSection
         Velocities(memo, losses);
         if (result.Waterway.Surge is { } surge)
             Pressures(memo, surge);
+        StopPart.Write(memo);
     }
 
     private static void NetHeads(MemoContext memo) => memo.Body.Table("tab-net-head", "Net head at shares of the design flow.",

@@ -55,6 +55,8 @@ internal static class InputsAppendix
         rows.Add(Row("Design flow", flow.DesignFlowM3PerS is { } design ? show.Flow(design) : "to be suggested"));
         rows.Add(Row("Friction formula", input.Waterway.Formula.Name));
         rows.Add(Row("Kinetic energy coefficient α", UnitDisplay.Number(input.Waterway.KineticEnergyCoefficient)));
+        if (input.Waterway.Stop is { } stop)
+            rows.Add(Row("Stop", $"closes in {UnitDisplay.Number(stop.ClosureTimeS)} s, the {(stop.Law == Hydraulics.Transients.StopLaw.FlowFallsEvenly ? "flow" : "opening")} falling evenly; at runaway {(stop.RunawayFlowRatio is { } share ? MemoContext.Percent(share) + " of the full flow" : "the flow usual of the type")}{(stop.RunawayTimeS is { } time ? $" after {UnitDisplay.Number(time)} s" : "")}; pipes {StopWords.Restraint(stop.Restraint)}{(stop.PressureLimitPa is { } limit ? "; at most " + show.Pressure(limit) + " before the machine" : "")}"));
         rows.Add(Row("Turbine type", input.Turbine.Type?.Name ?? "to be suggested"));
         rows.Add(Row(input.Turbine.UnitSizes is null ? "Number of units" : "Units, one by one", UnitsPart.Given(memo)));
         if (input.Turbine.Split == LoadSplit.Best)

@@ -9,6 +9,9 @@ namespace HeadToWatts.Studies.Inputs;
 /// <param name="KineticEnergyCoefficient">alpha, 1.0 to 1.3.</param>
 public sealed record WaterwayInput(IReadOnlyList<PipeElement> Elements, FrictionFormula Formula, double KineticEnergyCoefficient)
 {
+    /// <summary>How the plant stops; null when no transient is to be run.</summary>
+    public StopInput? Stop { get; init; }
+
     /// <summary>The waterway, ready to be reckoned with.</summary>
     public Waterway Build() => new(Elements, Formula, KineticEnergyCoefficient);
 }

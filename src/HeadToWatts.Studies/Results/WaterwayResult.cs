@@ -18,4 +18,8 @@ public sealed record WaterwayResult(
     double HighestVelocityMPerS,
     double VelocityLimitMPerS,
     IReadOnlyList<EnergySection> GradeLines,
-    SurgeResult? Surge);
+    SurgeResult? Surge)
+{
+    /// <summary>What happens in the pipes when the unit trips; null when no stop is given or nothing flows.</summary>
+    public StopResult? Stop { get; init; }
+}

@@ -18,6 +18,7 @@ public static class WorkingsList
             .. LowFlowWorkings.Of(result, show),
             .. HeadWorkings.Of(result, show),
             .. WaterwayWorkings.Of(result, show),
+            .. StopWorkings.Of(result, show),
             .. TurbineWorkings.Of(result, show),
             .. EnergyWorkings.Of(result, show),
             .. MoneyWorkings.Of(result),
