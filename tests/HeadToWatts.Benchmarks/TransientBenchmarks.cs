@@ -7,15 +7,15 @@ namespace HeadToWatts.Benchmarks;
 [MemoryDiagnoser]
 public class TransientBenchmarks
 {
-    private static readonly TransientCase Line = new([new("pipe", 2000, 0.5, 1000, 6, 100, 0)], 1, 110, 0, 9.80665, -10);
+    private readonly TransientCase _line = new([new("pipe", 2000, 0.5, 1000, 6, 100, 0)], 1, 110, 0, 9.80665, -10);
 
     [Benchmark]
     public double FiveHundredReachesTenThousandSteps()
     {
-        var grid = TransientGrid.For(Line.Pipes, 500);
-        return Characteristics.Run(Line, new StopManoeuvre(10), grid, 10_000 * grid.TimeStepS).HighestMachineHeadM;
+        var grid = TransientGrid.For(_line.Pipes, 500);
+        return Characteristics.Run(_line, new StopManoeuvre(10), grid, 10_000 * grid.TimeStepS).HighestMachineHeadM;
     }
 
     [Benchmark]
-    public double AsAStudyRunsIt() => TransientRun.Of(Line, new StopManoeuvre(10, RunawayFlowRatio: 0.6, RunawayTimeS: 2)).HighestMachineHeadM;
+    public double AsAStudyRunsIt() => TransientRun.Of(_line, new StopManoeuvre(10, RunawayFlowRatio: 0.6, RunawayTimeS: 2)).HighestMachineHeadM;
 }
