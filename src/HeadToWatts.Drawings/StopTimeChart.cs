@@ -16,7 +16,7 @@ public sealed record StopTimeInput(double TimeStepS, IReadOnlyList<double> Press
 /// <summary>Pressure before the machine and flow through it from the trip on.</summary>
 public static partial class StopTimeChart
 {
-    private const int MostPoints = 900;
+    private const int MostPoints = 380;
 
     /// <summary>Draws the chart.</summary>
     /// <exception cref="ArgumentException">There are fewer than two values.</exception>
