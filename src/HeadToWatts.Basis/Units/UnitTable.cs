@@ -165,6 +165,7 @@ public static class UnitTable
         SquareKilometre,
         Unit("m2", Dimension.Area, 1, "m²", "m^2"),
         SquareMile,
+        Unit("ft2", Dimension.Area, Foot * Foot, "ft²", "ft^2", "sq ft"),
         Unit("ha", Dimension.Area, 1e4, "hectare", "hectares"),
         Unit("acre", Dimension.Area, 43_560 * Foot * Foot, "acres", "ac"),
     ];

@@ -26,6 +26,7 @@ public enum DateOrder
 /// <param name="Policies">What is done about gaps, negatives, estimated values and repeats.</param>
 /// <param name="SubDaily">How values within a day become daily means.</param>
 /// <param name="Recipe">How the file is read, in place of a known format.</param>
+/// <param name="Stage">How water levels become flows, for a file of levels.</param>
 public sealed record FlowFileOptions(
     UnitOfMeasure? Unit = null,
     DateOrder? Order = null,
@@ -35,7 +36,8 @@ public sealed record FlowFileOptions(
     BeyondLastRow Beyond = BeyondLastRow.Hold,
     RecordPolicies? Policies = null,
     SubDailySettings? SubDaily = null,
-    ReadingRecipe? Recipe = null)
+    ReadingRecipe? Recipe = null,
+    StageReading? Stage = null)
 {
     /// <summary>Nothing told.</summary>
     public static FlowFileOptions Default { get; } = new();

@@ -57,7 +57,11 @@ public sealed class FlowFileSource
     }
 
     /// <summary>Holds a stream that can only be read without blocking; one above the limit is refused by name.</summary>
-    public static async Task<Checked<FlowFileSource>> HoldAsync(string name, Stream stream, CancellationToken cancellation = default)
+    /// <param name="name">Name of the file.</param>
+    /// <param name="stream">The stream.</param>
+    /// <param name="cancellation">Stops the reading.</param>
+    /// <param name="bytesSoFar">Told how many bytes have come.</param>
+    public static async Task<Checked<FlowFileSource>> HoldAsync(string name, Stream stream, CancellationToken cancellation = default, IProgress<long>? bytesSoFar = null)
     {
         ArgumentNullException.ThrowIfNull(stream);
         var chunks = new List<ArraySegment<byte>>();
@@ -67,6 +71,7 @@ public sealed class FlowFileSource
             var chunk = new byte[ChunkBytes];
             var read = await stream.ReadAtLeastAsync(chunk, ChunkBytes, throwOnEndOfStream: false, cancellation).ConfigureAwait(false);
             total += read;
+            bytesSoFar?.Report(total);
             if (total > LargestBytes)
                 return TooLarge(name);
             if (read > 0)

@@ -38,14 +38,15 @@ internal static class FlowBuilder
         }
 
         var hasRows = d.Curve is { Count: > 0 };
-        string[] given = [.. new[] { (hasRows, "curve"), (d.Record is not null, "record"), (d.MonthlyMeans is { Count: > 0 }, "monthlyMeans"), (d.Schedule is { Count: > 0 }, "schedule") }.Where(g => g.Item1).Select(g => g.Item2)];
+        string[] given = [.. new[] { (hasRows, "curve"), (d.Record is not null, "record"), (d.MonthlyMeans is { Count: > 0 }, "monthlyMeans"), (d.Schedule is { Count: > 0 }, "schedule"), (d.Measurement is not null, "measurement") }.Where(g => g.Item1).Select(g => g.Item2)];
         if (given.Length != 1)
         {
-            read.Refuse(path, "", given.Length > 1 ? $"the flow is given more than once: {string.Join(" and ", given)}" : "no flow is given", "one of curve (rows of exceeded and flow), record, monthlyMeans, schedule");
+            read.Refuse(path, "", given.Length > 1 ? $"the flow is given more than once: {string.Join(" and ", given)}" : "no flow is given", "one of curve (rows of exceeded and flow), record, monthlyMeans, schedule, measurement");
             return null;
         }
 
-        var curve = hasRows ? Curve(d, path, read) : null;
+        var measured = d.Measurement is null ? null : MeasurementBuilder.Measure(d.Measurement, path + ".measurement", read);
+        var curve = hasRows ? Curve(d, path, read) : measured is null ? null : MeasurementBuilder.Curve(measured);
         var made = d.MonthlyMeans is { Count: > 0 } ? TransferBuilder.Means(d, path, read) : d.Schedule is { Count: > 0 } ? TransferBuilder.Schedule(d, path, read) : null;
         var record = d.Record is { } r ? Record(r, path + ".record", read, files) : made?.Record;
         if (d.Record is not null && record is not null && TransferBuilder.Carry(d, record, path, read, files) is { } carried)
@@ -76,8 +77,16 @@ internal static class FlowBuilder
             return null;
         var allocation = rules!.ForMonth(MiddleMonth(days!));
         var stated = !string.IsNullOrWhiteSpace(d.ReservedFlow) || d.ReservedByMonth is { Count: > 0 } || rules.Deliveries.Count > 0 || !string.IsNullOrWhiteSpace(d.PriorDeliveries);
-        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules, YearKind = years, Origin = made is null ? null : FlowOrigin.Of(made) };
+        return new FlowInput(curve is null ? null : loss.At(curve), forSeason, atSite, position, days!, allocation, stated, design, d.Source ?? "") { AllocationByMonth = byMonth, Rules = rules, YearKind = years, Origin = measured is not null ? MeasurementBuilder.Origin(d.Measurement!, measured) : made is null ? null : FlowOrigin.Of(made), Findings = Findings(d.Record, atSite) };
     }
+
+    // What was found when the file was read: of this reading, or as the study kept it beside the days.
+    private static IReadOnlyList<string> Findings(RecordDocument? d, DailyRecord? record) => d switch
+    {
+        { Found: { Count: > 0 } found } => [.. found.Where(f => !string.IsNullOrWhiteSpace(f)).Select(f => f!)],
+        { File: not null } when record?.Quality is { } quality => quality.Lines(),
+        _ => [],
+    };
 
     // Rules that change between the months of operation need days that have a month.
     private static List<WaterAllocation>? ByMonth(WaterRules rules, OperatingSeason season, bool isByMonth, bool hasRecord, string path, FieldReader read)
@@ -159,6 +168,12 @@ internal static class FlowBuilder
 
         if (!string.IsNullOrWhiteSpace(d.File))
             return files.Read(d, path + ".file").TryGet(read.Problems, out var fromFile) ? fromFile : null;
+        if (d.Rating is not null)
+        {
+            read.Refuse(path + ".rating", d.Rating.Kind, "the days of a study are flows already", "a rating for a file of water levels only");
+            return null;
+        }
+
         var count = read.Problems.Count;
         var policies = PolicyBuilder.Policies(d.Policies, path + ".policies", read.Problems);
         if (!RecordText.Read(d, path).TryGet(read.Problems, out var record) || read.Problems.Count > count)

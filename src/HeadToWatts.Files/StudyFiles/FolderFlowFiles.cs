@@ -62,9 +62,10 @@ public sealed class FolderFlowFiles(Func<string, Stream?> open) : IFlowFileSourc
         UnitOfMeasure? unit = null;
         if (!string.IsNullOrWhiteSpace(record.Unit))
         {
-            unit = UnitTable.Find(Dimension.Flow, record.Unit.Trim());
+            var dimension = record.Rating is null ? Dimension.Flow : Dimension.Length;
+            unit = UnitTable.Find(dimension, record.Unit.Trim());
             if (unit is null)
-                problems.Add(new Problem(where.Replace(".file", ".unit", StringComparison.Ordinal), record.Unit, "this unit of flow is not known", QuantityText.Accepted(Dimension.Flow)));
+                problems.Add(new Problem(where.Replace(".file", ".unit", StringComparison.Ordinal), record.Unit, record.Rating is null ? "this unit of flow is not known" : "with a rating the file holds water levels; this unit of length is not known", QuantityText.Accepted(dimension)));
         }
 
         DateOrder? order = record.DateOrder?.Trim().ToUpperInvariant() switch
@@ -81,7 +82,10 @@ public sealed class FolderFlowFiles(Func<string, Stream?> open) : IFlowFileSourc
         ReadingRecipe? recipe = null;
         if (record.Recipe is not null)
             RecipeBuilder.Build(record.Recipe, beside + ".recipe").TryGet(problems, out recipe);
-        options = new FlowFileOptions(unit, order, string.IsNullOrWhiteSpace(record.Column) ? null : record.Column, Policies: policies, SubDaily: subDaily, Recipe: recipe);
+        StageReading? stage = null;
+        if (record.Rating is not null)
+            RatingBuilder.Build(record.Rating, beside + ".rating").TryGet(problems, out stage);
+        options = new FlowFileOptions(unit, order, string.IsNullOrWhiteSpace(record.Column) ? null : record.Column, Policies: policies, SubDaily: subDaily, Recipe: recipe, Stage: stage);
         return problems.Count == count;
     }
 }

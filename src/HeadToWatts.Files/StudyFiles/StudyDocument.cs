@@ -110,6 +110,9 @@ public sealed class FlowDocument
     /// <summary>A delivery schedule in place of a record or rows.</summary>
     public List<DeliveryRowDocument>? Schedule { get; set; }
 
+    /// <summary>One measurement of the flow in place of a record or rows.</summary>
+    public MeasurementDocument? Measurement { get; set; }
+
     /// <summary>Carries the record from a gauge to the site by drainage area.</summary>
     public AreaRatioDocument? AreaRatio { get; set; }
 
@@ -155,6 +158,55 @@ public sealed class DeliveryRowDocument
 
     /// <summary>Flow on these days.</summary>
     public string? Flow { get; set; }
+}
+
+/// <summary>A flow measured once, with a bucket, with floats, or by velocity and area.</summary>
+public sealed class MeasurementDocument
+{
+    /// <summary>"bucket", "float" or "velocity-area".</summary>
+    public string? Kind { get; set; }
+
+    /// <summary>Volume of the bucket.</summary>
+    public string? Volume { get; set; }
+
+    /// <summary>Times of the fillings or of the floats.</summary>
+    public List<string?>? Times { get; set; }
+
+    /// <summary>Distance the floats travel.</summary>
+    public string? Reach { get; set; }
+
+    /// <summary>Areas of sections along the reach.</summary>
+    public List<string?>? Areas { get; set; }
+
+    /// <summary>Mean velocity over that of the float; 0.85 when left out.</summary>
+    public string? Coefficient { get; set; }
+
+    /// <summary>Verticals across the water.</summary>
+    public List<VerticalDocument>? Verticals { get; set; }
+
+    internal static MeasurementDocument Fields(JsonObjectReader r) => new()
+    {
+        Kind = r.Text("kind"),
+        Volume = r.Text("volume"),
+        Times = r.Texts("times"),
+        Reach = r.Text("reach"),
+        Areas = r.Texts("areas"),
+        Coefficient = r.NumberText("coefficient"),
+        Verticals = r.Array("verticals", v => new VerticalDocument { Distance = v.Text("distance"), Depth = v.Text("depth"), Velocity = v.Text("velocity") }),
+    };
+}
+
+/// <summary>Depth and velocity at one place across the water.</summary>
+public sealed class VerticalDocument
+{
+    /// <summary>Distance from one bank.</summary>
+    public string? Distance { get; set; }
+
+    /// <summary>Depth.</summary>
+    public string? Depth { get; set; }
+
+    /// <summary>Mean velocity in the vertical.</summary>
+    public string? Velocity { get; set; }
 }
 
 /// <summary>Drainage areas of a gauge and of the site.</summary>
@@ -229,6 +281,12 @@ public sealed class RecordDocument
 
     /// <summary>What is done about gaps, negatives, estimated values and repeats.</summary>
     public PolicyDocument? Policies { get; set; }
+
+    /// <summary>How the water levels of the file become flows; none when it holds flows.</summary>
+    public RatingDocument? Rating { get; set; }
+
+    /// <summary>What was found when the file behind the days was read, line by line.</summary>
+    public List<string?>? Found { get; set; }
 }
 
 /// <summary>The fall: gross head, or the two levels.</summary>

@@ -47,6 +47,7 @@ internal static class StudyDocumentFields
         Record = r.Object("record", Record),
         MonthlyMeans = r.Texts("monthlyMeans"),
         Schedule = r.Array("schedule", d => new DeliveryRowDocument { Days = d.Text("days"), Flow = d.Text("flow") }),
+        Measurement = r.Object("measurement", MeasurementDocument.Fields),
         AreaRatio = r.Object("areaRatio", a => new AreaRatioDocument { GaugeArea = a.Text("gaugeArea"), SiteArea = a.Text("siteArea"), Exponent = a.Text("exponent") }),
         Neighbour = r.Object("neighbour", Record),
         PlottingPosition = r.Text("plottingPosition"),
@@ -71,6 +72,8 @@ internal static class StudyDocumentFields
         Days = r.Text("days"),
         Recipe = r.Object("recipe", RecipeFile.Fields),
         Policies = r.Object("policies", PolicyBuilder.Fields),
+        Rating = r.Object("rating", RatingDocument.Fields),
+        Found = r.Texts("found"),
     };
 
     private static HeadDocument Head(JsonObjectReader r) => new()

@@ -46,6 +46,9 @@ public enum QualityKind
 
     /// <summary>A pause between values too long to be bridged.</summary>
     Pause,
+
+    /// <summary>A water level that the rating does not cover.</summary>
+    OutsideRating,
 }
 
 /// <summary>One place where it was found.</summary>
@@ -76,6 +79,7 @@ public sealed record QualityFinding(QualityKind Kind, int Count, IReadOnlyList<Q
         QualityKind.OpenEnd => "File that ends inside its last row",
         QualityKind.OtherExtent => "Extent in the heading that the rows do not meet",
         QualityKind.PartialDay => "Days known in part only",
+        QualityKind.OutsideRating => "Water levels outside the rating",
         _ => "Pauses too long to be bridged",
     };
 

@@ -17,6 +17,12 @@ internal static class FlowDataSection
             Origin(memo, origin);
         if (flow.Record is { } record)
             Record(memo, record);
+        if (flow.Findings.Count > 0)
+        {
+            body.Say(RichText.Bold("Found in the file, and what was done"), keepWithNext: true);
+            body.Add(ListBlock.Bullets([.. flow.Findings.Select(f => RichText.Of(MemoContext.Sentence(f)))]));
+        }
+
         else if (flow.TypedCurve is { } curve)
             Typed(memo, curve);
     }

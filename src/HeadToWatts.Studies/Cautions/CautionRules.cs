@@ -11,6 +11,7 @@ public static class CautionRules
         new NoReservedFlow(),
         new AssumedInputs(),
         new FlowNotMeasured(),
+        new StagesOutsideRating(),
         new ReservedByMonth(),
         new ScreeningReserve(),
         new RightBelowDesign(),

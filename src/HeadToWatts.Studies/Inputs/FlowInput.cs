@@ -28,6 +28,9 @@ public sealed record FlowInput(
     /// <summary>Allocations by month, January first, where the reserved flow changes through the year; null where it does not. <see cref="Allocation"/> is then that of the season's middle month.</summary>
     public IReadOnlyList<WaterAllocation>? AllocationByMonth { get; init; }
 
+    /// <summary>What was found when the file behind the record was read, line by line; empty where nobody looked.</summary>
+    public IReadOnlyList<string> Findings { get; init; } = [];
+
     /// <summary>How the flow came about where it was not measured at the site; null where it was, or where nothing is known of it.</summary>
     public FlowOrigin? Origin { get; init; }
 

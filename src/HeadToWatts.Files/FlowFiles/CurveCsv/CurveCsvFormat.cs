@@ -53,7 +53,7 @@ public sealed partial class CurveCsvFormat : IFlowFileFormat
             assumptions.Add("the first column is the percent of time exceeded, since no column is named so");
         }
 
-        if (FlowColumn.Choose(layout, [shareColumn], options.Column, problems, out var evidence) is not { } flowColumn)
+        if (FlowColumn.Choose(layout, [shareColumn], options.Column, false, problems, out var evidence) is not { } flowColumn)
             return problems.Refuse();
         if (evidence.Length > 0)
             assumptions.Add(evidence);

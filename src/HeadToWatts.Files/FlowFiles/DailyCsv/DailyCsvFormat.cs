@@ -35,8 +35,10 @@ public sealed partial class DailyCsvFormat : IFlowFileFormat
 
         var dateColumn = TableLayout.DateColumn(layout.FirstCells);
         var timeColumn = TableLayout.TimeColumn(layout.FirstCells, dateColumn);
-        var column = FlowColumn.Choose(layout, [dateColumn, timeColumn], options.Column, problems, out var evidence);
-        var unit = column is { } c ? FlowColumn.Unit(layout, c, options.Unit, problems) : null;
+        var column = FlowColumn.Choose(layout, [dateColumn, timeColumn], options.Column, options.Stage is not null, problems, out var evidence);
+        var unit = column is not { } c ? null
+            : options.Stage is null ? FlowColumn.Unit(layout, c, options.Unit, problems)
+            : FlowColumn.LevelUnit(layout.NameForUnit(c), options.Unit, problems);
         if (column is not { } flowColumn || unit is null)
             return problems.Refuse();
 

@@ -33,17 +33,26 @@ internal sealed class DailyBuild(RecordRows rows, RecordAbout about)
         var marks = new DayMarks[flows.Length];
         var fileRows = new int[flows.Length];
         Array.Fill(flows, double.NaN);
+        var rated = new RatedRows(rows, about, row => DateOnly.FromDayNumber((int)row.At), Text);
         for (var i = firstAt; i <= lastAt; i++)
         {
             var day = (int)placed[i].At - first;
-            flows[day] = RowOrder.Held(about.Unit, placed[i].Value);
+            flows[day] = rated.FlowM3PerS(placed[i]);
             marks[day] = placed[i].Marks;
             fileRows[day] = placed[i].FileRow;
         }
 
-        var record = new DailyRecord(DateOnly.FromDayNumber(first), flows, about.Description);
+        rated.State();
+        if (flows.All(double.IsNaN))
+        {
+            problems.File($"{Number(total)} rows", "no level lies within the rating", "a rating for these levels, or another choice for levels outside it");
+            return problems.Refuse();
+        }
+
+        var flow = about.AsFlow(rows.Options);
+        var record = new DailyRecord(DateOnly.FromDayNumber(first), flows, flow.Description);
         var within = lastAt - firstAt + 1;
-        return new RecordFinish(rows, about)
+        return new RecordFinish(rows, flow)
         {
             Marks = marks,
             FileRows = fileRows,

@@ -20,7 +20,7 @@ internal static partial class FlowColumn
     }
 
     /// <summary>Chooses among the columns other than those of date and time: the one asked for, the only one, or the only one named as a flow.</summary>
-    public static int? Choose(TableLayout layout, int[] others, string? wanted, ProblemList problems, out string evidence)
+    public static int? Choose(TableLayout layout, int[] others, string? wanted, bool forLevels, ProblemList problems, out string evidence)
     {
         evidence = "";
         var names = Enumerable.Range(0, layout.ColumnCount).Select(layout.ColumnName).ToList();
@@ -28,19 +28,25 @@ internal static partial class FlowColumn
             return Named(names, wanted, problems);
 
         var columns = Enumerable.Range(0, names.Count).Where(i => Array.IndexOf(others, i) < 0).ToList();
-        var flows = columns.Where(i => FlowName().IsMatch(names[i]) || HeaderUnit.Find(layout.NameForUnit(i), out _) is not null).ToList();
+        var flows = forLevels
+            ? columns.Where(i => StageName().IsMatch(names[i])).ToList()
+            : columns.Where(i => FlowName().IsMatch(names[i]) || HeaderUnit.Find(layout.NameForUnit(i), out _) is not null).ToList();
+        var named = forLevels ? "water level" : "flow";
         if (flows.Count == 1)
         {
             if (columns.Count > 1)
-                evidence = $"the flows stand in '{names[flows[0]]}', the only column named as a flow";
+                evidence = $"the {named}s stand in '{names[flows[0]]}', the only column named as a {named}";
             return flows[0];
         }
 
+        if (columns.Count == 1 && forLevels)
+            return columns[0];
         if (columns.Count == 1 && !OtherName().IsMatch(names[columns[0]]))
             return columns[0];
         problems.File(string.Join(", ", columns.Select(i => names[i])),
-            flows.Count > 1 ? "several columns may be the flow"
-            : columns.Exists(i => StageName().IsMatch(names[i])) ? "no column is named as the flow; a stage needs a rating to become one"
+            flows.Count > 1 ? $"several columns may be the {named}"
+            : forLevels ? "no column is named as the water level"
+            : columns.Exists(i => StageName().IsMatch(names[i])) ? "no column is named as the flow; a water level needs a rating to become one: choose one under “When the file does not say”, or as rating in the study file"
             : "no column is named as the flow",
             "name the column of the flows");
         return null;
@@ -59,6 +65,21 @@ internal static partial class FlowColumn
         }
 
         return Agreed(written, told, name, problems);
+    }
+
+    /// <summary>The unit of a water level: the one the column's name gives, or the one that was told; null, with a problem, when neither is there or they differ.</summary>
+    public static UnitOfMeasure? LevelUnit(string name, UnitOfMeasure? told, ProblemList problems)
+    {
+        var written = HeaderUnit.FindLevel(name);
+        if (told is { Dimension: not Dimension.Length })
+            problems.File(told.Symbol, "with a rating the values are water levels; this is not a unit of length", QuantityText.Accepted(Dimension.Length));
+        else if (written is not null && told is not null && written.Symbol != told.Symbol)
+            problems.File(name, $"the file gives its levels in {written.Symbol}, and {told.Symbol} was chosen", written.Symbol);
+        else if ((written ?? told) is { } unit)
+            return unit;
+        else
+            problems.File(name, "the unit of the water levels is not given", "a unit in the header, as in stage_ft or level (m), or one that is chosen");
+        return null;
     }
 
     /// <summary>The unit that is known of a file, checked against the one that was told.</summary>

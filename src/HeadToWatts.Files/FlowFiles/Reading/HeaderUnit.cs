@@ -33,6 +33,21 @@ internal static partial class HeaderUnit
         return null;
     }
 
+    /// <summary>The unit of a water level that the name of a column gives, as in "stage_ft" or "level (m)"; null when it gives none.</summary>
+    public static UnitOfMeasure? FindLevel(string header)
+    {
+        var bracket = Bracketed().Match(header);
+        if (bracket.Success && UnitTable.Find(Dimension.Length, bracket.Groups[1].Value.Trim()) is { } inside)
+            return inside;
+        foreach (Match start in WordStarts().Matches(header))
+        {
+            if (UnitTable.Find(Dimension.Length, header[start.Index..].Trim()) is { } unit)
+                return unit;
+        }
+
+        return null;
+    }
+
     public static UnitOfMeasure? FindFlow(string text) =>
         UnitTable.Find(Dimension.Flow, text)
         ?? UnitTable.Find(Dimension.Flow, text.Replace("_per_", "/", StringComparison.OrdinalIgnoreCase).Replace(" per ", "/", StringComparison.OrdinalIgnoreCase))

@@ -16,4 +16,10 @@ internal readonly record struct PlacedRow(long At, int FileRow, double Value, Da
 /// <param name="Column">Column of the values.</param>
 /// <param name="Description">Station or title.</param>
 /// <param name="WithinDays">True when the values are known to be instants, however few.</param>
-internal sealed record RecordAbout(string FormatId, string FormatName, DateOrder? UsualOrder, Basis.Units.UnitOfMeasure Unit, string Column, string Description, bool WithinDays = false);
+internal sealed record RecordAbout(string FormatId, string FormatName, DateOrder? UsualOrder, Basis.Units.UnitOfMeasure Unit, string Column, string Description, bool WithinDays = false)
+{
+    /// <summary>The same after levels have become flows.</summary>
+    public RecordAbout AsFlow(FlowFileOptions options) => options.Stage is { } stage
+        ? this with { Unit = Basis.Units.UnitTable.CubicMetrePerSecond, Description = Description.Length > 0 ? $"{Description}; {stage.Rating.Describe()}" : stage.Rating.Describe() }
+        : this;
+}

@@ -138,6 +138,12 @@ internal sealed partial class RecordRows(FlowFileSource source, FlowFileOptions 
             return problems.Refuse();
         }
 
+        if (options.Stage is not null && about.Unit.Dimension != Basis.Units.Dimension.Length)
+        {
+            problems.File(about.Column, $"the file holds flows in {about.Unit.Symbol}; a rating is for water levels", "a file of water levels, or no rating");
+            return problems.Refuse();
+        }
+
         if (_tooMany || DateOrders.Settle(_rows, options.Order, about.UsualOrder, problems, _assumptions) is not { } order)
             return problems.Refuse();
         if (source.IsWestern)

@@ -29,7 +29,8 @@ internal static class RowOrder
                 rows[i] = row = row with { Value = double.NaN };
             }
 
-            if (!(row.Value < 0))
+            // A level below the zero of its gauge is as good as any other.
+            if (!(row.Value < 0) || about.Options.Stage is not null)
                 continue;
             if (about.Findings.Count(QualityKind.Negative, done))
                 about.Findings.Example(QualityKind.Negative, row.FileRow, text(row));

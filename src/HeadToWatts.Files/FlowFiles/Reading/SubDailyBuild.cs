@@ -34,11 +34,15 @@ internal sealed class SubDailyBuild(RecordRows rows, RecordAbout about)
 
         var times = new long[count];
         var values = new double[count];
+        var rated = new RatedRows(rows, about, row => DateOnly.FromDayNumber(Day(row.At)), Text);
         for (var i = 0; i < count; i++)
         {
             times[i] = placed[i].At;
-            values[i] = RowOrder.Held(about.Unit, placed[i].Value);
+            values[i] = rated.FlowM3PerS(placed[i]);
         }
+
+        rated.State();
+        var flow = about.AsFlow(rows.Options);
 
         var means = DailyMeans.Of(times, values, settings);
         Spikes(placed, values);
@@ -58,8 +62,8 @@ internal sealed class SubDailyBuild(RecordRows rows, RecordAbout about)
         var (marks, fileRows, within) = Days(placed, firstDay.DayNumber, flows.Length);
         rows.Assume($"daily means are weighted by time, with straight lines between values up to {RecordQuality.Words(means.LongestStep)} apart");
         rows.Assume($"a day counts when its flow is known over {Percent(settings.DayShareNeeded)} of it or more");
-        var record = new DailyRecord(firstDay, flows, about.Description);
-        return new RecordFinish(rows, about)
+        var record = new DailyRecord(firstDay, flows, flow.Description);
+        return new RecordFinish(rows, flow)
         {
             Marks = marks,
             FileRows = fileRows,

@@ -45,9 +45,9 @@ public static class RecipeBuilder
         UnitOfMeasure? unit = null;
         if (!Empty(document.Unit))
         {
-            unit = UnitTable.Find(Dimension.Flow, document.Unit!.Trim());
+            unit = UnitTable.Find(Dimension.Flow, document.Unit!.Trim()) ?? UnitTable.Find(Dimension.Length, document.Unit.Trim());
             if (unit is null)
-                problems.Add(new Problem(At("unit"), document.Unit, "this unit of flow is not known", QuantityText.Accepted(Dimension.Flow)));
+                problems.Add(new Problem(At("unit"), document.Unit, "this unit of flow (or of a water level, with a rating) is not known", QuantityText.Accepted(Dimension.Flow)));
         }
 
         if (Empty(document.OnlyColumn) != Empty(document.OnlyText))

@@ -56,7 +56,7 @@ public static class RecipeReader
         }
 
         var name = columns.Value < table.Names.Count && table.Names[columns.Value].Length > 0 ? table.Names[columns.Value] : "column " + RecipeWords.Number(columns.Value + 1);
-        if (Unit(recipe, options.Unit, table, columns.Value, name, problems) is not { } unit)
+        if ((options.Stage is null ? Unit(recipe, options.Unit, table, columns.Value, name, problems) : FlowColumn.LevelUnit(name, options.Unit ?? recipe.Unit, problems)) is not { } unit)
             return problems.Refuse();
         rows.Assume("the file is read by a recipe");
         return rows.Build(new RecordAbout(Id, "as a reading recipe says", null, unit, name, recipe.OnlyText ?? ""));

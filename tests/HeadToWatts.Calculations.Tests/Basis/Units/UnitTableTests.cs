@@ -62,6 +62,7 @@ public class UnitTableTests
         ["kVA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Kilovoltampere).Voltamperes, 1e-12),
         ["MVA"] = (UnitsNet.ElectricApparentPower.From(1, ElectricApparentPowerUnit.Megavoltampere).Voltamperes, 1e-12),
         ["m2"] = (UnitsNet.Area.From(1, AreaUnit.SquareMeter).SquareMeters, 1e-12),
+        ["ft2"] = (UnitsNet.Area.From(1, AreaUnit.SquareFoot).SquareMeters, 1e-9),
         ["km2"] = (UnitsNet.Area.From(1, AreaUnit.SquareKilometer).SquareMeters, 1e-12),
         ["mi2"] = (UnitsNet.Area.From(1, AreaUnit.SquareMile).SquareMeters, 1e-8),
         ["ha"] = (UnitsNet.Area.From(1, AreaUnit.Hectare).SquareMeters, 1e-12),
