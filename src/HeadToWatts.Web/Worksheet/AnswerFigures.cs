@@ -48,9 +48,8 @@ public static class AnswerFigures
     {
         var kwh = result.Energy.Annual.AnnualEnergyKwh;
         var (value, unit) = UnitDisplay.EnergyParts(kwh);
-        var note = result.Energy.Days switch
+        var note = result.Input.Flow.Origin is { } origin ? $"flow not measured: {origin.Grade}" : result.Energy.Days switch
         {
-            { } when result.Input.Flow.Origin is { } origin => $"flow not measured: {origin.Grade}",
             { DryYearKwh: { } dry } => $"{UnitDisplay.Energy(dry)} in a dry year",
             { } => "dry year needs 10 years",
             null => "dry year needs a record",

@@ -33,7 +33,7 @@ public class CautionRuleTests
         new("assumed-inputs", Quiet with { Assumptions = ["The latitude is taken as 45 deg."] }, "The latitude is taken as 45 deg.", "The latitude is taken as 45 deg."),
         new("reserved-by-month", Quiet.WithFlow(f => f with { AllocationByMonth = [.. Enumerable.Range(1, 12).Select(m => new WaterAllocation(ReservedFlow.Constant(m == 5 ? 0.5 : 0.1), 0))] }), "up to 17.7 cfs", "up to 0.500 m3/s"),
         new("flow-not-measured", Quiet.WithFlow(f => f with { Origin = new FlowOrigin(FlowConfidence.Low, "made of monthly means", [], []) }), "The flow was made of monthly means (confidence: low)", "The flow was made of monthly means (confidence: low)"),
-        new("stages-outside-rating", Quiet.WithFlow(f => f with { Findings = ["Water levels outside the rating: 12 (row 4: 2020-01-03, 9.1 ft, above 8 ft); left out: no flow is given"] }), "outside the rating: 12 (row 4", "outside the rating: 12 (row 4")
+        new("stages-outside-rating", Quiet.WithFlow(f => f with { Findings = ["Found: Water levels outside the rating: 12 (row 4: 2020-01-03, 9.1 ft, above 8 ft); left out: no flow is given"] }), "outside the rating: 12 (row 4", "outside the rating: 12 (row 4")
             { Spares = Quiet.WithFlow(f => f with { Findings = ["Rows out of order: 2 (row 7); put in order"] }) },
         new("screening-reserve", Quiet.WithFlow(f => f with { Rules = WaterRules.None with { Reserved = new LowFlowReserved("Q95", 0.5, 0.7) } }), "70.0 % of Q95, 12.4 cfs", "70.0 % of Q95, 0.350 m3/s")
             { Spares = Quiet.WithFlow(f => f with { Rules = WaterRules.None with { Reserved = new ConstantReserved(0.1) } }) },

@@ -59,6 +59,62 @@ public sealed class FlowStageTests : Visitor
         page.WaitForAssertion(() => Assert.Empty(Session.Problems), Patience);
     }
 
+    [Fact]
+    public void A_file_of_no_known_format_is_read_by_a_recipe_that_the_study_keeps()
+    {
+        var page = Open(Put("sorrel-creek"), "flow");
+        // Day first or month first cannot be told: every day is 12 or less.
+        Upload(page, "logger 7\nplace: head gate\nwhen;reading\n01/02/2020;12,5\n02/02/2020;13,0\n03/02/2020;11,25\n", "logger.txt");
+        page.WaitForAssertion(() => Assert.Contains("logger.txt was not taken", page.Markup, StringComparison.Ordinal), Patience);
+        page.Press("Say how this file is read");
+        page.WaitForAssertion(() => Assert.Contains("The file does not decide this", page.Markup, StringComparison.Ordinal), Patience);
+        page.FindByLabel("Order of the dates").Change("day-month-year");
+        page.FindByLabel("Unit").Change("cfs");
+        page.WaitForAssertion(() => Assert.Contains("2020-02-01: 12.5", page.Find(".preview").TextContent, StringComparison.Ordinal), Patience);
+        page.Press("Read by this recipe");
+        page.WaitForAssertion(() => Assert.Equal("2020-02-01", Document.Alternatives[0].Flow.Record?.FirstDay), Patience);
+        Assert.Equal("day-month-year", Document.Alternatives[0].Flow.Record!.Recipe!.DateOrder);
+        Assert.Equal("12.5 13 11.25", Document.Alternatives[0].Flow.Record!.Days);
+    }
+
+    [Fact]
+    public void A_record_with_gaps_is_shown_before_it_is_taken_and_the_choice_about_them_counts()
+    {
+        var page = Open(Put("sorrel-creek"), "flow");
+        var before = Files.StudyFiles.StudyFileWriter.Write(Document);
+        Upload(page, "date,flow_cfs\n2020-01-01,1\n2020-01-02,2\n2020-01-04,4\n2020-01-05,5\n", "gap.csv");
+        page.WaitForAssertion(() => Assert.Contains("Look, choose, then take it", page.Markup, StringComparison.Ordinal), Patience);
+        Assert.Equal(before, Files.StudyFiles.StudyFileWriter.Write(Document));
+        page.FindByLabel("Gaps are").Change("interpolated");
+        page.WaitForAssertion(() => Assert.Contains("1 day", page.Find("section.notice").TextContent, StringComparison.Ordinal), Patience);
+        page.Press("Take these days");
+        page.WaitForAssertion(() => Assert.Equal("1 2 3 4 5", Document.Alternatives[0].Flow.Record?.Days), Patience);
+        Assert.NotEmpty(Document.Alternatives[0].Flow.Record!.Found!);
+        page.WaitForAssertion(() => Assert.NotEmpty(Session.Result!.Input.Flow.Findings), Patience);
+    }
+
+    [Fact]
+    public void One_measurement_stands_for_the_year_and_the_answer_says_so()
+    {
+        var page = Open(Put("sorrel-creek"), "flow");
+        page.FindByLabel("The flow is given as").Change("once");
+        page.FindByLabel("Volume filled").Input("5 gal");
+        page.FindByLabel("Times").Input("2; 2.2; 2.1");
+        page.WaitForAssertion(() => Assert.Equal(0.01892705892 * ((1 / 2.0) + (1 / 2.2) + (1 / 2.1)) / 3, Session.Result!.Flow.MeanFlowM3PerS, 1e-9), Patience);
+        Assert.Contains("flow not measured", page.Markup, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_reserved_flow_by_Tennant_says_what_it_comes_to()
+    {
+        var page = Open(Put("larkspur-drop"), "flow");
+        page.FindByLabel("Reserved flow").Change("tennant");
+        page.FindByLabel("Tennant's level").Change("Tennant fair");
+        page.WaitForAssertion(() => Assert.Contains("from April to September", page.Markup, StringComparison.Ordinal), Patience);
+        Assert.Equal("Tennant fair", Document.Alternatives[0].Flow.ReservedFlow);
+        Assert.Empty(Session.Problems);
+    }
+
     private static void Upload(IRenderedComponent<Web.Pages.StudyPage> page, string text, string name) =>
         page.FindComponent<FlowStage>().FindComponent<InputFile>().UploadFiles(InputFileContent.CreateFromText(text, name));
 }
