@@ -30,6 +30,7 @@ public sealed partial class FlowFileInputs
     private FlowFileSource? _source;
     private FlowFile? _file;
     private RecipeDocument? _recipe;
+    private RecipeDocument? _shownWide;
     private RatingDocument? _rating;
     private PolicyDocument _policies = new();
     private CancellationTokenSource? _reading;
@@ -57,6 +58,9 @@ public sealed partial class FlowFileInputs
 
     /// <summary>A recipe kept in the study, tried on a file that is not recognised.</summary>
     [Parameter] public RecipeDocument? KeptRecipe { get; set; }
+
+    /// <summary>Shows something over the whole width of the page, or takes it away again.</summary>
+    [Parameter] public EventCallback<RenderFragment?> OnWide { get; set; }
 
     /// <summary>Takes what was read into the study.</summary>
     [Parameter, EditorRequired] public Func<TakenFile, Task> Take { get; set; } = default!;

@@ -3,6 +3,7 @@ using HeadToWatts.Files.FlowFiles;
 using HeadToWatts.Files.StudyFiles;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.Web.Fields;
+using Microsoft.AspNetCore.Components;
 
 namespace HeadToWatts.Web.Worksheet.Stages;
 
@@ -15,6 +16,10 @@ public sealed partial class FlowStage
     private static readonly Choice[] GivenAs = [new("rows", "percent exceeded"), new("means", "monthly means"), new("plan", "a delivery schedule"), new("once", "one measurement")];
     private static readonly Choice[] YearKinds = [new("calendar", "1 January"), new("water", "1 October")];
 
+
+    private RenderFragment? _wide;
+
+    private void ShowWide(RenderFragment? wide) => _wide = wide;
 
     private string PositionFormula => FormulaPlain((PlottingPositions.Find(Doc.Flow.PlottingPosition ?? "") ?? PlottingPositions.Default).Method.Formula);
 
