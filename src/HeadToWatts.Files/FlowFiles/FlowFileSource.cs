@@ -57,11 +57,14 @@ public sealed class FlowFileSource
     }
 
     /// <summary>Holds a stream that can only be read without blocking; one above the limit is refused by name.</summary>
+    public static Task<Checked<FlowFileSource>> HoldAsync(string name, Stream stream, CancellationToken cancellation = default) => HoldAsync(name, stream, null, cancellation);
+
+    /// <summary>Holds a stream that can only be read without blocking, and tells how far it is.</summary>
     /// <param name="name">Name of the file.</param>
     /// <param name="stream">The stream.</param>
-    /// <param name="cancellation">Stops the reading.</param>
     /// <param name="bytesSoFar">Told how many bytes have come.</param>
-    public static async Task<Checked<FlowFileSource>> HoldAsync(string name, Stream stream, CancellationToken cancellation = default, IProgress<long>? bytesSoFar = null)
+    /// <param name="cancellation">Stops the reading.</param>
+    public static async Task<Checked<FlowFileSource>> HoldAsync(string name, Stream stream, IProgress<long>? bytesSoFar, CancellationToken cancellation)
     {
         ArgumentNullException.ThrowIfNull(stream);
         var chunks = new List<ArraySegment<byte>>();

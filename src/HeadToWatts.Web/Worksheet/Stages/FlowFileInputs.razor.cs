@@ -106,7 +106,7 @@ public sealed partial class FlowFileInputs
         await WorkAsync("Bringing it in,", async cancel =>
         {
             await using var stream = file.OpenReadStream(LargestFlowFileBytes, cancel);
-            var held = await FlowFileSource.HoldAsync(file.Name, stream, cancel, new Progress<long>(bytes => ShowShare(file.Size == 0 ? 1 : (double)bytes / file.Size)));
+            var held = await FlowFileSource.HoldAsync(file.Name, stream, new Progress<long>(bytes => ShowShare(file.Size == 0 ? 1 : (double)bytes / file.Size)), cancel);
             if (held.TryGet(out var source))
                 _source = source;
             else
