@@ -57,6 +57,11 @@ public static class Study
         var atMean = plant.At(input.Flow.Allocation.Split(middleFlow).UsableM3PerS).MeterPowerKw * Basis.PhysicalConstants.HoursPerYear * input.Train.Availability;
 
         var money = MoneyOf(input, design, supply, annual, days);
+        var passing = input.Head.Moves
+            ? new MovingHead(input.Head.Headwater, input.Head.Tailwater, input.Flow.Allocation, RatedHead.MiddleMonth(input.Flow)).PassingM3PerS(designFlow)
+            : designFlow;
+        var canal = CanalStudy.Of(input.Head.Canal, passing, curve.FlowAt(0), site.GravityMPerS2);
+
         return new StudyResult(
             header,
             input,
@@ -101,9 +106,10 @@ public static class Study
                 HeadBehaviour = design.HeadBehaviour,
             },
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(plant, supply, annual.AnnualEnergyKwh) },
-            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, stop, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. money?.Uses ?? []]))
+            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, stop, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. canal?.Uses ?? [], .. money?.Uses ?? []]))
         {
             Summary = RecordSummary.Of(input.Flow),
+            Canal = canal,
             Money = money,
         };
     }

@@ -30,6 +30,9 @@ public sealed record StudyResult(
     /// <summary>Whether it pays; null when no costs and no income are given.</summary>
     public Worth.MoneyResult? Money { get; init; }
 
+    /// <summary>The canal above and below a drop; null when none is given.</summary>
+    public CanalResult? Canal { get; init; }
+
     /// <summary>What the daily record tells beyond its duration curve; null without one.</summary>
     public RecordSummary? Summary { get; init; }
 

@@ -42,6 +42,8 @@ public static class AllDrawings
             ("heads of a stop", StopHeadsChart.Draw(Scenarios.WithStop(result), show, s)),
             ("time of a stop", StopTimeChart.Draw(Scenarios.WithStop(result), show, s)),
             ("staircase", EnergyStaircaseChart.Draw(result, s)),
+            ("levels", LevelsChart.Draw(result, show, s)),
+            ("canal drop", CanalDropDrawing.Draw(Scenarios.WithCanal(result), show, s)),
             ("hydrograph", HydrographChart.Draw(result, show, s)),
             ("calendar of flow", DayCalendar.DrawFlow(result, s)),
             ("calendar of energy", DayCalendar.DrawEnergy(result, s)),

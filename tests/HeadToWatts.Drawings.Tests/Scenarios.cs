@@ -4,6 +4,8 @@ using HeadToWatts.Economics.CashFlows;
 using HeadToWatts.Economics.Costs;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.Hydraulics.Canals;
+using HeadToWatts.Hydraulics.Canals.Sections;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Hydraulics.LocalLosses;
@@ -58,6 +60,17 @@ public static class Scenarios
 
     /// <summary>The same study with a plant that stops in eight seconds.</summary>
     public static StudyResult WithStop(StudyResult result) => Study.Run(result.Header, result.Input with { Waterway = result.Input.Waterway with { Stop = new StopInput(8) } });
+
+    /// <summary>The study with a canal laid to its levels: two depths below the headwater and the tailwater, and a basin.</summary>
+    public static StudyResult WithCanal(StudyResult result)
+    {
+        var flow = result.Flow.Curve.FlowAt(0);
+        var width = Math.Max(0.5, Math.Sqrt(flow));
+        CanalSide Side(double levelM) => new(new CanalFlow(new TrapezoidalSection(width, 1.5), 0.025, 0.0006), levelM - (0.5 * width), levelM + 0.5);
+        var below = Side(result.Head.TailwaterM);
+        var canal = new CanalInput(Side(result.Head.HeadwaterM), below, new BasinMeasures(width, 4 * width, below.BedElevationM - (0.2 * width)), false, false, [], "");
+        return Study.Run(result.Header, result.Input with { Head = result.Input.Head with { Canal = canal } });
+    }
 
     public static StudyResult Get(string name) => Results.Value[name];
 

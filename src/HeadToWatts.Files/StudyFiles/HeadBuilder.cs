@@ -15,9 +15,24 @@ internal static class HeadBuilder
     internal static HeadInput? Build(HeadDocument d, string path, SiteInput place, FieldReader read)
     {
         var before = read.Problems.Count;
+        var canal = d.Canal is null ? null : CanalBuilder.Build(d.Canal, path + ".canal", read);
+        if (read.Problems.Count > before || Fall(d, canal, path, place, read) is not { } head)
+            return null;
+        head = head with { Canal = canal };
+        CanalBuilder.RefuseDoubleCount(head, path + ".canal", read);
+        return head;
+    }
+
+    private static HeadInput? Fall(HeadDocument d, CanalInput? canal, string path, SiteInput place, FieldReader read)
+    {
+        var before = read.Problems.Count;
         var site = SiteConditions.At(place.LatitudeRad, place.ElevationM, place.WaterTemperatureDegC);
         var head = Ways(d.Headwater, d.HeadwaterByMonth, d.HeadwaterRating, d.HeadwaterCrest, d.UpstreamPressure);
         var tail = Ways(d.Tailwater, d.TailwaterByMonth, d.TailwaterRating, null, d.DownstreamPressure);
+        if (canal is { SetsHeadwater: true })
+            head++;
+        if (canal is { SetsTailwater: true })
+            tail++;
         var error = read.Optional(d.Error, Dimension.Length, path + ".error", 0, 100) ?? 0;
         var direct = (string.IsNullOrWhiteSpace(d.Gross) ? 0 : 1) + (d.Measured is null ? 0 : 1);
         if (direct + (head + tail > 0 ? 1 : 0) > 1)
@@ -36,9 +51,11 @@ internal static class HeadBuilder
 
         var headwater = d.UpstreamPressure is { } up && head == 1
             ? PressureBuilder.Build(up, path + ".upstreamPressure", site, read)
+            : canal is { SetsHeadwater: true } && head == 1 ? canal.Upstream.NormalLevels()
             : Level(d.Headwater, d.HeadwaterByMonth, d.HeadwaterRating, d.HeadwaterCrest, head, path + ".headwater", true, read);
         var tailwater = d.DownstreamPressure is { } down && tail == 1
             ? PressureBuilder.Build(down, path + ".downstreamPressure", site, read)
+            : canal is { SetsTailwater: true } && tail == 1 ? canal.Downstream.NormalLevels()
             : Level(d.Tailwater, d.TailwaterByMonth, d.TailwaterRating, null, tail, path + ".tailwater", false, read);
         if (read.Problems.Count > before || headwater is null || tailwater is null)
             return null;
@@ -70,7 +87,7 @@ internal static class HeadBuilder
     {
         if (ways > 1)
         {
-            read.Refuse(path, one, "the level is given in more than one way", "one of: a level, twelve levels by month, a rating, a crest, a pressure");
+            read.Refuse(path, one, "the level is given in more than one way", "one of: a level, twelve levels by month, a rating, a crest, a pressure, the canal");
             return null;
         }
 

@@ -327,6 +327,9 @@ public sealed class HeadDocument
 
     /// <summary>Error of the head, a length.</summary>
     public string? Error { get; set; }
+
+    /// <summary>The canal above and below a drop.</summary>
+    public CanalDocument? Canal { get; set; }
 }
 
 /// <summary>Pressure at a gauge on a pipe.</summary>

@@ -90,6 +90,7 @@ internal static class StudyDocumentFields
         DownstreamPressure = r.Object("downstreamPressure", Pressure),
         Measured = r.Object("measured", m => new MeasuredHeadDocument { Gauge = m.Text("gauge"), GaugeHeight = m.Text("gaugeHeight"), Steps = m.Texts("steps"), Error = m.Text("error") }),
         Error = r.Text("error"),
+        Canal = r.Object("canal", CanalDocument.Fields),
     };
 
     private static PressureDocument Pressure(JsonObjectReader r) => new()

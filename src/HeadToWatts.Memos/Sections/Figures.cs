@@ -23,6 +23,10 @@ internal static class Figures
     // A line for each year wants some height to be told from the next.
     private static double Years(MemoContext memo) => Math.Clamp(40 + (9 * (memo.Result.Summary?.Years.All.Count ?? 1)), 100, 420);
 
+    public static Drawing? Levels(MemoContext memo) => LevelsChart.Draw(memo.Result, memo.Show, Size);
+
+    public static Drawing? CanalDrop(MemoContext memo) => CanalDropDrawing.Draw(memo.Result, memo.Show, Size);
+
     public static Drawing Envelopes(MemoContext memo) => EnvelopeChart.Draw(memo.Result, memo.Show, Size with { Height = 290 });
 
     public static Drawing? DesignFlow(MemoContext memo) => DesignFlowChart.Draw(memo.Result, memo.Show, Size);

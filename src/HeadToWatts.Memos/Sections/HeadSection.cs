@@ -20,6 +20,8 @@ internal static class HeadSection
             : "The two water levels are held constant; if the tailwater rises with the flow, head is lost that is not in these figures."));
         NetHeads(memo);
         Levels(memo);
+        if (Figures.Levels(memo) is { } levels)
+            body.Figure("fig-levels", levels, "Water levels against the flow passing, and the net head that is left; where it is none the plant stands.");
         if (losses.Elements.Count == 0)
         {
             body.Say("There is no waterway before the machine in this study: intake, rack and draft tube are taken to be part of it, without a loss of their own.");

@@ -13,6 +13,7 @@ internal static class MemoSections
         RecordSection.Write,
         UsableWaterSection.Write,
         HeadSection.Write,
+        CanalSection.Write,
         TurbineSection.Write,
         DesignFlowSection.Write,
         EnergySection.Write,

@@ -16,6 +16,9 @@ public sealed record HeadInput(GrossHead Gross, double HeadwaterM, double Tailwa
     /// <summary>Tailwater level by flow or month; null when it stays at <see cref="TailwaterM"/>.</summary>
     public LevelRule? TailwaterRule { get; init; }
 
+    /// <summary>The canal with its drop; null when none is given.</summary>
+    public CanalInput? Canal { get; init; }
+
     /// <summary>Error of the measured head, m, one standard error or the author's own bound; zero when none is stated.</summary>
     public double ErrorM { get; init; }
 

@@ -17,6 +17,7 @@ public static class WorkingsList
             .. FlowWorkings.Of(result, show),
             .. LowFlowWorkings.Of(result, show),
             .. HeadWorkings.Of(result, show),
+            .. CanalWorkings.Of(result, show),
             .. WaterwayWorkings.Of(result, show),
             .. StopWorkings.Of(result, show),
             .. TurbineWorkings.Of(result, show),
