@@ -76,11 +76,19 @@ public static class CanalDropDrawing
                 new LabelSpot(new Point(frame.Right - 4, frame.Bottom - 4), TextAnchor.End)]);
         }
 
+        frame.HoverBands(
+        [
+            (At(left + (0.3 * reachM), Bed1(left + (0.3 * reachM)) + aboveM), Hover("above the drop", up)),
+            (At(basinM + (0.3 * reachM), Bed2(basinM + (0.3 * reachM)) + belowM), Hover("below the drop", down)),
+        ]);
         return frame.Canvas.Finish(
             "The canal through its drop, plant stopped",
             $"With {show.Flow(canal.AtFull.FlowM3PerS)}: normal depth {show.Length(aboveM)} above and {show.Length(belowM)} below; the energy line falls {show.Length(energyAbove - energyBelow)} over the drop.",
             size.Width,
             size.Height);
+
+        string Hover(string where, HeadToWatts.Hydraulics.Canals.CanalFlowResult at) =>
+            $"{where}, {show.Flow(at.FlowM3PerS)}: normal depth {show.Length(at.NormalDepthM ?? 0)}, critical {(at.CriticalDepthM is { } c ? show.Length(c) : "not reached")}, Froude number {UnitDisplay.Number(at.FroudeNumber ?? 0)}";
 
         void Depth(double x, double bed, double normal, double? critical)
         {

@@ -22,7 +22,7 @@ public static partial class FieldNames
         ["fittings"] = "fitting", ["fitting"] = "kind", ["k"] = "K", ["count"] = "how many", ["wallThickness"] = "wall thickness", ["pressureRating"] = "pressure rating", ["endElevation"] = "elevation at its lower end",
         ["stop"] = "stop", ["closingTime"] = "closing time", ["law"] = "what falls evenly", ["runawayFlow"] = "flow at runaway", ["runawayTime"] = "time to runaway", ["restraint"] = "how the pipes are held", ["pressureLimit"] = "limit before the machine",
         ["turbine"] = "turbine", ["type"] = "type", ["efficiencyTable"] = "efficiency row", ["efficiency"] = "efficiency", ["leastFlow"] = "least flow",
-        ["unitSizes"] = "unit", ["share"] = "share", ["loadSplit"] = "load split", ["hillChart"] = "chart, head", ["rows"] = "row", ["testedDiameter"] = "tested diameter",
+        ["unitSizes"] = "unit", ["share"] = "share", ["loadSplit"] = "load split", ["hillChart"] = "chart, head", ["testedDiameter"] = "tested diameter",
         ["runnerDiameter"] = "runner diameter", ["awayFromRatedHead"] = "away from the rated head", ["leastHead"] = "least head", ["runnerHeight"] = "runner above the tailwater", ["pump"] = "pump", ["speed"] = "speed",
         ["losses"] = "from shaft to meter", ["drive"] = "gear or belt", ["generator"] = "generator", ["transformer"] = "transformer", ["line"] = "line", ["generatorDetail"] = "generator", ["transformerDetail"] = "transformer", ["lineDetail"] = "line", ["powerFactor"] = "power factor",
         ["noLoadLoss"] = "no-load loss", ["loadLoss"] = "load loss", ["whenStanding"] = "while the plant stands",

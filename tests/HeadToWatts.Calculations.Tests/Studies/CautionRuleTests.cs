@@ -6,6 +6,7 @@ using HeadToWatts.EnergyYield.Electrical;
 using HeadToWatts.FlowRecords;
 using HeadToWatts.FlowRecords.Reserved;
 using HeadToWatts.FlowRecords.Transfer;
+using HeadToWatts.Hydraulics.Canals;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Cautions;
@@ -54,6 +55,12 @@ public class CautionRuleTests
         new("tailwater-constant", Quiet.WithHead(8).WithPipes(), "26.2 ft", "8.00 m") { Spares = Quiet.WithHead(10.5).WithPipes() },
 
         // The flow exceeded 2 % of the time passes with 2.499 m3/s and a tailwater of 19.98 m; at the design flow 1.9 m3/s pass and it stands at 8 m.
+        // A rectangular canal 3 m wide on both sides, in which 2.5 m3/s is the most: q = 0.83 m2/s.
+        new("bypass-not-stated", Quiet.WithCanal(""), "full flow of 88.3 cfs must pass", "full flow of 2.50 m3/s must pass") { Spares = Quiet.WithCanal("the old drop") },
+        new("basin-too-small", Quiet.WithCanal("the old drop", new BasinMeasures(3, 1, 0)), "The bed below would be scoured", "The bed below would be scoured")
+            { Spares = Quiet.WithCanal("the old drop", new BasinMeasures(3, 60, -30)) },
+        new("canal-fast-or-full", Quiet.WithCanal("the old drop", null, 0.05), "runs faster than the critical flow", "At 2.50 m3/s the canal above the drop runs faster") { Spares = Quiet.WithCanal("the old drop") },
+
         new("high-water-takes-head", Quiet.WithTailwater(new(1.5, 0), new(2.5, 20)), "gross head is 98.5 ft against 138 ft at the design flow", "gross head is 30.0 m against 42.0 m at the design flow")
             { Spares = Quiet.WithTailwater(new(1.5, 0), new(2.5, 10)) },
         new("high-water-takes-head", Quiet.WithTailwater(new(1.5, 0), new(2.0, 5), new(2.5, 60)), "stands as high as the headwater", "stands as high as the headwater"),

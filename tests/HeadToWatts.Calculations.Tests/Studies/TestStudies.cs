@@ -3,6 +3,8 @@ using HeadToWatts.Basis.Units;
 using HeadToWatts.EnergyYield;
 using HeadToWatts.Files.StudyFiles;
 using HeadToWatts.FlowRecords;
+using HeadToWatts.Hydraulics.Canals;
+using HeadToWatts.Hydraulics.Canals.Sections;
 using HeadToWatts.Hydraulics.Friction;
 using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Hydraulics.LocalLosses;
@@ -60,6 +62,13 @@ internal static class TestStudies
     /// <summary>A headwater held at 50 m and a tailwater measured at some flows.</summary>
     public static AlternativeInput WithTailwater(this AlternativeInput input, params LevelPoint[] points) =>
         input with { Head = new HeadInput(GrossHead.FromMetres(50), 50, 0, true) { TailwaterRule = new RatedLevel(points) } };
+
+    /// <summary>A rectangular canal, 3 m wide and with a bed slope of 0.0005, above and below the fall.</summary>
+    public static AlternativeInput WithCanal(this AlternativeInput input, string bypass, BasinMeasures? basin = null, double bedSlopeRatio = 0.0005)
+    {
+        CanalSide Side(double bedM) => new(new CanalFlow(new RectangularSection(3), 0.015, bedSlopeRatio), bedM, null);
+        return input with { Head = input.Head with { Canal = new CanalInput(Side(49), Side(-1), basin, false, false, [], bypass) } };
+    }
 
     public static AlternativeInput WithPipes(this AlternativeInput input, params PipeElement[] pipes) =>
         input with { Waterway = input.Waterway with { Elements = pipes } };
