@@ -22,6 +22,7 @@ internal static class RecordCommand
         var order = new Option<string?>("--dates") { Description = "month-day or day-month, where the file does not decide it.", HelpName = "ORDER" };
         var column = new Option<string?>("--column") { Description = "The column with the flows, where there are several.", HelpName = "NAME" };
         var recipe = new Option<string?>("--recipe") { Description = "A reading recipe, for a file of no known format.", HelpName = "FILE.json" };
+        var rating = new Option<string?>("--rating") { Description = "A rating, for a file of water levels; as flow.record.rating of a study file.", HelpName = "FILE.json" };
         var propose = new Option<bool>("--propose") { Description = "Write a proposed recipe to standard output; its evidence and open questions to standard error." };
         var gaps = new Option<string?>("--gaps") { Description = "left out, interpolated up to N days, or whole years only.", HelpName = "CHOICE" };
         var years = new Option<string?>("--year-starts") { Description = "Month in which a whole year begins.", HelpName = "MONTH" };
@@ -31,7 +32,7 @@ internal static class RecordCommand
         var share = new Option<string?>("--day-share") { Description = "Share of a day over which the flow must be known.", HelpName = "PERCENT" };
         var step = new Option<string?>("--longest-step") { Description = "Longest time between two values that is bridged.", HelpName = "TIME" };
         var write = new Option<string?>("--write") { Description = "Write the daily record, after all choices, as a table of dates and flows.", HelpName = "FILE.csv" };
-        var command = new Command("record", "Say what is in a flow file.") { file, unit, order, column, recipe, propose, gaps, years, negatives, estimated, repeats, share, step, write };
+        var command = new Command("record", "Say what is in a flow file.") { file, unit, order, column, recipe, rating, propose, gaps, years, negatives, estimated, repeats, share, step, write };
         command.SetAction((parsed, cancellation) =>
         {
             var path = parsed.GetValue(file)!;
@@ -54,6 +55,8 @@ internal static class RecordCommand
                     LongestStep = parsed.GetValue(step),
                 },
             };
+            if (parsed.GetValue(rating) is { } ratingPath && (about.Rating = Rating(terminal, ratingPath)) is null)
+                return Task.FromResult(CommandLine.Refused);
             if (parsed.GetValue(recipe) is not { } recipePath)
                 return Task.FromResult(Run(terminal, path, about, parsed.GetValue(write), cancellation));
             if (Recipe(terminal, recipePath) is not { } document)
@@ -62,6 +65,20 @@ internal static class RecordCommand
             return Task.FromResult(Run(terminal, path, about, parsed.GetValue(write), cancellation));
         });
         return command;
+    }
+
+    private static RatingDocument? Rating(Terminal terminal, string path)
+    {
+        using var stream = terminal.Open(path);
+        if (stream is null)
+            return null;
+        using var reader = new StreamReader(stream);
+        var document = RatingDocument.Parse(Path.GetFileName(path), reader.ReadToEnd());
+        if (document.IsGood)
+            return document.Value;
+        foreach (var problem in document.Problems)
+            terminal.Error.WriteLine(problem);
+        return null;
     }
 
     private static RecipeDocument? Recipe(Terminal terminal, string path)

@@ -17,8 +17,14 @@ internal static class Summary
         Line("energy in a mean year", UnitDisplay.Energy(annual.AnnualEnergyKwh), r.Energy.Days?.DryYearKwh is { } dry ? $"{UnitDisplay.Energy(dry)} in a dry year" : "");
         Line("three points less", UnitDisplay.Energy(r.Energy.ThreePointsLowerKwh), "with the turbine's efficiency lower by so much at every load");
         Line("plant factor", UnitDisplay.Percent(annual.PlantFactor), $"{UnitDisplay.Number(annual.FullLoadHours)} full-load hours, {UnitDisplay.Number(annual.RunningHours)} h running");
+        if (r.Input.Flow.Origin is { } origin)
+            output.WriteLine($"  flow not measured      {origin.Grade,12}   {origin.Reason}");
+        if (r.Summary?.SevenQTen is { } low)
+            Line("7Q10", show.Flow(low.FlowM3PerS), $"Q95 {show.Flow(r.Summary.Q95M3PerS ?? 0)}, mean annual flow {show.Flow(r.Summary.MeanAnnualM3PerS ?? 0)}");
         Line("design flow", show.Flow(r.Flow.DesignFlowM3PerS), $"{(r.Flow.DesignFlowIsSuggested ? "suggested" : "given")}, reached {UnitDisplay.Percent(r.Flow.DesignFlowExceedance)} of the year");
         Line("net head", show.Length(r.Head.NetHeadAtDesignM), $"of {show.Length(r.Head.GrossHeadM)} gross");
+        if (r.Canal is { FallOfEnergyM: { } fall } canal)
+            Line("canal, energy falls", show.Length(fall), canal.Basin is null ? "" : canal.Basin.HoldsTheJump ? "the basin holds the jump of the full flow" : "the basin does NOT hold the jump of the full flow");
         Line("velocity", show.Velocity(r.Waterway.HighestVelocityMPerS), $"limit {show.Velocity(r.Waterway.VelocityLimitMPerS)}");
         Line("turbine", $"{r.Turbine.Chosen.Type.Name} x {r.Turbine.Chosen.UnitCount}", r.Turbine.Chosen.Fit.IsInside ? "inside its envelope" : "OUTSIDE its envelope");
         if (r.Money is { } money)

@@ -144,6 +144,20 @@ public sealed class CommandLineTests : IDisposable
         Assert.Equal(CommandLine.Refused, Run("record", In("r.txt"), "--recipe", In("recipe.json")).Code);
     }
 
+    [Fact]
+    public void Record_reads_levels_by_a_rating_and_counts_those_outside()
+    {
+        File.WriteAllText(In("levels.csv"), "date,stage_m\n2020-01-01,1.5\n2020-01-02,2.5\n2020-01-03,9\n");
+        File.WriteAllText(In("rating.json"), "{ \"kind\": \"table\", \"rows\": [ { \"level\": \"1 m\", \"flow\": \"0 m3/s\" }, { \"level\": \"3 m\", \"flow\": \"4 m3/s\" } ] }");
+        var (code, output, error) = Run("record", In("levels.csv"), "--rating", In("rating.json"), "--write", In("flows.csv"));
+        Assert.Equal("", error);
+        Assert.Equal(CommandLine.Done, code);
+        Assert.Contains("Water levels outside the rating: 1 (row 4", output, StringComparison.Ordinal);
+        Assert.StartsWith("date,flow (m3/s)\n2020-01-01,1\n2020-01-02,3\n", File.ReadAllText(In("flows.csv")), StringComparison.Ordinal);
+        File.WriteAllText(In("rating.json"), "{ \"knid\": \"table\" }");
+        Assert.Equal(CommandLine.Refused, Run("record", In("levels.csv"), "--rating", In("rating.json")).Code);
+    }
+
     private static string Site(string name)
     {
         for (var at = new DirectoryInfo(AppContext.BaseDirectory); at is not null; at = at.Parent)

@@ -66,6 +66,8 @@ public static class ResultsJson
         json.WriteBoolean("turbineInsideEnvelope", r.Turbine.Chosen.Fit.IsInside);
         json.WriteNumber("specificWeightNPerM3", r.Site.SpecificWeightNPerM3);
         json.WriteNumber("gravityMPerS2", r.Site.GravityMPerS2);
+        FlowJson.Write(json, r);
+        CanalJson.Write(json, r);
         Water(json, r);
         Steps(json, r);
         MachineJson.Electrical(json, r);

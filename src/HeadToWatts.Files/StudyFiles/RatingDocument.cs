@@ -1,3 +1,6 @@
+using System.Text.Json;
+using HeadToWatts.Basis.Problems;
+
 namespace HeadToWatts.Files.StudyFiles;
 
 /// <summary>How water levels become flows: a table, an equation, or a weir or flume; every quantity a text.</summary>
@@ -59,6 +62,27 @@ public sealed class RatingDocument
 
     /// <summary>Shifts of the rating from a day on.</summary>
     public List<ShiftDocument>? Shifts { get; set; }
+
+    /// <summary>Reads a rating that stands in a file of its own, or lists every problem.</summary>
+    /// <param name="name">Name of the file, for problems.</param>
+    /// <param name="text">Its text.</param>
+    public static Checked<RatingDocument> Parse(string name, string text)
+    {
+        ArgumentNullException.ThrowIfNull(text);
+        try
+        {
+            using var json = JsonDocument.Parse(text.TrimStart('\ufeff'), new JsonDocumentOptions { CommentHandling = JsonCommentHandling.Skip, AllowTrailingCommas = true, MaxDepth = 8 });
+            var problems = new List<Problem>();
+            var reader = new JsonObjectReader(json.RootElement, "", problems);
+            var document = Fields(reader);
+            reader.Done();
+            return problems.Count == 0 ? Checked.Of(document) : Checked.Refused<RatingDocument>(problems.Select(p => p with { Where = $"{name} {p.Where}" }));
+        }
+        catch (JsonException e)
+        {
+            return Checked.Refused<RatingDocument>(new Problem(name, $"line {((e.LineNumber ?? 0) + 1).ToString(System.Globalization.CultureInfo.InvariantCulture)}", "this is not JSON", "a rating, as flow.record.rating of a study file"));
+        }
+    }
 
     internal static RatingDocument Fields(JsonObjectReader r) => new()
     {

@@ -1,5 +1,6 @@
 using System.Globalization;
 using HeadToWatts.Basis.Units;
+using HeadToWatts.FlowRecords.Devices;
 using HeadToWatts.FlowRecords.Quality;
 using HeadToWatts.FlowRecords.Ratings;
 
@@ -24,6 +25,10 @@ internal sealed class RatedRows(RecordRows rows, RecordAbout about, Func<PlacedR
         if (rows.Options.Stage is not { } stage)
             return;
         rows.Assume($"the levels become flows by a {stage.Rating.Describe()}");
+        if (stage.Rating is DeviceRating { Device: { SubmergenceLimitRatio: > 0 } device })
+            rows.Assume($"free flow is taken: with the water below at more than {(device.SubmergenceLimitRatio * 100).ToString("0", CultureInfo.InvariantCulture)} % of the head above, the device reads too high");
+        else if (stage.Rating is DeviceRating)
+            rows.Assume("free flow is taken: with the water below above the crest, the device reads too high");
         foreach (var shift in stage.Shifts.Shifts)
             rows.Assume($"from {shift.From.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture)} on {shift.ShiftM.ToString("0.####", CultureInfo.InvariantCulture)} m is added to the level");
     }
