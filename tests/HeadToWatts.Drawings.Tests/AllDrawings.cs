@@ -44,6 +44,7 @@ public static class AllDrawings
             ("staircase", EnergyStaircaseChart.Draw(result, s)),
             ("levels", LevelsChart.Draw(result, show, s)),
             ("canal drop", CanalDropDrawing.Draw(Scenarios.WithCanal(result), show, s)),
+            ("gaps", GapTimeline.Draw(result, s with { Height = 110 })),
             ("hydrograph", HydrographChart.Draw(result, show, s)),
             ("calendar of flow", DayCalendar.DrawFlow(result, s)),
             ("calendar of energy", DayCalendar.DrawEnergy(result, s)),

@@ -28,6 +28,13 @@ public class RecordDrawingTests
     }
 
     [Fact]
+    public void The_time_line_names_the_longest_gap()
+    {
+        var input = new GapTimelineInput(new DateOnly(2010, 1, 1), new DateOnly(2019, 12, 31), [new(new DateOnly(2012, 3, 4), 12), new(new DateOnly(2015, 6, 1), 40)]);
+        Assert.Equal("1 Jan 2010 to 31 Dec 2019: 2 gaps, 52 days; longest 40 days from 1 Jun 2015.", GapTimeline.Draw(input, DrawingSize.Wide with { Height = 110 }).Description);
+    }
+
+    [Fact]
     public void The_hydrograph_names_the_highest_and_lowest_of_the_medians()
     {
         DayOfYearBand[] days = [.. Enumerable.Range(0, 360).Select(i => (Month: (i / 30) + 1, Day: (i % 30) + 1)).Where(d => d.Month != 2 || d.Day <= 28)

@@ -12,6 +12,8 @@ internal static class Figures
 
     public static Drawing FlowDuration(MemoContext memo) => FlowDurationChart.Draw(memo.Result, memo.Show, Size);
 
+    public static Drawing? Gaps(MemoContext memo) => GapTimeline.Draw(memo.Result, Size with { Height = 72 });
+
     public static Drawing? Hydrograph(MemoContext memo) => HydrographChart.Draw(memo.Result, memo.Show, Size with { Height = 190 });
 
     public static Drawing? Curves(MemoContext memo) => CurvesChart.DrawYears(memo.Result, memo.Show, Size);

@@ -52,6 +52,8 @@ internal static class FlowDataSection
             Row("Days of negative flow", MemoContext.Count(record.NegativeCount), record.NegativeCount == 0 ? "nothing to do" : "counted as no flow"),
             Row("Least, mean, most", $"{show.Flow(record.SmallestM3PerS)}, {show.Flow(record.MeanM3PerS)}, {show.Flow(record.LargestM3PerS)}", "as read"),
         ]);
+        if (record.MissingCount > 0 && Figures.Gaps(memo) is { } gaps)
+            memo.Body.Figure("fig-gaps", gaps, "The record on a time line; its gaps are cut out.");
         memo.Body.Say((flow.Origin is null ? "No day was estimated here. " : "") + "Whether the station estimated some, and how well its rating holds, must be asked of its owner. Flow measured upstream of turnouts is not the flow at a drop below them.", ParagraphKind.Note);
     }
 
