@@ -27,6 +27,8 @@ internal static class Summary
             Line("canal, energy falls", show.Length(fall), canal.Basin is null ? "" : canal.Basin.HoldsTheJump ? "the basin holds the jump of the full flow" : "the basin does NOT hold the jump of the full flow");
         Line("velocity", show.Velocity(r.Waterway.HighestVelocityMPerS), $"limit {show.Velocity(r.Waterway.VelocityLimitMPerS)}");
         Line("turbine", $"{r.Turbine.Chosen.Type.Name} x {r.Turbine.Chosen.UnitCount}", r.Turbine.Chosen.Fit.IsInside ? "inside its envelope" : "OUTSIDE its envelope");
+        if (r.Pumping is { } pumping)
+            Line("pumping a year", UnitDisplay.Energy(pumping.Pumping.ElectricKwh), pumping.CoveredInTheMonthKwh is { } covered ? $"{UnitDisplay.Energy(covered)} of it generated in the same month" : "months not known without a daily record");
         if (r.Money is { } money)
         {
             Line("net present value", MoneyText.Amount(money.Measures.NetPresentValueAmount, money.Basis), MoneyText.Terms(money.Flow.Plan));

@@ -60,6 +60,7 @@ public static class Study
         var passing = input.Head.Moves
             ? new MovingHead(input.Head.Headwater, input.Head.Tailwater, input.Flow.Allocation, RatedHead.MiddleMonth(input.Flow)).PassingM3PerS(designFlow)
             : designFlow;
+        var pumping = PumpingStudy.Of(input.Pumping, site, annual, days);
         var canal = CanalStudy.Of(input.Head.Canal, passing, curve.FlowAt(0), site.GravityMPerS2);
 
         return new StudyResult(
@@ -106,10 +107,11 @@ public static class Study
                 HeadBehaviour = design.HeadBehaviour,
             },
             new EnergyResult(plant, annual, days, DrawingPoints(plant, supply), atMean) { WithHeadError = HeadError.Range(input, design, supply), Electrical = ElectricalResult.Of(plant), ThreePointsLowerKwh = CurveError.LowerKwh(plant, supply, annual.AnnualEnergyKwh) },
-            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, stop, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. canal?.Uses ?? [], .. money?.Uses ?? []]))
+            MethodUse.Union([.. StudyMethods.Uses(input, site, waterway, surge, stop, choice, LowestFlowM3PerS(choice, supply), design.HeadBehaviour), .. canal?.Uses ?? [], .. pumping?.Pumping.Uses ?? [], .. money?.Uses ?? []]))
         {
             Summary = RecordSummary.Of(input.Flow),
             Canal = canal,
+            Pumping = pumping,
             Money = money,
         };
     }

@@ -30,6 +30,9 @@ public sealed record StudyResult(
     /// <summary>Whether it pays; null when no costs and no income are given.</summary>
     public Worth.MoneyResult? Money { get; init; }
 
+    /// <summary>Pumping beside generation; null when no pumping is given.</summary>
+    public PumpingSide? Pumping { get; init; }
+
     /// <summary>The canal above and below a drop; null when none is given.</summary>
     public CanalResult? Canal { get; init; }
 

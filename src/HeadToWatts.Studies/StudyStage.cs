@@ -18,6 +18,9 @@ public enum StudyStage
     /// <summary>Energy.</summary>
     Energy,
 
+    /// <summary>Pumping.</summary>
+    Pumping,
+
     /// <summary>Money.</summary>
     Money,
 }

@@ -12,7 +12,7 @@ namespace HeadToWatts.Browser.Tests;
 [Collection(nameof(BrowserRun))]
 public sealed class WorksheetTests(BrowserRun run)
 {
-    private static readonly string[] Stages = ["flow", "head", "waterway", "turbine", "energy", "money", "cautions", "memo"];
+    private static readonly string[] Stages = ["flow", "head", "waterway", "turbine", "energy", "pumping", "money", "cautions", "memo"];
 
     [SkippableTheory]
     [InlineData(ColorScheme.Light)]

@@ -45,6 +45,7 @@ public static class AllDrawings
             ("levels", LevelsChart.Draw(result, show, s)),
             ("canal drop", CanalDropDrawing.Draw(Scenarios.WithCanal(result), show, s)),
             ("gaps", GapTimeline.Draw(result, s with { Height = 110 })),
+            ("pumping", PumpingMonthsChart.Draw([.. Enumerable.Range(1, 12).Select(m => new PumpingMonth(m, m * 900, m is > 4 and < 10 ? 15_000 : 0))], s)),
             ("hydrograph", HydrographChart.Draw(result, show, s)),
             ("calendar of flow", DayCalendar.DrawFlow(result, s)),
             ("calendar of energy", DayCalendar.DrawEnergy(result, s)),

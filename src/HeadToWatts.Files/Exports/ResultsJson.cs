@@ -76,6 +76,7 @@ public static class ResultsJson
         Nullable(json, "unitStartsPerYear", r.Energy.Days?.UnitStartsPerYear);
         Nullable(json, "stepUpPoints", r.Turbine.StepUp?.PeakChange * 100);
         MachineJson.Split(json, r);
+        PumpingJson.Write(json, r);
         MoneyJson.Write(json, r);
         Elements(json, r);
         StopJson.Write(json, r.Waterway.Stop);

@@ -60,6 +60,7 @@ public static class StudyBuilder
         var waterway = WaterwayBuilder.Build(d.Waterway, path + ".waterway", read);
         var turbine = TurbineBuilder.Build(d.Turbine, path + ".turbine", read);
         var train = TrainBuilder.Build(d.Losses, path + ".losses", read);
+        var pumping = PumpingBuilder.Build(d.Pumping, path + ".pumping", site, read);
         var money = MoneyBuilder.Build(d.Money, path + ".money", read);
 
         // With a problem anywhere the value is thrown away by the caller; the placeholders only keep the types whole.
@@ -74,6 +75,7 @@ public static class StudyBuilder
             read.Problems.Count == before ? [.. read.Assumptions, .. MonthsWithoutRecord(head, flow)] : [])
         {
             Money = money,
+            Pumping = pumping,
         };
     }
 

@@ -68,6 +68,9 @@ public sealed class AlternativeDocument
 
     /// <summary>Costs and income; none when money is left out.</summary>
     public MoneyDocument? Money { get; set; }
+
+    /// <summary>The pumping set against the generation; none when left out.</summary>
+    public PumpingDocument? Pumping { get; set; }
 }
 
 /// <summary>Place and water.</summary>

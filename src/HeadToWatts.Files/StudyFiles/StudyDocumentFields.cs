@@ -28,6 +28,7 @@ internal static class StudyDocumentFields
         Turbine = r.Object("turbine", Turbine) ?? new TurbineDocument(),
         Losses = r.Object("losses", Losses) ?? new LossesDocument(),
         Money = r.Object("money", MoneyFields.Read),
+        Pumping = r.Object("pumping", PumpingDocument.Fields),
     };
 
     private static SiteDocument Site(JsonObjectReader r) => new()
@@ -104,7 +105,7 @@ internal static class StudyDocumentFields
 
     private static LevelRowDocument LevelRow(JsonObjectReader r) => new() { Flow = r.Text("flow"), Level = r.Text("level") };
 
-    private static WaterwayDocument Waterway(JsonObjectReader r) => new()
+    internal static WaterwayDocument Waterway(JsonObjectReader r) => new()
     {
         Friction = r.Text("friction"),
         KineticEnergyCoefficient = r.NumberText("kineticEnergyCoefficient"),

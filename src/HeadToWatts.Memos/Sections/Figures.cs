@@ -29,6 +29,8 @@ internal static class Figures
 
     public static Drawing? CanalDrop(MemoContext memo) => CanalDropDrawing.Draw(memo.Result, memo.Show, Size);
 
+    public static Drawing? Pumping(MemoContext memo) => PumpingMonthsChart.Draw(memo.Result, Size with { Height = 200 });
+
     public static Drawing Envelopes(MemoContext memo) => EnvelopeChart.Draw(memo.Result, memo.Show, Size with { Height = 290 });
 
     public static Drawing? DesignFlow(MemoContext memo) => DesignFlowChart.Draw(memo.Result, memo.Show, Size);

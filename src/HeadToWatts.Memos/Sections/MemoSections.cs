@@ -17,6 +17,7 @@ internal static class MemoSections
         TurbineSection.Write,
         DesignFlowSection.Write,
         EnergySection.Write,
+        PumpingSection.Write,
         MoneySection.Write,
         CautionsSection.Write,
         HazardsSection.Write,

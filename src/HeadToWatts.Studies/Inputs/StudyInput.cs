@@ -26,6 +26,9 @@ public sealed record AlternativeInput(
     PowerTrain Train,
     IReadOnlyList<string> Assumptions)
 {
+    /// <summary>The pumping set against the generation; null when none is given.</summary>
+    public PumpingInput? Pumping { get; init; }
+
     /// <summary>Costs and income; null when none are given.</summary>
     public MoneyInput? Money { get; init; }
 }

@@ -22,6 +22,7 @@ public static class WorkingsList
             .. StopWorkings.Of(result, show),
             .. TurbineWorkings.Of(result, show),
             .. EnergyWorkings.Of(result, show),
+            .. PumpingWorkings.Of(result, show),
             .. MoneyWorkings.Of(result),
         ];
     }

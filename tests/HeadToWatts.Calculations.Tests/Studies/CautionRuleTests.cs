@@ -109,6 +109,10 @@ public class CautionRuleTests
         new("small-plant", Quiet.WithFlow(f => f with { DesignFlowM3PerS = 0.05 }).WithPipes(TestStudies.Pipe(0.2, 100)), "below the 50 kW", "below the 50 kW"),
         new("high-efficiency", Quiet.WithMakersEfficiency(0.95) with { Train = Quiet.Train with { DriveEfficiency = 1, GeneratorEfficiency = 1, TransformerEfficiency = 1, LineEfficiency = 1 } }, "95.0 % at best", "95.0 % at best"),
         new("always-available", Quiet with { Train = Quiet.Train with { Availability = 1 } }, "100 %", "100 %") { Spares = Quiet with { Train = Quiet.Train with { Availability = 0.99 } } },
+        // 0.1 m3/s against 40 m at 40 percent: 60 percent of the criterion of 66 percent.
+        new("pump-below-criterion", Quiet.WithPump(0.4), "the well lifts 60.6 %", "the well lifts 60.6 %") { Spares = Quiet.WithPump(0.66) },
+        new("suction-too-low", Quiet.WithPump(0.66, 9, 4), "where its maker requires 13.1 ft", "where its maker requires 4.00 m") { Spares = Quiet.WithPump(0.66, 2, 4) },
+        new("pumping-on-another-meter", Quiet.WithPump(0.66), "a year of pumping stand beside", "a year of pumping stand beside"),
         new("mean-flow-trap", Quiet.WithCurve(BeyondLastRow.Dry, new(0, 4), new(0.5, 4)), "8760 h would claim", "over the whole curve it is"),
         // Whole money: 2 300 000 of works and contingency 25 %, a tenth of engineering; each case takes one thing away.
         new("no-cost-given", Paying(m => m with { CostLines = [] }), "is what they may cost at the most", "is what they may cost at the most") { Spares = Whole },

@@ -10,6 +10,7 @@ using HeadToWatts.Hydraulics.Levels;
 using HeadToWatts.Hydraulics.LocalLosses;
 using HeadToWatts.Hydraulics.Pipes;
 using HeadToWatts.Hydraulics.Waterways;
+using HeadToWatts.Pumping;
 using HeadToWatts.Studies;
 using HeadToWatts.Studies.Inputs;
 using HeadToWatts.Turbines;
@@ -69,6 +70,12 @@ internal static class TestStudies
         CanalSide Side(double bedM) => new(new CanalFlow(new RectangularSection(3), 0.015, bedSlopeRatio), bedM, null);
         return input with { Head = input.Head with { Canal = new CanalInput(Side(49), Side(-1), basin, false, false, [], bypass) } };
     }
+
+    /// <summary>A well of 0.1 m3/s against 40 m that lifts 100 000 m3 in July.</summary>
+    public static AlternativeInput WithPump(this AlternativeInput input, double efficiency, double? suctionLiftM = null, double? requiredM = null) => input with
+    {
+        Pumping = new PumpingInput([new PumpingPlantInput(new PumpingPlant("the well", EnergySources.All[0], 0.1, [.. Enumerable.Range(1, 12).Select(m => m == 7 ? 1e5 : 0)], new PumpingHead(40, 0, 0, 0), efficiency, null), suctionLiftM, 0, requiredM)]),
+    };
 
     public static AlternativeInput WithPipes(this AlternativeInput input, params PipeElement[] pipes) =>
         input with { Waterway = input.Waterway with { Elements = pipes } };

@@ -48,10 +48,10 @@ public sealed class StudyPageTests : Visitor
         page.WaitForAssertion(() => Assert.EndsWith(" m", Figure(page, "Net head"), StringComparison.Ordinal), Patience);
 
         // 66 in = 1676.4 mm by the international inch.
-        Assert.Equal("1676.4", page.FindByLabel("Inside diameter").GetAttribute("value"));
+        page.WaitForAssertion(() => Assert.Equal("1676.4", page.FindByLabel("Inside diameter").GetAttribute("value")), Patience);
         Assert.Equal(before.Replace("\"units\": \"US\"", "\"units\": \"SI\"", StringComparison.Ordinal), StudyFileWriter.Write(Document));
         page.FindByLabel("Inside diameter").Input("1500");
-        Assert.Equal("1500 mm", Document.Alternatives[0].Waterway.Elements[0].InsideDiameter);
+        page.WaitForAssertion(() => Assert.Equal("1500 mm", Document.Alternatives[0].Waterway.Elements[0].InsideDiameter), Patience);
     }
 
     [Fact]

@@ -16,6 +16,7 @@ public static class StageDefinitions
         new("waterway", "Waterway", typeof(WaterwayStage), StudyStage.Waterway, (s, r) => $"{s.Show.Length(r.Waterway.AtDesign.TotalLossM)} lost, {UnitDisplay.Percent(r.Waterway.LossShareOfGrossHead)}", ["waterway"]),
         new("turbine", "Turbine", typeof(TurbineStage), StudyStage.Turbine, (_, r) => $"{AnswerFigures.ShortName(r.Turbine.Chosen.Type.Name)}, {Count(r.Turbine.Chosen.UnitCount)}", ["turbine", "site.gridFrequency"]),
         new("energy", "Energy", typeof(EnergyStage), StudyStage.Energy, (_, r) => $"{UnitDisplay.Energy(r.Energy.Annual.AnnualEnergyKwh)} a year", ["losses", "flow.designFlow"]),
+        new("pumping", "Pumping", typeof(PumpingStage), StudyStage.Pumping, (_, r) => r.Pumping is { } p ? $"{UnitDisplay.Energy(p.Pumping.ElectricKwh)} a year" : "not entered", ["pumping"]),
         new("money", "Money", typeof(MoneyStage), StudyStage.Money, (_, r) => r.Money is { } m ? m.Answer.Headline.ToLowerInvariant() : "not entered", ["money"]),
         new("cautions", "Cautions", typeof(CautionsStage), null, (s, _) => s.Cautions.Count == 0 ? "none but the standing" : $"{s.Cautions.Count} to read", []),
         new("memo", "Memo", typeof(MemoStage), null, (_, _) => "to take away", []),
