@@ -23,6 +23,27 @@ public sealed record StopHeadsInput(IReadOnlyList<StopHeads> Places, double Vapo
 /// <summary>Highest and lowest head along the pipe while the plant stops, with the pipe and the head of its rating.</summary>
 public static partial class StopHeadsChart
 {
+    // Where the rating lies above the picture it is left out; a line along the edge would tell a lower one.
+    private static IEnumerable<IReadOnlyList<StopHeads>> RatingWithin(IReadOnlyList<StopHeads> places, double highestM)
+    {
+        var stretch = new List<StopHeads>();
+        foreach (var place in places)
+        {
+            if (place.RatedM <= highestM)
+            {
+                stretch.Add(place);
+                continue;
+            }
+
+            if (stretch.Count > 1)
+                yield return stretch;
+            stretch = [];
+        }
+
+        if (stretch.Count > 1)
+            yield return stretch;
+    }
+
     /// <summary>Draws the chart.</summary>
     /// <exception cref="ArgumentException">There are fewer than two places.</exception>
     public static Drawing Draw(StopHeadsInput input, UnitDisplay show, DrawingSize size)
@@ -50,9 +71,15 @@ public static partial class StopHeadsChart
         var highest = Line(p => p.HighestM);
         var lowest = Line(p => p.LowestM);
         frame.Canvas.Polygon([.. highest, .. lowest.Reverse()], Paint.Filled(InkRole.WaterFill));
-        var rating = showsRating ? Line(p => Math.Min(p.RatedM ?? double.NaN, high + (0.06 * span))) : [];
-        if (rating.Count > 1)
-            frame.Curve(rating, new Stroke(InkRole.Ochre, 1.6, Dash.Dashed));
+        IReadOnlyList<Point> rating = [];
+        foreach (var stretch in showsRating ? RatingWithin(places, high + (0.06 * span)) : [])
+        {
+            var line = Simplify.Curve([.. stretch.Select(p => frame.At(unit.FromHeld(p.StationM), unit.FromHeld(p.RatedM!.Value)))]);
+            frame.Curve(line, new Stroke(InkRole.Ochre, 1.6, Dash.Dashed));
+            if (line.Count > 1 && (rating.Count == 0 || line[^1].X - line[0].X > rating[^1].X - rating[0].X))
+                rating = line;
+        }
+
         IReadOnlyList<Point> vapour = input.Parts ? Line(p => Math.Max(p.CentreM + input.VapourHeadM, low - (0.04 * span))) : [];
         if (vapour.Count > 1)
             frame.Curve(vapour, new Stroke(InkRole.Amber, 1.4, Dash.Dashed));
