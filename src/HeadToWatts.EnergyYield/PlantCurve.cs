@@ -13,6 +13,7 @@ public sealed class PlantCurve
     private readonly double[] _heldFlow;
     private readonly double _gammaKnPerM3;
     private readonly bool _isConstant;
+    private readonly PlantCurve? _inTurn;
 
     /// <summary>Works out where the plant follows the flow and where it holds.</summary>
     /// <param name="design">The plant.</param>
@@ -22,6 +23,8 @@ public sealed class PlantCurve
         _gammaKnPerM3 = design.Site.SpecificWeightNPerM3 / 1000;
         _isConstant = design.Train.IsConstant;
         Design = _isConstant ? design : design with { Train = design.Train.RatedFor(BestUnitShaftKw(design), design.Units.UnitCount) };
+        if (design.Units.Split == LoadSplit.Best && design.MovingHead is null)
+            _inTurn = new PlantCurve(Design with { Units = design.Units.With(LoadSplit.InTurn) });
         if (design.MovingHead is not null)
         {
             _from = [0];
@@ -100,7 +103,10 @@ public sealed class PlantCurve
     {
         var grossHeadM = Design.GrossHeadM(usableFlowM3PerS);
         var taken = Design.MovingHead is null ? FlowTakenM3PerS(usableFlowM3PerS) : MovingDispatch.FlowTakenM3PerS(this, usableFlowM3PerS, grossHeadM);
-        return taken > 0 ? Follow(taken, grossHeadM) with { UsableFlowM3PerS = usableFlowM3PerS } : Standing(usableFlowM3PerS, grossHeadM);
+        var point = taken > 0 ? Follow(taken, grossHeadM) with { UsableFlowM3PerS = usableFlowM3PerS } : Standing(usableFlowM3PerS, grossHeadM);
+
+        // The search for the best split goes in steps, and its pieces have more than one top: it is never let fall below one after another.
+        return _inTurn is { } simple && simple.At(usableFlowM3PerS) is var other && other.MeterPowerKw > point.MeterPowerKw ? other : point;
     }
 
     /// <summary>Of a usable flow, what the plant would take, m3/s.</summary>
